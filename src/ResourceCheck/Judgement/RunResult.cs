@@ -1,0 +1,140 @@
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Timeline;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>The result document of <c>run</c>: everything every report format shows, ordered once.</summary>
+public sealed record RunResult
+{
+    /// <summary>Program version.</summary>
+    public required string Version { get; init; }
+
+    /// <summary>The script.</summary>
+    public required InputFile Protocol { get; init; }
+
+    /// <summary>Name in the <c>protocol</c> line.</summary>
+    public required string Title { get; init; }
+
+    /// <summary>The conditions; null when ideal.</summary>
+    public required InputFile? Conditions { get; init; }
+
+    /// <summary>Overrides in the order given.</summary>
+    public required IReadOnlyList<KeyValuePair<string, string>> Overrides { get; init; }
+
+    /// <summary>Which engine and why.</summary>
+    public required EngineChoice Engine { get; init; }
+
+    /// <summary>Seed of sampled figures; null when nothing was sampled.</summary>
+    public required long? Seed { get; init; }
+
+    /// <summary>Parameters with the values used; several values where all were tried.</summary>
+    public required IReadOnlyList<ParameterUse> Parameters { get; init; }
+
+    /// <summary>The honest case, then the dishonest ones.</summary>
+    public required IReadOnlyList<CaseResult> Cases { get; init; }
+
+    /// <summary>Checkpoints in order.</summary>
+    public required IReadOnlyList<CheckpointResult> Checkpoints { get; init; }
+
+    /// <summary>Kept fraction of prepared copies, with its factors.</summary>
+    public required YieldResult Yield { get; init; }
+
+    /// <summary>Time of one copy, s.</summary>
+    public required double Duration { get; init; }
+
+    /// <summary>Seconds per kept copy at the preparation rate; null when no rate is given.</summary>
+    public required double? SecondsPerKeptCopy { get; init; }
+
+    /// <summary>Goals in the order written.</summary>
+    public required IReadOnlyList<GoalResult> Goals { get; init; }
+
+    /// <summary>The verdict.</summary>
+    public required Verdict Verdict { get; init; }
+
+    /// <summary>The verdict in words: first line of the text output.</summary>
+    public required string VerdictText { get; init; }
+
+    /// <summary>What limits the result, in words; null when nothing does.</summary>
+    public required string? Hint { get; init; }
+
+    /// <summary>The schedule.</summary>
+    public required IReadOnlyList<ScheduleLine> Timeline { get; init; }
+
+    /// <summary>Warnings and notes that go with the numbers.</summary>
+    public required IReadOnlyList<Diagnostic> Warnings { get; init; }
+}
+
+/// <summary>An input file and its hash.</summary>
+/// <param name="Name">Name as the user gave it.</param>
+/// <param name="Sha256">SHA-256 of its bytes, lower-case hexadecimal.</param>
+public sealed record InputFile(string Name, string Sha256);
+
+/// <summary>A parameter's value or values.</summary>
+/// <param name="Name">Its name.</param>
+/// <param name="Values">Exact values as text, such as <c>4</c> or <c>1/3</c>.</param>
+/// <param name="IsDefault">Whether the script's default was used.</param>
+public sealed record ParameterUse(string Name, IReadOnlyList<string> Values, bool IsDefault);
+
+/// <summary>The metrics of the honest case or of one dishonest case.</summary>
+/// <param name="Case"><c>honest</c> or the name of the dishonest block.</param>
+/// <param name="Dishonest">Who cheats; empty in the honest case.</param>
+/// <param name="Metrics">Metrics in order.</param>
+public sealed record CaseResult(string Case, IReadOnlyList<string> Dishonest, IReadOnlyList<MetricResult> Metrics);
+
+/// <summary>One metric.</summary>
+/// <param name="Name"><c>success</c>, <c>failure</c>, <c>abort</c>, <c>harm</c> or a report's label.</param>
+/// <param name="Estimate">The number, its label and interval. Over inputs and listed parameters the worst: least success, greatest failure, abort and harm.</param>
+/// <param name="Ideal">The same figure under ideal conditions.</param>
+/// <param name="Range">Least and greatest over inputs and listed parameter values; null when there is but one.</param>
+/// <param name="WorstAt">Input and parameter values at which the shown value is taken; null when there is but one.</param>
+public sealed record MetricResult(string Name, Estimate Estimate, double? Ideal, (double Low, double High)? Range, string? WorstAt);
+
+/// <summary>Fidelity at a checkpoint.</summary>
+/// <param name="Name">Its label.</param>
+/// <param name="Fidelity">Fidelity of the copies kept so far; the least over inputs and listed parameter values.</param>
+/// <param name="Ideal">The same under ideal conditions.</param>
+/// <param name="Loss">Ideal minus fidelity.</param>
+/// <param name="Kept">Fraction of prepared copies kept so far.</param>
+/// <param name="At">Time of the look, s.</param>
+/// <param name="Branches">Fidelity by outcomes.</param>
+/// <param name="BuiltIn">Whether it is <c>prepared</c>, <c>stored</c> or <c>arrived</c>.</param>
+public sealed record CheckpointResult(string Name, Estimate Fidelity, double Ideal, double Loss, double Kept, double At, IReadOnlyList<BranchEvaluation> Branches, bool BuiltIn);
+
+/// <summary>Kept fraction and its factors; all exact for exact engines.</summary>
+/// <param name="Value">Heralded · seen · kept.</param>
+/// <param name="Heralded">All heralded qudits arrived.</param>
+/// <param name="Seen">Of these, every measurement clicked.</param>
+/// <param name="Kept">Of these, kept by the script.</param>
+/// <param name="OnlySeen">Whether figures are "of the copies that all saw": some copies were dropped for a missing click.</param>
+public sealed record YieldResult(Estimate Value, double Heralded, double Seen, double Kept, bool OnlySeen);
+
+/// <summary>A goal and whether it is met.</summary>
+/// <param name="Text">The goal as written.</param>
+/// <param name="Value">The figure compared.</param>
+/// <param name="Threshold">What it is compared with.</param>
+/// <param name="Met">Whether it is met.</param>
+/// <param name="Margin">How far inside (positive) or outside (negative) the goal the figure lies.</param>
+public sealed record GoalResult(string Text, Estimate Value, double Threshold, bool Met, double Margin);
+
+/// <summary>A line of the schedule with names in place of indices.</summary>
+/// <param name="Start">s.</param>
+/// <param name="End">s.</param>
+/// <param name="Party">Party name; <c>all</c> for everybody.</param>
+/// <param name="Kind">Kind.</param>
+/// <param name="Text">What happens.</param>
+/// <param name="To">A message's recipient; null otherwise.</param>
+public sealed record ScheduleLine(double Start, double End, string Party, TimelineKind Kind, string Text, string? To);
+
+/// <summary>Whether the goals are met.</summary>
+public enum Verdict
+{
+    /// <summary>There are no goals.</summary>
+    NoGoals,
+
+    /// <summary>All goals are met.</summary>
+    Met,
+
+    /// <summary>Some goal is not met.</summary>
+    NotMet,
+}

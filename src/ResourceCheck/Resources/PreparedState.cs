@@ -1,0 +1,22 @@
+using System.Numerics;
+
+namespace ResourceCheck.Resources;
+
+/// <summary>
+/// A state of several qudits with as many levels each as the state has qudits or as told. First qudit is the most significant index.
+/// Exactly one of <see cref="Ket"/> and <see cref="Density"/> is set.
+/// </summary>
+public sealed record PreparedState
+{
+    /// <summary>Number of qudits N.</summary>
+    public required int Parties { get; init; }
+
+    /// <summary>Levels d of each qudit.</summary>
+    public required int Levels { get; init; }
+
+    /// <summary>State vector of d^N amplitudes, norm 1; null for a mixed state.</summary>
+    public Complex[]? Ket { get; init; }
+
+    /// <summary>Density matrix, d^N × d^N, row after row, trace 1; null for a pure state.</summary>
+    public Complex[]? Density { get; init; }
+}
