@@ -9,10 +9,11 @@ import local_noise
 import outcomes
 import pairs
 import preparation
+import runs
 import removal
 from tables import near, stored_values
 
-BUILDERS = [local_noise.build, removal.build, outcomes.build, pairs.build, preparation.build]
+BUILDERS = [local_noise.build, removal.build, outcomes.build, pairs.build, preparation.build, runs.build]
 
 
 def main(arguments):
