@@ -9,7 +9,7 @@ namespace ResourceCheck.Scripts;
 public static class Script
 {
     /// <summary>Reads a script. Findings hold every mistake of form; the tree is returned even then, with broken lines marked.</summary>
-    public static (ScriptTree Tree, IReadOnlyList<Diagnostic> Findings) Parse(SourceText source) => throw new NotSupportedException();
+    public static (ScriptTree Tree, IReadOnlyList<Diagnostic> Findings) Parse(SourceText source) => ScriptParser.Run(source);
 
     /// <summary>The script in its one shape: the formatter's output. Parsing it gives the same tree.</summary>
     public static string Print(ScriptTree tree) => throw new NotSupportedException();
