@@ -21,6 +21,9 @@ public sealed record SourceText(string Name, string Text)
         return index >= 0 ? index + 1 : ~index;
     }
 
+    /// <summary>Whether a line, from 1, holds nothing but blanks.</summary>
+    internal bool IsBlank(int line) => LineContent(line).IsWhiteSpace();
+
     /// <summary>The place of a span, with its line quoted; a span over several lines is marked to the end of its first. A very long line
     /// is quoted in part, a blank one not at all.</summary>
     public Place PlaceOf(Span span)
