@@ -3,10 +3,10 @@
 a = (exp(i m tau) + m - 1)/m and b = (exp(i m tau) - 1)/m are the amplitudes of level m-1 staying at the last qudit and of
 it at each other one after the nominal time, up to a common phase; the phase of the last qudit's level m-1 is arg b - arg a.
 """
+from functools import cache
 from math import asin, sqrt
 
 import numpy as np
-from scipy.linalg import expm
 
 import dense
 from tables import Table
@@ -62,6 +62,7 @@ def local_phase(m):
     return np.angle((turn - 1) / m) - np.angle((turn + m - 1) / m)
 
 
+@cache
 def exchange(m, i, k):
     """The swap of qudits i and k of m qudits of m levels."""
     axes = list(range(m))
@@ -76,7 +77,8 @@ def step(ket, m, time_error=0.0, phase_error=0.0, couplings=None):
     wide[(slice(0, m - 1),) * (m - 1) + (m - 1,)] = ket.reshape((m - 1,) * (m - 1))
     strengths = {(i, k): 1.0 for i in range(m) for k in range(i + 1, m)} | (couplings or {})
     hamiltonian = sum(j * exchange(m, i, k) for (i, k), j in strengths.items())
-    moved = expm(-1j * hamiltonian * (pulse_time(m) + time_error)) @ wide.reshape(-1)
+    energies, modes = np.linalg.eigh(hamiltonian)
+    moved = modes @ (np.exp(-1j * energies * (pulse_time(m) + time_error)) * (modes.T @ wide.reshape(-1)))
     return phased(moved, m, local_phase(m) + phase_error)
 
 
