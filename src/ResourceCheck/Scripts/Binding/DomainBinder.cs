@@ -8,8 +8,8 @@ namespace ResourceCheck.Scripts.Binding;
 /// <param name="context">The binding.</param>
 internal sealed class DomainBinder(BindContext context)
 {
-    // A range longer than this is certainly a slip, and listing it would fill the memory.
-    private const int MostValues = 1_000_000;
+    // Every value of an input is tried, so that a longer range is certainly a slip.
+    private const int MostValues = 10_000;
 
     /// <summary>All values of a listed or whole-number domain, or null after a finding.</summary>
     public IReadOnlyList<Value>? Values(Domain domain)
@@ -22,7 +22,12 @@ internal sealed class DomainBinder(BindContext context)
             return null;
         }
 
-        return Range(domain)?.Values?.Select(v => (Value)new NumberValue(v)).ToArray();
+        if (Range(domain)?.Values is not { } values)
+            return null;
+        if (values.Count <= MostValues)
+            return [.. values.Select(v => new NumberValue(v))];
+        context.Findings.Report(domain.Span, BindingMessages.LongDomain(MostValues));
+        return null;
     }
 
     /// <summary>A domain of numbers with its ends, or null after a finding.</summary>
@@ -72,10 +77,8 @@ internal sealed class DomainBinder(BindContext context)
         BigInteger first = from.Ceiling(), last = to.Floor();
         if (domain.Whole ? last < first : to < from)
             context.Findings.Report(domain.Span, BindingMessages.EmptyDomain(context.TextOf(domain.Span)));
-        else if (domain.Whole && last - first >= MostValues)
-            context.Findings.Report(domain.Span, BindingMessages.LongDomain(MostValues));
         else if (domain.Whole)
-            return ([.. Enumerable.Range(0, (int)(last - first) + 1).Select(i => Rational.From(first + i))], Rational.From(first), Rational.From(last));
+            return (new WholeRange(first, last), Rational.From(first), Rational.From(last));
         else
             return (null, from, to);
         return null;

@@ -29,7 +29,7 @@ internal sealed class PartyResolver(BindContext context)
     /// <summary>The one party that a reference names, or -1 after a finding.</summary>
     public int Single(PartyRef reference)
     {
-        IReadOnlyList<PartyMention> mentions = Resolve(new PartyList(reference.Span, [reference]), context.Parties.Insiders);
+        List<PartyMention> mentions = Resolve(new PartyList(reference.Span, [reference]), context.Parties.Insiders);
         if (mentions.Count == 1 && !mentions[0].Collective)
             return mentions[0].Party;
         if (mentions.Count != 0 || reference is CollectiveParty)
@@ -68,7 +68,7 @@ internal sealed class PartyResolver(BindContext context)
         return found;
     }
 
-    private IEnumerable<int> Members(PartyRef item, IEnumerable<int> everybody, List<PartyMention> before) => item switch
+    private int[] Members(PartyRef item, IEnumerable<int> everybody, List<PartyMention> before) => item switch
     {
         NamedParty named => Named(named),
         FamilyParty family => Family(family),

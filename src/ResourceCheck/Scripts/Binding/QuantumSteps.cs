@@ -141,7 +141,7 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
         return broken ? null : new BoundUnitary(u.Span, u.Kind, basis.Bound, first.Bound, second.Bound, u.File?.Text);
     }
 
-    private Typed Steps(ExpressionBinder values, Expression expression)
+    private static Typed Steps(ExpressionBinder values, Expression expression)
     {
         Typed typed = values.Expect(expression, ValueKind.Number);
         return typed.Constant is NumberValue { Number.IsWhole: false } number

@@ -26,8 +26,8 @@ internal sealed class Reachability(BindContext context)
 
         if (statement is KeepStatement keep && Fixed(keep.Condition) == false)
             _end = keep.Span;
-        if (statement is WhenStatement when && Fixed(when.Condition) is { } holds && (holds ? when.Otherwise : when.Then).FirstOrDefault() is { } dead)
-            context.Findings.Report(dead.Span, BindingMessages.NeverReached($"the condition on line {context.LineOf(when.Span)} always {(holds ? "holds" : "fails")}"));
+        if (statement is WhenStatement block && Fixed(block.Condition) is { } holds && (holds ? block.Otherwise : block.Then) is [var dead, ..])
+            context.Findings.Report(dead.Span, BindingMessages.NeverReached($"the condition on line {context.LineOf(block.Span)} always {(holds ? "holds" : "fails")}"));
     }
 
     private bool? Fixed(Expression condition)

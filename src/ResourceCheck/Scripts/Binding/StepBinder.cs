@@ -169,7 +169,7 @@ internal sealed class StepBinder
     private void TellMisses()
     {
         foreach ((Miss miss, IReadOnlyCollection<int> actors) in _context.Misses.Take())
-            _context.Findings.Report(miss.Span, BindingMessages.NotKnown(miss, [.. actors.Select(_context.NameOf)], "act", "acts", "on", _context));
+            _context.Findings.Report(miss.Span, BindingMessages.NotKnown(miss, [.. actors.Select(_context.NameOf)], "on", _context));
     }
 
     private void Limit(Statement statement, int added)

@@ -113,6 +113,6 @@ internal sealed class WhenBinder(BindContext context, NameMaker names, Reachabil
     private void TellMisses()
     {
         foreach ((Miss miss, IReadOnlyCollection<int> actors) in context.Misses.Take())
-            context.Findings.Report(miss.Span, BindingMessages.NotKnown(miss, [.. actors.Select(context.NameOf)], "act", "acts", "under a condition on", context));
+            context.Findings.Report(miss.Span, BindingMessages.NotKnown(miss, [.. actors.Select(context.NameOf)], "under a condition on", context));
     }
 }

@@ -1,5 +1,6 @@
 using System.Numerics;
 using ResourceCheck.Quantities;
+using ResourceCheck.Scripts.Parsing;
 
 namespace ResourceCheck.Scripts.Binding;
 
@@ -41,15 +42,7 @@ internal static class Words
     public static string Write(Value value) => value is NumberValue number ? Number(number.Number) : value.ToString()!;
 
     /// <summary>The known name nearest to a wrong one, or null when none is near.</summary>
-    public static string? Near(string wrong, IEnumerable<string> known)
-    {
-        int limit = Math.Max(1, wrong.Length / 3);
-        return known.Distinct()
-            .Select(name => (Name: name, Distance: string.Equals(name, wrong, StringComparison.OrdinalIgnoreCase) ? 0 : Distance(wrong, name)))
-            .Where(pair => pair.Distance <= limit && pair.Distance < wrong.Length)
-            .OrderBy(pair => pair.Distance).ThenBy(pair => pair.Name, StringComparer.Ordinal)
-            .Select(pair => pair.Name).FirstOrDefault();
-    }
+    public static string? Near(string wrong, IEnumerable<string> known) => NearWords.Find(wrong, known.Where(k => k != wrong));
 
     private static string Decimal(BigInteger scaled, int places)
     {
@@ -57,27 +50,5 @@ internal static class Words
             return scaled.ToString();
         string digits = BigInteger.Abs(scaled).ToString().PadLeft(places + 1, '0');
         return $"{(scaled.Sign < 0 ? "-" : "")}{digits[..^places]}.{digits[^places..]}";
-    }
-
-    // Edit distance with neighbours exchanged counting once: Damerau, Commun. ACM 7, 171 (1964), in its restricted form.
-    private static int Distance(string a, string b)
-    {
-        int[,] table = new int[a.Length + 1, b.Length + 1];
-        for (int i = 0; i <= a.Length; i++)
-            table[i, 0] = i;
-        for (int j = 0; j <= b.Length; j++)
-            table[0, j] = j;
-        for (int i = 1; i <= a.Length; i++)
-        {
-            for (int j = 1; j <= b.Length; j++)
-            {
-                int change = table[i - 1, j - 1] + (a[i - 1] == b[j - 1] ? 0 : 1);
-                table[i, j] = Math.Min(change, Math.Min(table[i - 1, j], table[i, j - 1]) + 1);
-                if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1])
-                    table[i, j] = Math.Min(table[i, j], table[i - 2, j - 2] + 1);
-            }
-        }
-
-        return table[a.Length, b.Length];
     }
 }
