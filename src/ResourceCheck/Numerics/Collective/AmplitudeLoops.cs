@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.CompilerServices;
 using System.Runtime.InteropServices;
 
 namespace ResourceCheck.Numerics.Collective;
@@ -14,6 +15,7 @@ internal static class AmplitudeLoops
 
     public static double Norm(ReadOnlySpan<Complex> state) => Math.Sqrt(NormSquared(state));
 
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Scale(Span<Complex> state, double factor)
     {
         Span<double> parts = MemoryMarshal.Cast<Complex, double>(state);
@@ -25,6 +27,7 @@ internal static class AmplitudeLoops
     }
 
     /// <summary>target *= scale, sum += target; returns ‖target‖².</summary>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static double Finish(Span<Complex> target, double scale, Span<Complex> sum)
     {
         Span<double> t = MemoryMarshal.Cast<Complex, double>(target), s = MemoryMarshal.Cast<Complex, double>(sum);

@@ -1,3 +1,5 @@
+using System.Runtime.CompilerServices;
+
 namespace ResourceCheck.Numerics.Collective;
 
 /// <summary>
@@ -20,6 +22,7 @@ internal sealed record SwapLane(int Length, int[] Targets, ushort[] Coefficients
     public int Coefficient(int word) => Coefficients[word / Length];
 
     /// <summary>Finds the longest run that fits everywhere and divides <paramref name="longest"/>.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static SwapLane From(int[] targets, ushort[] coefficients, int longest)
     {
         int length = Gcd(targets.Length, longest);
@@ -29,11 +32,17 @@ internal sealed record SwapLane(int Length, int[] Targets, ushort[] Coefficients
                 length = Gcd(length, q);
         }
 
-        int runs = targets.Length / length;
-        return new SwapLane(
-            length,
-            [.. Enumerable.Range(0, runs).Select(r => targets[r * length])],
-            [.. Enumerable.Range(0, runs).Select(r => coefficients[r * length])]);
+        return length == 1
+            ? new SwapLane(1, targets, coefficients)
+            : new SwapLane(length, EveryNth(targets, length), EveryNth(coefficients, length));
+    }
+
+    private static T[] EveryNth<T>(T[] values, int step)
+    {
+        T[] kept = new T[values.Length / step];
+        for (int i = 0; i < kept.Length; i++)
+            kept[i] = values[i * step];
+        return kept;
     }
 
     private static int Gcd(int a, int b) => b == 0 ? a : Gcd(b, a % b);

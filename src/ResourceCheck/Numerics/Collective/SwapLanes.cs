@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.CompilerServices;
 
 namespace ResourceCheck.Numerics.Collective;
 
@@ -24,32 +25,50 @@ internal static class SwapLanes
     /// <summary>The lanes of a block: a lane for each choice of letter, which of its places, and which excited place.</summary>
     public static SwapLane[] Of(WordBlock block, ExchangeSign sign, int longest)
     {
-        List<SwapLane> lanes = [];
+        int[] places = AllPlaces(block);
+        List<(int Letter, int Place, int Excited)> choices = [];
         for (int letter = 1; letter < block.Counts.Length; letter++)
         {
-            for (int place = 0; place < block.Counts[letter]; place++)
-            {
-                for (int excited = 0; excited < block.Counts[0]; excited++)
-                    lanes.Add(Lane(block, letter, place, excited, sign, longest));
-            }
+            for (int at = 0; at < block.Counts[letter] * block.Counts[0]; at++)
+                choices.Add((letter, at / block.Counts[0], at % block.Counts[0]));
         }
 
-        return [.. lanes];
+        SwapLane[] lanes = new SwapLane[choices.Count];
+        Parallel.For(0, lanes.Length, at => lanes[at] = Lane(block, places, choices[at], sign, longest));
+        return lanes;
     }
 
-    private static SwapLane Lane(WordBlock block, int letter, int place, int excited, ExchangeSign sign, int longest)
+    /// <summary>For each word and letter the emitters that hold it, as bits.</summary>
+    private static int[] AllPlaces(WordBlock block)
     {
-        int n = block.Emitters, negative = (block.Counts.Length - 1) * n * n;
-        int[] targets = new int[block.Size];
-        ushort[] coefficients = new ushort[block.Size];
+        int letters = block.Counts.Length;
+        int[] places = new int[block.Size * letters];
         for (int q = 0; q < block.Size; q++)
         {
-            ulong code = block.Codes[q];
-            int places = block.Places(code, letter);
-            int i = Nth(places, place), e = Nth(block.Places(code, 0), excited);
-            targets[q] = block.Rank(WordBlock.With(WordBlock.With(code, i, 0), e, letter));
-            bool flips = sign == ExchangeSign.Odd && BitOperations.PopCount((uint)(places & Between(i, e))) % 2 == 1;
-            coefficients[q] = (ushort)(((((letter - 1) * n) + e) * n) + i + (flips ? negative : 0));
+            for (int i = 0; i < block.Emitters; i++)
+                places[(q * letters) + WordBlock.Letter(block.Codes[q], i)] |= 1 << i;
+        }
+
+        return places;
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
+    private static SwapLane Lane(
+        WordBlock block, int[] places, (int Letter, int Place, int Excited) choice, ExchangeSign sign, int longest)
+    {
+        int n = block.Emitters, letters = block.Counts.Length, negative = (letters - 1) * n * n;
+        int[] targets = new int[block.Size];
+        ushort[] coefficients = new ushort[block.Size];
+        Span<int> moved = stackalloc int[letters];
+        for (int q = 0; q < block.Size; q++)
+        {
+            places.AsSpan(q * letters, letters).CopyTo(moved);
+            int i = Nth(moved[choice.Letter], choice.Place), e = Nth(moved[0], choice.Excited), both = (1 << i) | (1 << e);
+            int passed = sign == ExchangeSign.Odd ? BitOperations.PopCount((uint)(moved[choice.Letter] & Between(i, e))) % 2 : 0;
+            moved[0] ^= both;
+            moved[choice.Letter] ^= both;
+            targets[q] = block.Rank(moved);
+            coefficients[q] = (ushort)(((((choice.Letter - 1) * n) + e) * n) + i + (passed * negative));
         }
 
         return SwapLane.From(targets, coefficients, longest);

@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.CompilerServices;
 
 namespace ResourceCheck.Numerics.Collective;
 
@@ -15,11 +16,15 @@ internal sealed class WordBlock
     /// <summary>Most emitters and most letters that a code can hold.</summary>
     public const int Most = 16;
 
+    /// <summary>Ways to place each letter once the letters before it have their places.</summary>
+    private readonly int[] _choices;
+
     private WordBlock(int[] counts, ulong[] codes)
     {
         Counts = counts;
         Codes = codes;
         Emitters = counts.Sum();
+        _choices = Choices(counts);
     }
 
     /// <summary>How often each letter occurs.</summary>
@@ -76,12 +81,24 @@ internal sealed class WordBlock
     /// <summary>Number of a word of this block.</summary>
     public int Rank(ulong code)
     {
+        Span<int> places = stackalloc int[Counts.Length];
+        for (int i = 0; i < Emitters; i++)
+            places[Letter(code, i)] |= 1 << i;
+        return Rank(places);
+    }
+
+    /// <summary>Number of the word whose letters are at the given places: bits of emitters, for each letter.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
+    public int Rank(ReadOnlySpan<int> places)
+    {
         int free = (1 << Emitters) - 1, rank = 0;
-        for (int letter = 0; letter < Counts.Length; letter++)
+        for (int letter = 0; letter < places.Length; letter++)
         {
-            int places = Places(code, letter), room = BitOperations.PopCount((uint)free);
-            rank = (rank * (int)Choose(room, Counts[letter])) + SubsetRank(places, free, room, Counts[letter]);
-            free &= ~places;
+            int within = Counts[letter] == 1
+                ? BitOperations.PopCount((uint)(free & (places[letter] - 1)))
+                : SubsetRank(places[letter], free, Counts[letter]);
+            rank = (rank * _choices[letter]) + within;
+            free &= ~places[letter];
         }
 
         return rank;
@@ -110,17 +127,17 @@ internal sealed class WordBlock
     }
 
     /// <summary>Lexicographic number of a subset among those of its size within the free places.</summary>
-    private static int SubsetRank(int places, int free, int room, int left)
+    private static int SubsetRank(int places, int free, int left)
     {
         int rank = 0;
-        for (int at = 0; at < room && left > 0; at++)
+        for (int room = BitOperations.PopCount((uint)free); left > 0; room--)
         {
             int lowest = free & -free;
             free &= ~lowest;
             if ((places & lowest) != 0)
                 left--;
             else
-                rank += (int)Choose(room - 1 - at, left - 1);
+                rank += (int)Choose(room - 1, left - 1);
         }
 
         return rank;
@@ -160,6 +177,15 @@ internal sealed class WordBlock
         for (int rest = places; rest != 0; rest &= rest - 1)
             code = With(code, BitOperations.TrailingZeroCount(rest), letter);
         return code;
+    }
+
+    private static int[] Choices(int[] counts)
+    {
+        int free = counts.Sum();
+        int[] choices = new int[counts.Length];
+        for (int letter = 0; letter < counts.Length; free -= counts[letter++])
+            choices[letter] = (int)Choose(free, counts[letter]);
+        return choices;
     }
 
     private static long Choose(int n, int k)
