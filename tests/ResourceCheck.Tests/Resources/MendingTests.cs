@@ -16,7 +16,8 @@ public sealed class MendingTests
     public void Cut_eigenvalues_are_taken_evenly_from_the_others()
     {
         double[] lambda = SimplexProjection.Of([0.6, 0.5, 0.1, -0.2]);
-        Assert.Equal([0.6 - 0.2 / 3, 0.5 - 0.2 / 3, 0.1 - 0.2 / 3, 0], lambda.Select(x => Math.Round(x, 15)).Zip([0.6 - 0.2 / 3, 0.5 - 0.2 / 3, 0.1 - 0.2 / 3, 0], (a, b) => Math.Abs(a - b) < 1e-14 ? b : a));
+        double[] expected = [8 / 15.0, 13 / 30.0, 1 / 30.0, 0];
+        Assert.All(lambda.Zip(expected), pair => Assert.Equal(pair.Second, pair.First, 1e-14));
     }
 
     /// <summary>Optimality (Karush, Kuhn, Tucker): all kept values move by the same amount, and no cut one would stay positive after it.</summary>
