@@ -29,6 +29,15 @@ public sealed class StateCatalogueTests
     }
 
     [Fact]
+    public void Examples_of_the_page_on_states_are_states()
+    {
+        string page = File.ReadAllText(Path.Combine(Fixture.PathOf(""), "..", "..", "..", "..", "docs", "states.md"));
+        (string Ending, string Text)[] examples = [.. Regex.Matches(page, "```(json|mtx)\n(.*?)```", RegexOptions.Singleline).Select(m => ($".{m.Groups[1].Value}", m.Groups[2].Value))];
+        Assert.Equal(4, examples.Length);
+        Assert.All(examples, example => Assert.Empty(Fixture.With(example.Ending, example.Text, path => StateFile.Read(path, mend: false)).Findings));
+    }
+
+    [Fact]
     public void A_file_of_another_size_than_the_protocol_is_refused()
     {
         ResourceModel model = new(new FilePreparation(Fixture.PathOf("vector-c16.npy"), Mend: false), 0);

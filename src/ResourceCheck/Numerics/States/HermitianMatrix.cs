@@ -33,9 +33,10 @@ internal static class HermitianMatrix
         return scaled.ConjugateTransposeAndMultiply(v).ToRowMajorArray();
     }
 
-    /// <summary>Trace norm: the sum of the singular values, of any square matrix.</summary>
-    public static double TraceNorm(Complex[] rows, int size) =>
-        Matrix<Complex>.Build.Dense(size, size, [.. rows.Select(WithoutDenormals)]).Svd(false).S.Sum(value => value.Real);
+    /// <summary>Trace norm: the sum of the singular values, of any square matrix. Those of a Hermitian one come several times faster.</summary>
+    public static double TraceNorm(Complex[] rows, int size) => LargestAsymmetry(rows, size).Deviation == 0
+        ? Eigenvalues(rows, size).Sum(Math.Abs)
+        : Matrix<Complex>.Build.Dense(size, size, [.. rows.Select(WithoutDenormals)]).Svd(false).S.Sum(value => value.Real);
 
     /// <summary>(ρ + ρ†)/2, the Hermitian matrix nearest to any square one.</summary>
     public static Complex[] HermitianPart(Complex[] rows, int size)
