@@ -106,20 +106,20 @@ public sealed class MendingTests
     [Fact]
     public void Large_matrices_are_checked_without_their_eigenvalues()
     {
-        string good = Diagonal(_ => 1 / 1024.0);
+        string good = Diagonal(_ => 1 / 529.0);
         Outcome<StateDescription> described = Fixture.With(".json", good, path => StateFile.Describe(path, mend: false));
         Assert.Equal((Severity.Note, "D019"), (described.Findings.Single().Severity, described.Findings.Single().Code));
-        Assert.Equal(1 / 1024.0, described.Value!.Figures.Single(f => f.Name == "purity").Value, 1e-12);
+        Assert.Equal(1 / 529.0, described.Value!.Figures.Single(f => f.Name == "purity").Value, 1e-12);
         Assert.Equal(-1e-9, described.Value.Validity.LowestEigenvalue, 1e-15);
-        string bad = Diagonal(i => i == 700 ? -1e-8 : (1 + 1e-8) / 1023);
+        string bad = Diagonal(i => i == 300 ? -1e-8 : (1 + 1e-8) / 528);
         Assert.Equal(["D015"], Fixture.With(".json", bad, path => StateFile.Read(path, mend: false)).Findings.Select(f => f.Code));
         Assert.Equal(["D015", "D017"], Fixture.With(".json", bad, path => StateFile.Read(path, mend: true)).Findings.Select(f => f.Code));
     }
 
-    /// <summary>A diagonal matrix of ten qubits as JSON.</summary>
+    /// <summary>A diagonal matrix of two qudits with 23 levels as JSON.</summary>
     private static string Diagonal(Func<int, double> value)
     {
-        IEnumerable<string> rows = Enumerable.Range(0, 1024).Select(r => $"[{string.Join(',', Enumerable.Range(0, 1024).Select(c => r == c ? $"{value(r):R}" : "0"))}]");
-        return $"{{\"parties\": 10, \"levels\": 2, \"density\": [{string.Join(",\n", rows)}]}}";
+        IEnumerable<string> rows = Enumerable.Range(0, 529).Select(r => $"[{string.Join(',', Enumerable.Range(0, 529).Select(c => r == c ? $"{value(r):R}" : "0"))}]");
+        return $"{{\"parties\": 2, \"levels\": 23, \"density\": [{string.Join(",\n", rows)}]}}";
     }
 }
