@@ -142,6 +142,13 @@ internal sealed class Lexer
     {
         bool valid = Rune.DecodeFromUtf16(_text.AsSpan(_position), out Rune rune, out int length) == System.Buffers.OperationStatus.Done;
         Span span = new(_position, length);
+        if (valid && Rune.IsDigit(rune))
+        {
+            Add(TokenKind.Number, span.End, "0");
+            Report(span, SyntaxMessages.ForeignDigit(rune));
+            return;
+        }
+
         _position += length;
         bool told = _strayTold;
         _strayTold = _faulty = true;
