@@ -67,7 +67,7 @@ public sealed class HostileScriptTests
     [InlineData("copies \0\0\0 3")]
     [InlineData("protocol \"a\u001b[31mb\"")]
     [InlineData("copies \r 3")]
-    [InlineData("copies \ud800 3")]
+    [InlineData("copies \ufffd 3")]
     [InlineData("copies \u2028\u0007 3")]
     public void Unreadable_characters_are_told_and_shown_by_harmless_ones(string script)
     {
@@ -75,6 +75,9 @@ public sealed class HostileScriptTests
         Assert.Equal("S005", finding.Code);
         Assert.DoesNotContain(finding.ToString(), c => char.IsControl(c) && c != '\n');
     }
+
+    [Fact]
+    public void Half_a_surrogate_pair_is_unreadable() => Assert.Equal("S005", Assert.Single(Findings("copies " + '\ud800' + " 3")).Code);
 
     [Fact]
     public void Blanks_of_other_widths_are_blanks() => Assert.Empty(Findings("copies\u00a0\t\u20033\n"));

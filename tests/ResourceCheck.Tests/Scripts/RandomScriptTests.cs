@@ -21,7 +21,7 @@ public sealed class RandomScriptTests
     [Property(MaxTest = 500)]
     public void Any_text_is_read_and_printed_without_exception(string? text) => ReadAndPrint(text ?? "");
 
-    [Property(MaxTest = 1000)]
+    [Property(MaxTest = 500)]
     public void Any_row_of_words_is_read_and_printed_without_exception(int seed)
     {
         Random random = new(seed);
@@ -31,7 +31,7 @@ public sealed class RandomScriptTests
         ReadAndPrint(text.ToString());
     }
 
-    [Property(MaxTest = 1000)]
+    [Property(MaxTest = 500)]
     public void Any_mutation_of_a_script_is_read_and_printed_without_exception(int seed)
     {
         Random random = new(seed);

@@ -152,8 +152,9 @@ internal sealed class Lexer
         _position += length;
         bool told = _strayTold;
         _strayTold = _faulty = true;
+        bool readable = valid && !Rune.IsControl(rune) && rune != Rune.ReplacementChar;
         if (!told)
-            _findings.Add(span, valid && !Rune.IsControl(rune) ? SyntaxMessages.StrayCharacter(rune) : SyntaxMessages.ControlCharacter(_text[span.Start]));
+            _findings.Add(span, readable ? SyntaxMessages.StrayCharacter(rune) : SyntaxMessages.ControlCharacter(_text[span.Start]));
     }
 
     private void Add(TokenKind kind, int end, string text)
