@@ -57,7 +57,7 @@ public sealed class LocalNoiseLaws
             Time = flight.Time,
             LeakageProbability = flight.LeakageProbability,
             Rotation = flight.Rotation,
-            PhaseNoise = flight.PhaseNoise,
+            PhaseFactors = flight.PhaseFactors,
             Dephasing = flight.Dephasing,
             Depolarising = flight.Depolarising,
             Kraus = flight.Kraus,

@@ -32,7 +32,7 @@ internal static class RandomWorld
             Dynamics = Dynamics(random, levels, lossy),
             LeakageProbability = [.. Enumerable.Range(0, levels).Select(_ => lossy ? random.NextDouble() * 0.1 : 0)],
             Rotation = Unitary(random, levels),
-            PhaseNoise = random.NextDouble(),
+            PhaseFactors = PhaseFactors(random.NextDouble(), levels),
             Dephasing = random.NextDouble() * 0.3,
             Depolarising = random.NextDouble() * 0.3,
             Kraus = RandomKraus(random, levels),
@@ -43,6 +43,15 @@ internal static class RandomWorld
         Operations = new OperationModel(Duration.FromSeconds(random.NextDouble()), random.NextDouble() * 0.2, random.NextDouble() * 0.2),
         Detection = new DetectionModel(Duration.FromSeconds(random.NextDouble()), Stochastic(random, levels), lossy ? random.NextDouble() : 1, random.NextDouble() * 0.2),
     };
+
+    /// <summary>exp(-σ²(a-b)²/2).</summary>
+    public static double[,] PhaseFactors(double sigma, int levels)
+    {
+        double[,] factors = new double[levels, levels];
+        for (int i = 0; i < levels * levels; i++)
+            factors[i / levels, i % levels] = Math.Exp(-sigma * sigma * ((i / levels) - (i % levels)) * ((i / levels) - (i % levels)) / 2);
+        return factors;
+    }
 
     public static LocalDynamics Dynamics(Random random, int levels, bool leaking)
     {

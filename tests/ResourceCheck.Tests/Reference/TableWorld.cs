@@ -26,7 +26,7 @@ internal static class TableWorld
         Time = Duration.FromSeconds(1),
         Dynamics = Dynamics(row, party),
         Rotation = Rotation(row.Of("rotation", party), row.N),
-        PhaseNoise = row.Number("phaseNoise", party),
+        PhaseFactors = Engines.RandomWorld.PhaseFactors(row.Number("phaseNoise", party), row.N),
         Dephasing = row.Number("dephasing", party),
         Depolarising = row.Number("depolarising", party),
         Transmission = row.Of("transmission", party) is { } t ? [.. t.Split(',').Select(TableRow.Number)] : [.. Enumerable.Repeat(1.0, row.N)],
