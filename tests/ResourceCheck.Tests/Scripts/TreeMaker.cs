@@ -17,8 +17,12 @@ internal sealed class TreeMaker(Random random)
     public ScriptTree Script() => new(new SourceText("made", ""), [PickedBasis(), .. Many(1, 8, TopStatement)], []);
 
     /// <summary>The script must name b somewhere, or b as a basis would be a slip.</summary>
-    private static RoundStatement PickedBasis() =>
-        new(default, new Quoted(default, "bases"), [new PickStatement(default, new PartyList(default, [new CollectiveParty(default, false)]), new Name(default, "b"), [new BasisExpression(default, BasisKind.Level, null, null)])]);
+    private static RoundStatement PickedBasis()
+    {
+        PartyList all = new(default, [new CollectiveParty(default, false)]);
+        PickStatement pick = new(default, all, new Name(default, "b"), [new BasisExpression(default, BasisKind.Level, null, null)]);
+        return new RoundStatement(default, new Quoted(default, "bases"), [pick]);
+    }
 
     private Statement TopStatement() => random.Next(20) switch
     {
