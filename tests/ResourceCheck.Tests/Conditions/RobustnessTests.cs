@@ -35,13 +35,16 @@ public sealed class RobustnessTests
     public void Random_paths_never_throw(string? path, string? value) => Handle("{}", [KeyValuePair.Create(path ?? "", value ?? "")]);
 
     [Property(MaxTest = 1000)]
+    public Property Files_made_from_the_table_never_throw() => Prop.ForAll(RandomConditions.File.ToArbitrary(), file => Handle(file.ToString(), []));
+
+    [Property(MaxTest = 1000)]
     public Property Damaged_files_never_throw() => Prop.ForAll(
         Tree(4).Zip(Gen.Choose(0, 400)).Zip(Gen.Elements('"', '{', '}', '[', ',', ':', '/', '\n', 'µ', '0')).ToArbitrary(),
         t => Handle(t.Item1.Item1.Insert(Math.Min(t.Item1.Item2, t.Item1.Item1.Length), t.Item2.ToString()), []));
 
     private static void Handle(string text, IReadOnlyList<KeyValuePair<string, string>> overrides)
     {
-        Outcome<ConditionsDocument> read = ConditionsFile.Read("x.conditions.json", text, overrides);
+        Outcome<ConditionsDocument> read = ConditionsFile.Read(Path.Combine(ConditionsCase.Folder, "x.conditions.json"), text, overrides);
         Assert.Equal(read.Value is null, read.Findings.Any(f => f.Severity == Severity.Error));
         Assert.All(read.Findings, f => Assert.EndsWith($"({f.Code})", f.ToString(), StringComparison.Ordinal));
         if (read.Value is null)
