@@ -5,11 +5,12 @@ A run is a script with its conditions file in tests/reference/cases or protocols
 import numpy as np
 
 import dense
+import library
 import outcomes
 from pairs import bell
+from schedule import US, at_checkpoint, clicked, decibels, every_pair
 from tables import Table
 
-US = 1e-6
 RUN_LEGEND = """\
 # columns:   name,N,kind,parameters,value
 #   name: the script, NAME.protocol beside NAME.conditions.json, from the root of the project
@@ -22,16 +23,11 @@ def build():
     waits(table)
     held(table)
     interface(table)
+    library.removal(table)
+    library.sharing(table)
+    library.intercepted(table)
+    library.pair(table)
     return table
-
-
-def decibels(x):
-    return 10 ** (-x / 10)
-
-
-def every_pair(d, rate):
-    """Pure dephasing at one rate for every pair of levels."""
-    return rate * (np.ones((d, d)) - np.eye(d))
 
 
 def waits(table):
@@ -70,18 +66,6 @@ def waits(table):
     table.add(name, 3, "yield", {}, heralded * seen)
     table.add(name, 3, "success", {}, sum(p for k, p in kept.items() if k[0] != k[1]))
     table.add(name, 3, "report", {"label": "Ada reads 0"}, sum(p for k, p in kept.items() if k[0] == 0))
-
-
-def at_checkpoint(table, name, n, label, looked, heralded=1.0):
-    table.add(name, n, "checkpoint", {"label": label}, looked.fidelity() / looked.weight)
-    table.add(name, n, "kept", {"label": label}, heralded * looked.weight)
-
-
-def clicked(table):
-    """(probability that everybody saw something, distribution of those copies)"""
-    kept = {k: p for k, p in table.items() if None not in k}
-    seen = sum(kept.values())
-    return seen, {k: p / seen for k, p in kept.items()}
 
 
 def held(table):
