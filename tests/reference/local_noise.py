@@ -25,6 +25,8 @@ def build():
         combined(table, n)
     transmission(table)
     thermal(table)
+    kraus(table)
+    leakage(table)
     return table
 
 
@@ -154,3 +156,20 @@ def thermal(table):
     for n, jumps in ((2, ("0>1:0.3", "1>0:0.12")), (3, ("0>2:0.3", "2>0:0.12")), (4, ("1>3:0.3", "3>1:0.12"))):
         fidelity_row(table, "thermal-exchange", n, {"jumps": jumps})
         distinct_row(table, "thermal-exchange", n, {"jumps": jumps}, "level")
+
+
+def kraus(table):
+    """shift:p is sqrt(1-p) 1 and sqrt(p) X with X|l> = |l+1 mod d>; damping:g empties level 0 into level 1 with probability g."""
+    for n in (2, 3, 4):
+        fidelity_row(table, "kraus-shift", n, {"kraus": [f"shift:{0.05 * (i + 1):.15g}" for i in range(n)]})
+        fidelity_row(table, "kraus-damping", n, {"kraus": [f"damping:{0.1 * (i + 1):.15g}" for i in range(n)]},
+                     closed=closed.fidelity_decay([-np.log(1 - 0.1 * (i + 1)) for i in range(n)]))
+        fidelity_row(table, "kraus-behind-depolarising", n, {"depolarising": 0.05, "kraus": "damping:0.2"})
+
+
+def leakage(table):
+    """Level a leaks into the sink with a probability per level, a lost qudit counting as fidelity 0; nothing is heralded."""
+    for n in (2, 3, 4):
+        parameters = {"leakage": [tuple(0.02 * (a + 1) + 0.01 * i for a in range(n)) for i in range(n)], "depolarising": 0.05}
+        state = noise.noisy(n, parameters, sink=True)
+        table.add("leakage-unheralded", n, "fidelity-unheralded", parameters, state.fidelity())
