@@ -17,11 +17,11 @@ def build():
     for n in (2, 3, 4, 5):
         depolarising(table, n)
         dephasing(table, n)
-        white(table, n)
     for n in (2, 3, 4):
         decay(table, n)
         frames(table, n)
         phase(table, n)
+        white(table, n)
         combined(table, n)
     transmission(table)
     thermal(table)
@@ -52,7 +52,8 @@ def project(state, party, projector):
 def depolarising(table, n):
     printed = {3: "0.757037037037", 4: "0.674845703125"}
     equal = {"depolarising": 0.1}
-    fidelity_row(table, "depolarising-equal", n, equal, printed=printed.get(n), closed=closed.fidelity_depolarising([0.1] * n))
+    if n < 5:
+        fidelity_row(table, "depolarising-equal", n, equal, printed=printed.get(n), closed=closed.fidelity_depolarising([0.1] * n))
     unequal = {"depolarising": UNEQUAL[n]}
     fidelity_row(table, "depolarising-unequal", n, unequal, closed=closed.fidelity_depolarising(UNEQUAL[n]))
     if n < 5:
@@ -73,8 +74,9 @@ def distinct(state, basis, **detection):
 
 
 def dephasing(table, n):
-    fidelity_row(table, "dephasing-equal", n, {"dephasing": 0.1}, printed={4: "0.733204166667"}.get(n),
-                 closed=closed.fidelity_dephasing([0.1] * n))
+    if n < 5:
+        fidelity_row(table, "dephasing-equal", n, {"dephasing": 0.1}, printed={4: "0.733204166667"}.get(n),
+                     closed=closed.fidelity_dephasing([0.1] * n))
     fidelity_row(table, "dephasing-unequal", n, {"dephasing": UNEQUAL[n]}, closed=closed.fidelity_dephasing(UNEQUAL[n]))
 
 
