@@ -39,6 +39,12 @@ internal static class JudgementMessages
         "choose parameters that meet the requirement; figures are shown all the same, its claims do not hold",
         source.PlaceOf(requirement.Span));
 
+    public static Diagnostic MatrixSize(Place at, string file, int size, int levels) => new(
+        "P012", Severity.Error, $"The matrix in {file} is {size}×{size}, but each qudit here has {levels} levels: {levels}×{levels} fits here.", "give a matrix of that size, or change the number of parties", at);
+
+    public static Diagnostic NotUnitary(Place at, string file, double defect) => new(
+        "P013", Severity.Error, $"The matrix in {file} is not unitary: U†U differs from 1 by {FigureText.Number(defect)}, more than 1e-9.", "give every entry with all its digits", at);
+
     public static Diagnostic DoesNotFit(EngineChoice choice, double limit) => new(
         "E001",
         Severity.Error,

@@ -38,8 +38,8 @@ internal static class LocalNoise
             yield return Transmission(basis, [.. leakage.Select(p => 1 - p)]);
         if (noise.Rotation is { } rotation)
             yield return basis.FromUnitary(rotation);
-        if (noise.PhaseNoise > 0)
-            yield return Coherences(basis, (a, b) => Math.Exp(-noise.PhaseNoise * noise.PhaseNoise * (a - b) * (a - b) / 2));
+        if (noise.PhaseFactors is { } factors)
+            yield return Coherences(basis, (a, b) => factors[a, b]);
         if (noise.Dephasing > 0)
             yield return Coherences(basis, (_, _) => 1 - noise.Dephasing);
         if (noise.Depolarising > 0)

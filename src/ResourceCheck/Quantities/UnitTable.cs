@@ -67,6 +67,9 @@ internal static class UnitTable
     public static IEnumerable<string> ShownSymbolsOf(Dimension dimension) =>
         SymbolsOf(dimension).Where(s => s.All(char.IsAscii) && !s.StartsWith("1/", StringComparison.Ordinal));
 
+    /// <summary>Symbol of the unit in which values of a dimension are held; empty for plain numbers.</summary>
+    public static string BaseSymbolOf(Dimension dimension) => Units.FirstOrDefault(u => u.Dimension == dimension && u.PowerOfTen == 0)?.Symbol ?? "";
+
     /// <summary>The dimension in words, with its article.</summary>
     public static string NameOf(Dimension dimension) => dimension switch
     {

@@ -19,5 +19,6 @@ public static class Script
     public static IReadOnlyList<ParameterInfo> ParametersOf(ScriptTree tree) => ParameterReader.Read(tree);
 
     /// <summary>Checks a script at given parameter values (absent ones take their default) and resolves its names.</summary>
-    public static Outcome<Protocol> Bind(ScriptTree tree, IReadOnlyDictionary<string, Rational> parameters) => throw new NotSupportedException();
+    public static Outcome<Protocol> Bind(ScriptTree tree, IReadOnlyDictionary<string, Rational> parameters) =>
+        ProtocolBinder.Bind(tree, parameters);
 }

@@ -50,13 +50,13 @@ internal static class PartyNoise
     };
 
     private static bool HasFlightNoise(FlightModel f) =>
-        f.Rotation is not null || f.PhaseNoise > 0 || f.Dephasing > 0 || f.Depolarising > 0 || f.Kraus is not null || f.LeakageProbability.Any(p => p > 0);
+        f.Rotation is not null || f.PhaseFactors is not null || f.Dephasing > 0 || f.Depolarising > 0 || f.Kraus is not null || f.LeakageProbability.Any(p => p > 0);
 
     private static SiteNoise FlightNoise(FlightModel flight) => new()
     {
         LeakageProbability = flight.LeakageProbability,
         Rotation = flight.Rotation,
-        PhaseNoise = flight.PhaseNoise,
+        PhaseFactors = flight.PhaseFactors,
         Dephasing = flight.Dephasing,
         Depolarising = flight.Depolarising,
         Kraus = flight.Kraus,

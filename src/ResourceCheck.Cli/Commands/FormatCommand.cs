@@ -1,0 +1,49 @@
+using ResourceCheck.Cli.Files;
+using ResourceCheck.Cli.Usage;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement;
+using ResourceCheck.Scripts;
+using ResourceCheck.Scripts.Syntax;
+
+namespace ResourceCheck.Cli.Commands;
+
+/// <summary><c>format</c>: a script with mistakes is left alone.</summary>
+internal static class FormatCommand
+{
+    private const string NothingFormatted = "nothing was formatted";
+
+    /// <summary>Executes it.</summary>
+    public static Task<int> Execute(Invocation use, Options o, CancellationToken token)
+    {
+        string? name = use.Only("a script");
+        use.Exclude(o.Check, o.Write);
+        string? target = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
+        if (target is not null && OutputFile.Check(target) is { } finding)
+            use.Findings.Add(finding);
+        InputText? script = use.Read(name);
+        return Task.FromResult(script is null || use.Findings.Count > 0 ? Work.Refuse(use, NothingFormatted) : Format(use, o, name!, script, target));
+    }
+
+    private static int Format(Invocation use, Options o, string name, InputText script, string? target)
+    {
+        (ScriptTree tree, IReadOnlyList<Diagnostic> findings) = use.Session.Library.Parse(new SourceText(script.Name, script.Text));
+        if (findings.Any(f => f.Severity == Severity.Error))
+            return use.Session.Terminal.Fail(findings, ExitCodes.WrongInput, NothingFormatted);
+        if (!use.Has(o.Quiet))
+            use.Session.Terminal.Show(findings);
+        string formatted = use.Session.Library.Print(tree);
+        bool same = formatted == script.Text;
+        if (use.Has(o.Check))
+            return Tell(use, same, $"{script.Name} is not in its one shape; resourcecheck format --write {script.Name} brings it there.");
+        if (use.Has(o.Write) && name != InputFiles.StandardInput)
+            return same ? ExitCodes.Done : Work.Deliver(use, name, formatted, ExitCodes.Done);
+        return Work.Deliver(use, target, formatted, ExitCodes.Done);
+    }
+
+    private static int Tell(Invocation use, bool same, string text)
+    {
+        if (!same && !string.IsNullOrEmpty(text))
+            use.Session.Terminal.Note(text);
+        return same ? ExitCodes.Done : ExitCodes.NotMet;
+    }
+}
