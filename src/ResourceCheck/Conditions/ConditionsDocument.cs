@@ -1,3 +1,9 @@
+using System.Numerics;
+using ResourceCheck.Conditions.Json;
+using ResourceCheck.Conditions.Keys;
+using ResourceCheck.Quantities;
+using ResourceCheck.Scripts;
+
 namespace ResourceCheck.Conditions;
 
 /// <summary>A read conditions file: well formed, quantities in SI units, not yet tied to a protocol.</summary>
@@ -14,7 +20,22 @@ public sealed record ConditionsDocument
 
     /// <summary>Quantities that carry a standard uncertainty: path, value and uncertainty in SI units.</summary>
     public required IReadOnlyList<UncertainQuantity> Uncertainties { get; init; }
+
+    /// <summary>Every number in the file, in the order written, with the path by which <c>--set</c> changes it.</summary>
+    public IReadOnlyList<NumericPath> Numbers => [.. SettingWalk.NumbersOf(Root).Select(n => new NumericPath(n.Path, n.Value, UnitTable.BaseSymbolOf(n.Dimension)))];
+
+    /// <summary>The checked tree.</summary>
+    internal GroupSetting Root { get; init; } = new(new Spot(new SourceText("", ""), new Span(0, 0), true), "", KeyTable.Root, []);
+
+    /// <summary>Matrices read from files, by the path of the setting that names them.</summary>
+    internal IReadOnlyDictionary<string, IReadOnlyList<Complex[,]>> Matrices { get; init; } = new Dictionary<string, IReadOnlyList<Complex[,]>>();
 }
+
+/// <summary>A number of a conditions file.</summary>
+/// <param name="Path">Its path, such as <c>flight.default.length</c>.</param>
+/// <param name="Value">Its value, in <paramref name="Unit"/>.</param>
+/// <param name="Unit">Base unit, such as <c>s</c>; empty for a plain number.</param>
+public sealed record NumericPath(string Path, double Value, string Unit);
 
 /// <summary>A quantity given with its standard uncertainty.</summary>
 /// <param name="Path">Path in the conditions file, such as <c>levels.decay[0].lifetime</c>.</param>

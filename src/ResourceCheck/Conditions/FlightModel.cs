@@ -24,6 +24,12 @@ public sealed record FlightModel
     /// <summary>Root-mean-square phase per level step, rad: element (a,b) falls by exp(-σ²(a-b)²/2).</summary>
     public double PhaseNoise { get; init; }
 
+    /// <summary>
+    /// d×d: the factor of each element by phase noise. Set whenever <see cref="PhaseNoise"/> is not 0, because a and b in its formula
+    /// are physical levels, which may play other values of the script; null means that no element changes.
+    /// </summary>
+    public double[,]? PhaseFactors { get; init; }
+
     /// <summary>Off-diagonal elements are multiplied by 1 minus this.</summary>
     public double Dephasing { get; init; }
 

@@ -9,6 +9,12 @@ public sealed record ResourceModel(StatePreparation Preparation, double White)
 {
     /// <summary>The antisymmetric state itself.</summary>
     public static ResourceModel Ideal { get; } = new(new IdealPreparation(), 0);
+
+    /// <summary>
+    /// Element v is the physical level that plays value v of the script; null when every level plays itself. States from files and
+    /// from exchange pulses come in physical levels and are to be reordered by it; a <see cref="World"/>'s noise already is.
+    /// </summary>
+    public IReadOnlyList<int>? PhysicalLevels { get; init; }
 }
 
 /// <summary>Where the shared state comes from.</summary>

@@ -33,7 +33,13 @@ internal static class ExchangePrepared
     private static bool Fits(ExchangeStep step, int m) =>
         double.IsFinite(step.TimeError) && double.IsFinite(step.PhaseError)
         && step.Couplings.GetLength(0) == m && step.Couplings.GetLength(1) == m
-        && step.Couplings.Cast<double>().All(double.IsFinite);
+        && step.Couplings.Cast<double>().All(double.IsFinite) && IsSymmetric(step.Couplings);
+
+    private static bool IsSymmetric(double[,] j)
+    {
+        int m = j.GetLength(0);
+        return Enumerable.Range(0, m * m).All(at => j[at / m, at % m] == j[at % m, at / m]);
+    }
 
     private static Complex[] Build(ExchangePreparation exchange)
     {

@@ -11,14 +11,18 @@ internal static class AntisymmetricState
     public const int MostParties = 8;
 
     /// <summary>Its N^N amplitudes; the first qudit is the most significant digit.</summary>
-    public static Complex[] Ket(int n)
+    public static Complex[] Ket(int n) => Ket(n, n);
+
+    /// <summary>The same state in the lowest N of d levels: d^N amplitudes.</summary>
+    public static Complex[] Ket(int n, int d)
     {
         ArgumentOutOfRangeException.ThrowIfLessThan(n, 1);
         ArgumentOutOfRangeException.ThrowIfGreaterThan(n, MostParties);
+        ArgumentOutOfRangeException.ThrowIfLessThan(d, n);
         double amplitude = 1 / Math.Sqrt(Factorial(n));
-        Complex[] ket = new Complex[Power(n, n)];
+        Complex[] ket = new Complex[Power(d, n)];
         foreach ((int[] levels, int sign) in Permutations.Of(n))
-            ket[Permutations.IndexOf(levels, n)] = sign * amplitude;
+            ket[Permutations.IndexOf(levels, d)] = sign * amplitude;
         return ket;
     }
 
