@@ -21,10 +21,18 @@ public sealed partial class UsageTests : IDisposable
     {
         Said said = await _tool.Say([.. line.Split(' ', StringSplitOptions.RemoveEmptyEntries).Select(Real)]);
         Assert.Equal((2, ""), (said.Code, said.Output));
-        string told = said.Error.Replace(_tool.Folder + "/", "", StringComparison.Ordinal);
+        string told = said.Error.Replace(_tool.Folder, "FOLDER", StringComparison.Ordinal);
         Golden.CompareEntry("tests/ResourceCheck.Tests/Cli/wrong-command-lines.txt", line, told);
         foreach (Match code in CodePattern().Matches(told))
             Assert.Contains(Catalogue.All, e => e.Code == code.Groups[1].Value);
+    }
+
+    [Fact]
+    public async Task Without_a_command_the_commands_are_named()
+    {
+        Said said = await _tool.Say();
+        Assert.Equal((2, ""), (said.Code, said.Output));
+        Assert.StartsWith("A command is missing: run, verify,", said.Error, StringComparison.Ordinal);
     }
 
     [Fact]
