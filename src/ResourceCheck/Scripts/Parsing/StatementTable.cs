@@ -46,7 +46,7 @@ internal static class StatementTable
         new("round", Turns, BlockHeaderParser.Round, Places.Round),
         new("discussion", Turns, BlockHeaderParser.Discussion, Places.Discussion),
         new("when", Places.Round | Places.Discussion | Places.Replacement, BlockHeaderParser.When, Places.Anywhere),
-        new("keep", Quantum, FigureParser.Keep),
+        new("keep", Quantum | Turns, FigureParser.Keep),
         new("checkpoint", Turns | Places.Round, FigureParser.Checkpoint),
         new("success", Top, FigureParser.Success),
         new("report", Turns, FigureParser.Report),
