@@ -1,5 +1,6 @@
 """Two parties: CHSH value, Werner mixtures, key fraction, and the pair that removal leaves."""
 
+from functools import partial
 from math import sqrt
 
 import numpy as np
@@ -31,7 +32,8 @@ def bell(rho, levels):
 
     An observable is a . sigma on levels 0 and 1 and one elsewhere. With T, r, s, w the correlations of sigma (x) sigma,
     sigma (x) rest, rest (x) sigma, rest (x) rest, the value is a.(T(b+b') + 2r) + a'.T(b-b') + 2 s.b + 2w, and the
-    best a, a' are along their factors; b and b' are searched.
+    best a, a' are along their factors; b and b' are searched. The inequality bounds the absolute value, so the largest
+    negative sum is searched as well: an outcome counted as +1 favours one of the two signs.
     """
     rest = np.diag([0.0] * 2 + [1.0] * (levels - 2))
     sigma = [pad(m, levels) for m in PAULI]
@@ -42,12 +44,12 @@ def bell(rho, levels):
     t = np.array([[mean(x, y) for y in sigma] for x in sigma])
     r, s, w = np.array([mean(x, rest) for x in sigma]), np.array([mean(rest, y) for y in sigma]), mean(rest, rest)
 
-    def value(angles):
+    def value(angles, sign):
         b, c = direction(angles[:2]), direction(angles[2:])
-        return np.linalg.norm(t @ (b + c) + 2 * r) + np.linalg.norm(t @ (b - c)) + 2 * s @ b + 2 * w
+        return np.linalg.norm(t @ (b + c) + 2 * r) + np.linalg.norm(t @ (b - c)) + sign * (2 * s @ b + 2 * w)
 
     starts = np.random.RandomState(5).uniform(0, np.pi, (24, 4))
-    return max(value(polished(value, start)) for start in starts)
+    return max(value(polished(partial(value, sign=sign), start), sign) for start in starts for sign in (1, -1))
 
 
 def polished(value, start):

@@ -15,7 +15,7 @@ public sealed class StarterTests
     [Fact]
     public void The_starting_script_has_no_mistakes_and_is_in_its_one_shape()
     {
-        (Scripts.Syntax.ScriptTree tree, IReadOnlyList<Diagnostic> findings) = Script.Parse(Source);
+        (ResourceCheck.Scripts.Syntax.ScriptTree tree, IReadOnlyList<Diagnostic> findings) = Script.Parse(Source);
         Assert.Empty(findings);
         Assert.Equal(Starter.Script, Script.Print(tree));
     }
