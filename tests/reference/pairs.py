@@ -16,7 +16,7 @@ PAULI = [np.array(m, complex) for m in ([[0, 1], [1, 0]], [[0, -1j], [1j, 0]], [
 
 
 def build():
-    table = Table("pairs", "CHSH value (bell), pair fidelity, outcome errors and asymptotic key fraction of pairs",
+    table = Table("pairs", "Largest |CHSH| (bell), pair fidelity, outcome errors and asymptotic key fraction of pairs",
                   "computed by dense density matrices; CHSH for Werner mixtures 2 sqrt(2) v, Phys. Rev. A 40, 4277 (1989); "
                   "key fraction 1-h(Q_level)-h(Q_fourier), zero at equal rates of 11.0 %, Phys. Rev. Lett. 85, 441 (2000)")
     werner(table)
@@ -28,12 +28,11 @@ def build():
 
 
 def bell(rho, levels):
-    """Largest CHSH value of two qudits over projective settings on levels 0 and 1, any other outcome counted as +1.
+    """Largest |CHSH| of two qudits over projective settings on levels 0 and 1, any other outcome counted as +1.
 
     An observable is a . sigma on levels 0 and 1 and one elsewhere. With T, r, s, w the correlations of sigma (x) sigma,
     sigma (x) rest, rest (x) sigma, rest (x) rest, the value is a.(T(b+b') + 2r) + a'.T(b-b') + 2 s.b + 2w, and the
-    best a, a' are along their factors; b and b' are searched. The inequality bounds the absolute value, so the largest
-    negative sum is searched as well: an outcome counted as +1 favours one of the two signs.
+    best a, a' are along their factors; b and b' are searched. The other sign of all four correlations counts as well.
     """
     rest = np.diag([0.0] * 2 + [1.0] * (levels - 2))
     sigma = [pad(m, levels) for m in PAULI]
@@ -44,19 +43,18 @@ def bell(rho, levels):
     t = np.array([[mean(x, y) for y in sigma] for x in sigma])
     r, s, w = np.array([mean(x, rest) for x in sigma]), np.array([mean(rest, y) for y in sigma]), mean(rest, rest)
 
-    def value(angles, sign):
+    return max(largest(t, r, s, w), largest(-t, -r, -s, -w))
+
+
+def largest(t, r, s, w):
+    def value(angles):
         b, c = direction(angles[:2]), direction(angles[2:])
         return np.linalg.norm(t @ (b + c) + 2 * r) + np.linalg.norm(t @ (b - c)) + sign * (2 * s @ b + 2 * w)
 
     starts = np.random.RandomState(5).uniform(0, np.pi, (24, 4))
-    return max(value(polished(partial(value, sign=sign), start), sign) for start in starts for sign in (1, -1))
-
-
-def polished(value, start):
-    """A local maximum; the second search starts at the first one's end, so that its error is of second order in 1e-9."""
+    rough = max((minimize(lambda x: -value(x), start, method="BFGS").x for start in starts), key=value)
     options = {"xatol": 1e-10, "fatol": 1e-15, "maxiter": 4000, "maxfev": 4000}
-    first = minimize(lambda x: -value(x), start, method="BFGS").x
-    return minimize(lambda x: -value(x), first, method="Nelder-Mead", options=options).x
+    return value(minimize(lambda x: -value(x), rough, method="Nelder-Mead", options=options).x)
 
 
 def direction(angles):
