@@ -1,5 +1,6 @@
 """Two parties: CHSH value, Werner mixtures, key fraction, and the pair that removal leaves."""
 
+from functools import partial
 from math import sqrt
 
 import numpy as np
@@ -15,7 +16,7 @@ PAULI = [np.array(m, complex) for m in ([[0, 1], [1, 0]], [[0, -1j], [1j, 0]], [
 
 
 def build():
-    table = Table("pairs", "CHSH value (bell), pair fidelity, outcome errors and asymptotic key fraction of pairs",
+    table = Table("pairs", "Largest |CHSH| (bell), pair fidelity, outcome errors and asymptotic key fraction of pairs",
                   "computed by dense density matrices; CHSH for Werner mixtures 2 sqrt(2) v, Phys. Rev. A 40, 4277 (1989); "
                   "key fraction 1-h(Q_level)-h(Q_fourier), zero at equal rates of 11.0 %, Phys. Rev. Lett. 85, 441 (2000)")
     werner(table)
@@ -27,11 +28,11 @@ def build():
 
 
 def bell(rho, levels):
-    """Largest CHSH value of two qudits over projective settings on levels 0 and 1, any other outcome counted as +1.
+    """Largest |CHSH| of two qudits over projective settings on levels 0 and 1, any other outcome counted as +1.
 
     An observable is a . sigma on levels 0 and 1 and one elsewhere. With T, r, s, w the correlations of sigma (x) sigma,
     sigma (x) rest, rest (x) sigma, rest (x) rest, the value is a.(T(b+b') + 2r) + a'.T(b-b') + 2 s.b + 2w, and the
-    best a, a' are along their factors; b and b' are searched.
+    best a, a' are along their factors; b and b' are searched. The other sign of all four correlations counts as well.
     """
     rest = np.diag([0.0] * 2 + [1.0] * (levels - 2))
     sigma = [pad(m, levels) for m in PAULI]
@@ -42,19 +43,18 @@ def bell(rho, levels):
     t = np.array([[mean(x, y) for y in sigma] for x in sigma])
     r, s, w = np.array([mean(x, rest) for x in sigma]), np.array([mean(rest, y) for y in sigma]), mean(rest, rest)
 
+    return max(largest(t, r, s, w), largest(-t, -r, -s, -w))
+
+
+def largest(t, r, s, w):
     def value(angles):
         b, c = direction(angles[:2]), direction(angles[2:])
-        return np.linalg.norm(t @ (b + c) + 2 * r) + np.linalg.norm(t @ (b - c)) + 2 * s @ b + 2 * w
+        return np.linalg.norm(t @ (b + c) + 2 * r) + np.linalg.norm(t @ (b - c)) + sign * (2 * s @ b + 2 * w)
 
     starts = np.random.RandomState(5).uniform(0, np.pi, (24, 4))
-    return max(value(polished(value, start)) for start in starts)
-
-
-def polished(value, start):
-    """A local maximum; the second search starts at the first one's end, so that its error is of second order in 1e-9."""
+    rough = max((minimize(lambda x: -value(x), start, method="BFGS").x for start in starts), key=value)
     options = {"xatol": 1e-10, "fatol": 1e-15, "maxiter": 4000, "maxfev": 4000}
-    first = minimize(lambda x: -value(x), start, method="BFGS").x
-    return minimize(lambda x: -value(x), first, method="Nelder-Mead", options=options).x
+    return value(minimize(lambda x: -value(x), rough, method="Nelder-Mead", options=options).x)
 
 
 def direction(angles):
@@ -79,9 +79,10 @@ def werner(table):
 
 
 def error(state, basis):
-    """Of the copies in which both saw a level, the fraction in which both saw the same: a singlet never does."""
+    """Of the copies in which both saw 0 or 1, the fraction in which both saw the same: a singlet never does."""
     seen = dense.outcome_table(state, dict.fromkeys(state.parties, basis))
-    return sum(p for k, p in seen.items() if k[0] == k[1]) / sum(seen.values())
+    fit = {k: p for k, p in seen.items() if max(k) < 2}
+    return sum(p for k, p in fit.items() if k[0] == k[1]) / sum(fit.values())
 
 
 def key_fraction(state, bases):
@@ -112,7 +113,8 @@ def locally_damaged(table):
 
 
 def pair_from_many(table, n):
-    """All but two leave in the Fourier basis of the levels still used; the two measure a common basis of levels 0 and 1."""
+    """All but two leave in the Fourier basis of the m levels still used, copies with an outcome of m or more are dropped;
+    the two measure one basis of levels 0 and 1 and keep the copies in which both saw 0 or 1."""
     cases = {
         "ideal": {}, "depolarising": {"depolarising": 0.05}, "decay": {"jumps": noise.equal_decay(n, 0.2)},
         "mixed": {"white": 0.02, "jumps": noise.equal_decay(n, 0.1), "dephasing": 0.02, "depolarising": [0.01 * (i + 1) for i in range(n)]},
@@ -120,6 +122,8 @@ def pair_from_many(table, n):
     for name, parameters in cases.items():
         state = pair_of(noise.noisy(n, parameters))
         ideal = name == "ideal"
+        table.add(f"many-{name}", n, "leakless", parameters, state.weight, closed=1.0 if ideal else None)
+        state = state.scaled(1 / state.weight)
         table.add(f"many-{name}", n, "pair", parameters, state.fidelity(), closed=1.0 if ideal else None)
         table.add(f"many-{name}", n, "bell", parameters, bell(state.rho, n), closed=2 * sqrt(2) if ideal else None)
         for basis in ("level", "fourier-on-2"):
@@ -130,5 +134,5 @@ def pair_from_many(table, n):
 
 def pair_of(state):
     for m in range(len(state.parties), 2, -1):
-        state = dense.total([rest for _, rest in leave(state, m - 1, f"fourier-on-{m}", m)])
+        state = dense.total([rest for k, rest in leave(state, m - 1, f"fourier-on-{m}", m) if k < m])
     return state

@@ -53,7 +53,7 @@ public sealed class ReferenceTableTests
         Evaluation evaluation = TestScripts.Evaluate(protocol, world);
         return row.Kind switch
         {
-            "yield" or "seen" or "probability" => evaluation.Yield,
+            "yield" or "seen" or "probability" or "leakless" => evaluation.Yield,
             "leak-probability" => 1 - evaluation.Yield,
             _ when protocol.Reports.Count > 0 => evaluation.Reports[0].Value,
             _ => evaluation.Checkpoints.Single(c => c.Label == TableScript.Figure).Fidelity.Value,

@@ -10,15 +10,17 @@ internal static class TableScript
     /// <summary>Script text; the figure is the report or checkpoint "figure", or the yield.</summary>
     public static string Of(TableRow row) => Head(row) + row.Kind switch
     {
-        "fidelity" => Checkpoint("all"),
+        "fidelity" or "fidelity-unheralded" => Checkpoint("all"),
+        "yield" when row.Table == "local-noise" => Checkpoint("all"),
+        "leakless" => Chain(row.N, keep: true),
         "prepared-fidelity" => Checkpoint("all"),
         "removal" => Removal(row) + Checkpoint($"P[1..{row.N - 1}]"),
         "probability" => Removal(row),
-        "pair" => Chain(row.N, keep: false) + Checkpoint("P[1], P[2]"),
+        "pair" => Chain(row.N, keep: row.Table == "pairs") + Checkpoint("P[1], P[2]"),
         "leak-probability" or "pair-without-leaks" => Chain(row.N, keep: true) + Checkpoint("P[1], P[2]"),
-        "bell" => (row.N > 2 ? Chain(row.N, keep: false) : "") + "checkpoint \"end\": fidelity with antisymmetric on P[1], P[2]\n" + Report("bellvalue(P[1], P[2])"),
-        "same-value" => Chain(row.N, keep: false) + Pair(row.Name.EndsWith("level", StringComparison.Ordinal) ? "level" : "fourier on 2") + Report("probability(same(v of P[1], P[2]))"),
-        "key-fraction" => (row.N > 2 ? Chain(row.N, keep: false) : "") + KeyFraction,
+        "bell" => (row.N > 2 ? Chain(row.N, keep: true) : "") + "checkpoint \"end\": fidelity with antisymmetric on P[1], P[2]\n" + Report("bellvalue(P[1], P[2])"),
+        "same-value" => Chain(row.N, keep: true) + Pair(row.Name.EndsWith("level", StringComparison.Ordinal) ? "level" : "fourier on 2") + Report("probability(same(v of P[1], P[2]))"),
+        "key-fraction" => (row.N > 2 ? Chain(row.N, keep: true) : "") + KeyFraction,
         "symbol-error" when row.Parameters.ContainsKey("victim") => Sharing(row) + Report(SymbolError(row.N)),
         "symbol-error" => Sharing(row) + Report(SymbolError(row.N)),
         "yield" => Sharing(row),
@@ -50,15 +52,16 @@ internal static class TableScript
     private static string Chain(int n, bool keep) =>
         $"for m from {n} down to 3\nround \"leave\"\nP[m] measures fourier on m as k\nP[m] announces k\nP[1..m-1] apply complement(fourier on m, k)\nend\n{(keep ? "keep when k < m\n" : "")}end\n";
 
-    private static string Pair(string basis) => $"round \"use\"\nP[1], P[2] measure {basis} as v\nend\n";
+    private static string Pair(string basis) => $"round \"use\"\nP[1], P[2] measure {basis} as v\nP[1], P[2] set fits to v < 2\nP[1], P[2] announce fits\nend\nkeep when P[1].fits and P[2].fits\n";
 
     private const string KeyFraction = """
         round "use"
         P[1], P[2] pick b from level, fourier on 2
         P[1], P[2] measure b as v
-        P[1], P[2] announce b
+        P[1], P[2] set fits to v < 2
+        P[1], P[2] announce b, fits
         end
-        keep when same(b of P[1], P[2])
+        keep when same(b of P[1], P[2]) and P[1].fits and P[2].fits
         report "figure" = 1 - entropy(probability(P[1].v = P[2].v given P[1].b = level)) - entropy(probability(P[1].v = P[2].v given P[1].b = fourier on 2))
 
         """;

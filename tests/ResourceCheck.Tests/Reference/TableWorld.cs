@@ -29,6 +29,9 @@ internal static class TableWorld
         PhaseFactors = Engines.RandomWorld.PhaseFactors(row.Number("phaseNoise", party), row.N),
         Dephasing = row.Number("dephasing", party),
         Depolarising = row.Number("depolarising", party),
+        LeakageProbability = row.Of("leakage", party) is { } l ? [.. l.Split(',').Select(TableRow.Number)] : new double[row.N],
+        Kraus = Kraus(row.Of("kraus", party), row.N),
+        Heralded = row.Table == "local-noise" && row.Kind != "fidelity-unheralded",
         Transmission = row.Of("transmission", party) is { } t ? [.. t.Split(',').Select(TableRow.Number)] : [.. Enumerable.Repeat(1.0, row.N)],
     };
 
@@ -47,6 +50,19 @@ internal static class TableWorld
     }
 
     private static string[] Entries(string? text) => text?.Split(',') ?? [];
+
+    /// <summary><c>shift:p</c> shifts by one level with probability p; <c>damping:g</c> takes level 0 to level 1 with probability g.</summary>
+    private static Complex[][,]? Kraus(string? text, int d)
+    {
+        if (text is null)
+            return null;
+        double p = TableRow.Number(text[(text.IndexOf(':') + 1)..]);
+        if (text.StartsWith("shift", StringComparison.Ordinal))
+            return [Scaled(MatrixMath.Identity(d), Math.Sqrt(1 - p)), Scaled(LocalUnitaries.Shift(d, 1), Math.Sqrt(p))];
+        (Complex[,] kept, Complex[,] jump) = (MatrixMath.Identity(d), new Complex[d, d]);
+        (kept[0, 0], jump[1, 0]) = (Math.Sqrt(1 - p), Math.Sqrt(p));
+        return [kept, jump];
+    }
 
     /// <summary>exp(-iθ diag(0 … d-1)) for <c>clock:θ</c>, the real rotation of two levels for <c>i-k:θ</c>.</summary>
     private static Complex[,]? Rotation(string? text, int d)
