@@ -12,6 +12,9 @@ internal sealed class LiouvilleSector : IGenerator
     /// <summary>Entries from which rows are shared between cores.</summary>
     private const int ParallelFrom = 4000;
 
+    /// <summary>Enough that cores finish together, few enough that taking one costs nothing.</summary>
+    private const int Chunks = 64;
+
     private readonly double _totalRate;
     private readonly (PairLinks Links, int Row)[] _rows;
 
@@ -42,16 +45,13 @@ internal sealed class LiouvilleSector : IGenerator
     public double Step(Complex[] source, Complex[] target, double scale, Complex[] sum)
     {
         double[] squares = new double[_rows.Length];
-        if (Size < ParallelFrom)
+        int chunks = Size < ParallelFrom ? 1 : Math.Min(Chunks, squares.Length);
+        ChunkLoop.Run(chunks, chunk =>
         {
-            for (int i = 0; i < squares.Length; i++)
+            int end = (int)((long)squares.Length * (chunk + 1) / chunks);
+            for (int i = (int)((long)squares.Length * chunk / chunks); i < end; i++)
                 squares[i] = StepRow(i, source, target, scale, sum);
-        }
-        else
-        {
-            Parallel.For(0, squares.Length, i => squares[i] = StepRow(i, source, target, scale, sum));
-        }
-
+        });
         return squares.Sum();
     }
 

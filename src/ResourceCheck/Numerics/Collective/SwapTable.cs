@@ -69,7 +69,7 @@ internal sealed class SwapTable : IGenerator
         }
         else
         {
-            Parallel.For(0, chunks, i => squares[i] = StepChunk(i, source, target, scale, sum));
+            ChunkLoop.Run(chunks, i => squares[i] = StepChunk(i, source, target, scale, sum));
         }
 
         return squares.Sum();
