@@ -16,7 +16,7 @@ internal sealed class BindContext(ScriptTree tree)
     public ScriptTree Tree { get; } = tree;
 
     /// <summary>Findings so far.</summary>
-    public Findings Findings { get; } = new(tree.Source);
+    public BindingFindings Findings { get; } = new(tree.Source);
 
     /// <summary>Where names are made.</summary>
     public MakerIndex Makers { get; } = new(tree);

@@ -10,7 +10,7 @@ internal readonly record struct Message(string Code, string Text, string? Cure =
 
 /// <summary>Gathers the findings of a script, each once although loops and actors repeat a line, and keeps names whose making failed.</summary>
 /// <param name="source">The script's text.</param>
-internal sealed class Findings(SourceText source)
+internal sealed class BindingFindings(SourceText source)
 {
     private readonly HashSet<(string Code, Span Span)> _seen = [];
     private readonly List<(int Offset, Diagnostic Finding)> _found = [];
