@@ -45,6 +45,9 @@ internal sealed class BindContext(ScriptTree tree)
     /// <summary>Uses of values by parties that do not know them, in the current statement.</summary>
     public KnowledgeMisses Misses { get; } = new();
 
+    /// <summary>Values that a keep line used although not everybody knows them; each is told once.</summary>
+    public HashSet<string> ToldNotPublic { get; } = [];
+
     /// <summary>Slots so far.</summary>
     public IReadOnlyList<SlotInfo> Slots => _slots;
 

@@ -12,7 +12,7 @@ internal readonly record struct Message(string Code, string Text, string? Cure =
 /// <param name="source">The script's text.</param>
 internal sealed class BindingFindings(SourceText source)
 {
-    private readonly HashSet<(string Code, Span Span)> _seen = [];
+    private readonly HashSet<(string Code, Span Span, string? Missing)> _seen = [];
     private readonly List<(int Offset, Diagnostic Finding)> _found = [];
     private readonly HashSet<string> _suspects = [];
     private int _muted;
@@ -29,7 +29,8 @@ internal sealed class BindingFindings(SourceText source)
         // What stands in a part that these parameter values switch off may be impossible only because of them.
         if (_muted > 0 && BindingMessages.DependsOnParameters(message.Code))
             return;
-        if (_seen.Add((message.Code, span)))
+        // Several lines may be missing from one script; all of these findings stand at its beginning.
+        if (_seen.Add((message.Code, span, span.Length == 0 ? message.Text : null)))
             _found.Add((span.Start, From(message, source.PlaceOf(span))));
     }
 
