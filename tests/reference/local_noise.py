@@ -17,14 +17,16 @@ def build():
     for n in (2, 3, 4, 5):
         depolarising(table, n)
         dephasing(table, n)
-        white(table, n)
     for n in (2, 3, 4):
         decay(table, n)
         frames(table, n)
         phase(table, n)
+        white(table, n)
         combined(table, n)
     transmission(table)
     thermal(table)
+    kraus(table)
+    leakage(table)
     return table
 
 
@@ -50,7 +52,8 @@ def project(state, party, projector):
 def depolarising(table, n):
     printed = {3: "0.757037037037", 4: "0.674845703125"}
     equal = {"depolarising": 0.1}
-    fidelity_row(table, "depolarising-equal", n, equal, printed=printed.get(n), closed=closed.fidelity_depolarising([0.1] * n))
+    if n < 5:
+        fidelity_row(table, "depolarising-equal", n, equal, printed=printed.get(n), closed=closed.fidelity_depolarising([0.1] * n))
     unequal = {"depolarising": UNEQUAL[n]}
     fidelity_row(table, "depolarising-unequal", n, unequal, closed=closed.fidelity_depolarising(UNEQUAL[n]))
     if n < 5:
@@ -71,8 +74,9 @@ def distinct(state, basis, **detection):
 
 
 def dephasing(table, n):
-    fidelity_row(table, "dephasing-equal", n, {"dephasing": 0.1}, printed={4: "0.733204166667"}.get(n),
-                 closed=closed.fidelity_dephasing([0.1] * n))
+    if n < 5:
+        fidelity_row(table, "dephasing-equal", n, {"dephasing": 0.1}, printed={4: "0.733204166667"}.get(n),
+                     closed=closed.fidelity_dephasing([0.1] * n))
     fidelity_row(table, "dephasing-unequal", n, {"dephasing": UNEQUAL[n]}, closed=closed.fidelity_dephasing(UNEQUAL[n]))
 
 
@@ -154,3 +158,20 @@ def thermal(table):
     for n, jumps in ((2, ("0>1:0.3", "1>0:0.12")), (3, ("0>2:0.3", "2>0:0.12")), (4, ("1>3:0.3", "3>1:0.12"))):
         fidelity_row(table, "thermal-exchange", n, {"jumps": jumps})
         distinct_row(table, "thermal-exchange", n, {"jumps": jumps}, "level")
+
+
+def kraus(table):
+    """shift:p is sqrt(1-p) 1 and sqrt(p) X with X|l> = |l+1 mod d>; damping:g empties level 0 into level 1 with probability g."""
+    for n in (2, 3, 4):
+        fidelity_row(table, "kraus-shift", n, {"kraus": [f"shift:{0.05 * (i + 1):.15g}" for i in range(n)]})
+        fidelity_row(table, "kraus-damping", n, {"kraus": [f"damping:{0.1 * (i + 1):.15g}" for i in range(n)]},
+                     closed=closed.fidelity_decay([-np.log(1 - 0.1 * (i + 1)) for i in range(n)]))
+        fidelity_row(table, "kraus-behind-depolarising", n, {"depolarising": 0.05, "kraus": "damping:0.2"})
+
+
+def leakage(table):
+    """Level a leaks into the sink with a probability per level, a lost qudit counting as fidelity 0; nothing is heralded."""
+    for n in (2, 3, 4):
+        parameters = {"leakage": [tuple(0.02 * (a + 1) + 0.01 * i for a in range(n)) for i in range(n)], "depolarising": 0.05}
+        state = noise.noisy(n, parameters, sink=True)
+        table.add("leakage-unheralded", n, "fidelity-unheralded", parameters, state.fidelity())

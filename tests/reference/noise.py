@@ -32,6 +32,17 @@ def rotation(entry, d):
     return expm(-1j * theta * generator)
 
 
+def kraus(entry, d, levels):
+    """'shift:p' or 'damping:g' as Kraus operators that leave a lost qudit lost."""
+    kind, p = entry.split(":")[0], float(entry.split(":")[1])
+    if kind == "shift":
+        operators = [np.sqrt(1 - p) * np.eye(d), np.sqrt(p) * np.roll(np.eye(d), 1, axis=0)]
+    else:
+        operators = [np.diag([np.sqrt(1 - p)] + [1.0] * (d - 1)), np.sqrt(p) * dense.unit(d, 1, 0)]
+    wide = [np.pad(k, (0, levels - d)) for k in operators]
+    return wide + [dense.unit(levels, s, s) for s in range(d, levels)]
+
+
 def of_party(parameters, i):
     """Every key's value for party i."""
     own = {}
@@ -45,13 +56,15 @@ def channel(own, d, levels):
     jumps = [jumps_of(e) for e in own.get("jumps", ())]
     dephase = dephase_of(own.get("dephase", ()), d)
     total = dense.flow(dense.lindblad(d, levels, jumps, dephase, None, own.get("depolarisingRate", 0.0)), 1.0)
+    if "leakage" in own:
+        total = dense.loss(d, levels, [1 - q for q in own["leakage"]]) @ total
     if "rotation" in own:
         total = dense.kraus_channel([dense.widen(rotation(own["rotation"], d), levels)]) @ total
     total = dense.phase_noise(d, levels, own.get("phaseNoise", 0.0)) @ total
     total = dense.dephasing(d, levels, own.get("dephasing", 0.0)) @ total
     total = dense.depolarising(d, levels, own.get("depolarising", 0.0)) @ total
     if "kraus" in own:
-        total = dense.kraus_channel([dense.widen(k, levels) for k in own["kraus"]]) @ total
+        total = dense.kraus_channel(kraus(own["kraus"], d, levels)) @ total
     if "transmission" in own:
         total = dense.loss(d, levels, own["transmission"]) @ total
     return total

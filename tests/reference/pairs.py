@@ -79,9 +79,10 @@ def werner(table):
 
 
 def error(state, basis):
-    """Of the copies in which both saw a level, the fraction in which both saw the same: a singlet never does."""
+    """Of the copies in which both saw 0 or 1, the fraction in which both saw the same: a singlet never does."""
     seen = dense.outcome_table(state, dict.fromkeys(state.parties, basis))
-    return sum(p for k, p in seen.items() if k[0] == k[1]) / sum(seen.values())
+    fit = {k: p for k, p in seen.items() if max(k) < 2}
+    return sum(p for k, p in fit.items() if k[0] == k[1]) / sum(fit.values())
 
 
 def key_fraction(state, bases):
@@ -112,7 +113,8 @@ def locally_damaged(table):
 
 
 def pair_from_many(table, n):
-    """All but two leave in the Fourier basis of the levels still used; the two measure a common basis of levels 0 and 1."""
+    """All but two leave in the Fourier basis of the m levels still used, copies with an outcome of m or more are dropped;
+    the two measure one basis of levels 0 and 1 and keep the copies in which both saw 0 or 1."""
     cases = {
         "ideal": {}, "depolarising": {"depolarising": 0.05}, "decay": {"jumps": noise.equal_decay(n, 0.2)},
         "mixed": {"white": 0.02, "jumps": noise.equal_decay(n, 0.1), "dephasing": 0.02, "depolarising": [0.01 * (i + 1) for i in range(n)]},
@@ -120,6 +122,8 @@ def pair_from_many(table, n):
     for name, parameters in cases.items():
         state = pair_of(noise.noisy(n, parameters))
         ideal = name == "ideal"
+        table.add(f"many-{name}", n, "leakless", parameters, state.weight, closed=1.0 if ideal else None)
+        state = state.scaled(1 / state.weight)
         table.add(f"many-{name}", n, "pair", parameters, state.fidelity(), closed=1.0 if ideal else None)
         table.add(f"many-{name}", n, "bell", parameters, bell(state.rho, n), closed=2 * sqrt(2) if ideal else None)
         for basis in ("level", "fourier-on-2"):
@@ -130,5 +134,5 @@ def pair_from_many(table, n):
 
 def pair_of(state):
     for m in range(len(state.parties), 2, -1):
-        state = dense.total([rest for _, rest in leave(state, m - 1, f"fourier-on-{m}", m)])
+        state = dense.total([rest for k, rest in leave(state, m - 1, f"fourier-on-{m}", m) if k < m])
     return state

@@ -5,11 +5,14 @@ A run is a script with its conditions file in tests/reference/cases or protocols
 import numpy as np
 
 import dense
+import library
+import noise
 import outcomes
+import preparation
 from pairs import bell
+from schedule import US, at_checkpoint, clicked, decibels, every_pair
 from tables import Table
 
-US = 1e-6
 RUN_LEGEND = """\
 # columns:   name,N,kind,parameters,value
 #   name: the script, NAME.protocol beside NAME.conditions.json, from the root of the project
@@ -22,16 +25,12 @@ def build():
     waits(table)
     held(table)
     interface(table)
+    turned(table)
+    library.removal(table)
+    library.sharing(table)
+    library.intercepted(table)
+    library.pair(table)
     return table
-
-
-def decibels(x):
-    return 10 ** (-x / 10)
-
-
-def every_pair(d, rate):
-    """Pure dephasing at one rate for every pair of levels."""
-    return rate * (np.ones((d, d)) - np.eye(d))
 
 
 def waits(table):
@@ -70,18 +69,6 @@ def waits(table):
     table.add(name, 3, "yield", {}, heralded * seen)
     table.add(name, 3, "success", {}, sum(p for k, p in kept.items() if k[0] != k[1]))
     table.add(name, 3, "report", {"label": "Ada reads 0"}, sum(p for k, p in kept.items() if k[0] == 0))
-
-
-def at_checkpoint(table, name, n, label, looked, heralded=1.0):
-    table.add(name, n, "checkpoint", {"label": label}, looked.fidelity() / looked.weight)
-    table.add(name, n, "kept", {"label": label}, heralded * looked.weight)
-
-
-def clicked(table):
-    """(probability that everybody saw something, distribution of those copies)"""
-    kept = {k: p for k, p in table.items() if None not in k}
-    seen = sum(kept.values())
-    return seen, {k: p / seen for k, p in kept.items()}
 
 
 def held(table):
@@ -173,3 +160,51 @@ def figures(kept):
         "information": outcomes.information(kept, [0], [1, 2]),
         "one zero": probability(lambda a, b, c: (a, b, c).count(0) == 1),
     }
+
+
+def turned(table):
+    """Flights of 10 and nothing else that takes time: no qudit is ever held."""
+    thermal = dense.lindblad(3, 4, [(0, 2, 6000.0), (2, 0, 1500.0)])
+    operators = [np.diag([1, 0.8, 0.6]), 0.6 * dense.unit(3, 0, 1), 0.8j * dense.unit(3, 1, 2)]
+    ket = preparation.step(preparation.step(np.array([1.0]), 2), 3, 0.05, 0.1)
+    state = dense.embed(0.99 * np.outer(ket, ket.conj()) + 0.01 * np.eye(27) / 27, 3, 4, ("Ada", "Ben", "Cyd"))
+    for party in state.parties:
+        state = state.after(party, dense.flow(thermal, 10 * US))
+    state = state.after_unitary("Ada", noise.rotation("0-1:0.2", 3))
+    state = state.after("Ben", dense.loss(3, 4, (1.0, 0.95, 1.0))).after_unitary("Ben", noise.rotation("clock:0.3", 3))
+    state = state.after("Cyd", dense.dephasing(3, 4, 0.04))
+    state = state.after("Cyd", dense.kraus_channel([*map(wide, operators), dense.unit(4, 3, 3)]))
+
+    shift = np.roll(np.eye(3), 1, axis=0)
+    clock = np.diag(np.exp(2j * np.pi * 2 * np.arange(3) / 3))
+    swap = np.eye(3)[[2, 1, 0]]
+    for party, unitary in (("Ada", shift), ("Ada", clock), ("Ben", dense.fourier(3))):
+        state = applied(state, party, unitary)
+    branches = [(k, applied(rest, "Ben", swap if k == 0 else dense.fourier(3).conj().T))
+                for k, rest in dense.measure(state, "Cyd", np.eye(3)) if k is not None]
+
+    name = "tests/reference/cases/turned"
+    at_checkpoint(table, name, 3, "turned", dense.total([rest for _, rest in branches]))
+    triples = {}
+    for k, rest in branches:
+        for v, last in dense.measure(rest, "Ada", dense.phased(3, 1), efficiency=0.9):
+            triples |= {(k, v, w): nothing.weight for w, nothing in dense.measure(last, "Ben", dense.phased(3, 1))}
+    seen, kept = clicked(triples)
+    one = {key: p for key, p in kept.items() if key[0] == 1}
+    table.add(name, 3, "yield", {}, seen)
+    table.add(name, 3, "success", {}, sum(p for (_, v, w), p in kept.items() if v != w))
+    table.add(name, 3, "report", {"label": "sum is 2 when Cyd saw 1"},
+              sum(p for (_, v, w), p in one.items() if (v + w) % 3 == 2) / sum(one.values()))
+    table.add(name, 3, "report", {"label": "distance"}, sum(abs(v - w) * p for (_, v, w), p in kept.items()))
+
+
+def wide(operator):
+    """An operator on three levels that gives nothing on the sink."""
+    matrix = np.zeros((4, 4), complex)
+    matrix[:3, :3] = operator
+    return matrix
+
+
+def applied(state, party, unitary):
+    """A local unitary and its depolarising."""
+    return state.after_unitary(party, unitary).after(party, dense.depolarising(3, 4, 0.01))

@@ -10,7 +10,9 @@ LEGEND = """\
 #   parameters: key=value;key=value. A value with | lists the parties in order, without | it holds for each of them;
 #   entries within one party are separated by commas.
 #   Acting order of noise keys on a qudit: jumps, dephase and depolarisingRate together (rate times a time of 1 s),
-#   then rotation, phaseNoise, dephasing, depolarising, transmission."""
+#   then leakage, rotation, phaseNoise, dephasing, depolarising, kraus, transmission.
+#   jumps a>b:rate; dephase a-b:rate; rotation clock:angle or i-k:angle (i goes to cos i + sin k); kraus shift:p or damping:g;
+#   leakage and transmission: one probability per level."""
 
 
 class Table:

@@ -23,7 +23,7 @@ internal static class CommandTree
         Add("inspect", "SCRIPT", "Compute nothing: show who knows what, the timeline, the engine and its cost, and every mistake.", InspectCommand.Execute, [.. judging, .. writing, .. computing]);
         Add("state", "FILE", "Tell what a prepared state is: validity, fidelity, purity, negativity, populations.", StateCommand.Execute, [o.Mend, .. writing]);
         Add("format", "SCRIPT", "Print a script in its one shape.", FormatCommand.Execute, [o.Check, o.Write, o.Out, o.Quiet]);
-        Add("explain", "[CODE]", "Tell cause and cure of a message; without a code, list all.", ExplainCommand.Execute, [o.Format, o.Out]);
+        Add("explain", "[CODE]", "Tell cause and cure of a message; without a code, list all.", ExplainCommand.Execute, [o.PageFormat, o.Out]);
         Add("schema", "NAME", "Print the JSON schema of a file kind.", SchemaCommand.Execute, [o.Out]);
         Add("new", "NAME", "Write a commented script and conditions file to start from.", NewCommand.Execute, [o.Force]);
         root.SetAction((parsed, _) => Task.FromResult(RootCommandAction.Execute(parsed, root, o, session)));

@@ -7,13 +7,11 @@ namespace ResourceCheck.Cli.Commands;
 /// <summary><c>explain</c>.</summary>
 internal static class ExplainCommand
 {
-    private static readonly string[] Formats = ["text", "markdown"];
-
     /// <summary>Executes it.</summary>
     public static Task<int> Execute(Invocation use, Options o, CancellationToken token)
     {
-        bool markdown = use.Choice(o.Format, Formats) == "markdown";
-        string? file = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
+        bool markdown = use.Choice(o.PageFormat, Options.PageFormats) == "markdown";
+        string? file = Work.FileOf(use, o);
         string? code = use.Only("a code", optional: true);
         Explanation? found = Catalogue.All.FirstOrDefault(e => string.Equals(e.Code, code, StringComparison.OrdinalIgnoreCase));
         if (code is not null && found is null)

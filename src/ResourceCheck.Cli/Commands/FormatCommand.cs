@@ -17,9 +17,7 @@ internal static class FormatCommand
     {
         string? name = use.Only("a script");
         use.Exclude(o.Check, o.Write);
-        string? target = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
-        if (target is not null && OutputFile.Check(target) is { } finding)
-            use.Findings.Add(finding);
+        string? target = Work.FileOf(use, o);
         InputText? script = use.Read(name);
         return Task.FromResult(script is null || use.Findings.Count > 0 ? Work.Refuse(use, NothingFormatted) : Format(use, o, name!, script, target));
     }
@@ -34,16 +32,16 @@ internal static class FormatCommand
         string formatted = use.Session.Library.Print(tree);
         bool same = formatted == script.Text;
         if (use.Has(o.Check))
-            return Tell(use, same, $"{script.Name} is not in its one shape; resourcecheck format --write {script.Name} brings it there.");
+            return Compare(use, same, script.Name);
         if (use.Has(o.Write) && name != InputFiles.StandardInput)
             return same ? ExitCodes.Done : Work.Deliver(use, name, formatted, ExitCodes.Done);
         return Work.Deliver(use, target, formatted, ExitCodes.Done);
     }
 
-    private static int Tell(Invocation use, bool same, string text)
+    private static int Compare(Invocation use, bool same, string name)
     {
-        if (!same && !string.IsNullOrEmpty(text))
-            use.Session.Terminal.Note(text);
+        if (!same)
+            use.Session.Terminal.Note($"{name} is not in its one shape; resourcecheck format --write {name} brings it there.");
         return same ? ExitCodes.Done : ExitCodes.NotMet;
     }
 }

@@ -19,7 +19,7 @@ internal static class RootCommandAction
         return session.Terminal.Fail([word switch
         {
             null => Findings.NoCommand(commands),
-            ['-', ..] => Findings.UnknownOption(words, word, "resourcecheck", [.. root.Options.Select(o => o.Name)]),
+            ['-', ..] => Findings.UnknownOption(words, word, Findings.Program, [.. root.Options.Select(o => o.Name)]),
             _ => Findings.UnknownCommand(words, word, commands),
         }], ExitCodes.WrongInput, "nothing was done");
     }

@@ -50,16 +50,22 @@ internal static class Work
     public static Target TargetOf(Invocation use, Options o)
     {
         string? format = use.Choice(o.Format, Options.Formats);
-        string? file = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
-        if (file is not null && OutputFile.Check(file) is { } finding)
-            use.Findings.Add(finding);
         return new Target(format switch
         {
             "json" => ReportFormat.Json,
             "csv" => ReportFormat.Csv,
             "markdown" => ReportFormat.Markdown,
             _ => ReportFormat.Text,
-        }, file, use.Has(o.Quiet));
+        }, FileOf(use, o), use.Has(o.Quiet));
+    }
+
+    /// <summary>The file that <c>--out</c> names, checked as far as can be before writing; null for standard output.</summary>
+    public static string? FileOf(Invocation use, Options o)
+    {
+        string? file = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
+        if (file is not null && OutputFile.Check(file) is { } finding)
+            use.Findings.Add(finding);
+        return file;
     }
 
     /// <summary>Tells wrong usage.</summary>

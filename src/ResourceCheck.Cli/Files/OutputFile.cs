@@ -20,10 +20,11 @@ internal static class OutputFile
         return Directory.Exists(folder) ? null : Findings.NoFolder(name, folder);
     }
 
-    /// <summary>Writes several files, all or none; null when all are written.</summary>
+    /// <summary>Writes files; null when all are written. All are prepared before the first is put in place, and a new one is taken back when a later one fails.</summary>
     public static Diagnostic? Write(IReadOnlyList<(string Name, string Text)> files)
     {
         List<(string Temporary, string Target)> prepared = [];
+        List<string> made = [];
         string current = "";
         try
         {
@@ -37,11 +38,18 @@ internal static class OutputFile
             }
 
             foreach ((string temporary, string target) in prepared)
+            {
+                bool isNew = !File.Exists(target);
                 File.Move(temporary, target, overwrite: true);
+                if (isNew)
+                    made.Add(target);
+            }
+
             return null;
         }
         catch (Exception failure) when (failure is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
         {
+            made.ForEach(Discard);
             return Findings.NotWritten(current, failure is UnauthorizedAccessException ? "access is denied" : failure.Message);
         }
         finally
@@ -54,7 +62,8 @@ internal static class OutputFile
     private static (string Temporary, string Target) Prepare(string name, string text)
     {
         // A link keeps pointing where it did; the file behind it is replaced.
-        string target = new FileInfo(name).ResolveLinkTarget(returnFinalTarget: true)?.FullName ?? Path.GetFullPath(name);
+        FileInfo named = new(name);
+        string target = (named.LinkTarget is null ? null : named.ResolveLinkTarget(returnFinalTarget: true)?.FullName) ?? named.FullName;
         string temporary = Path.Combine(Path.GetDirectoryName(target)!, $".{Path.GetFileName(target)}.{Guid.NewGuid():N}.part");
         try
         {

@@ -5,6 +5,9 @@ namespace ResourceCheck.Cli.Usage;
 /// <summary>All messages about command lines and files. Their causes and cures at length stand in the library's catalogue.</summary>
 internal static class Findings
 {
+    /// <summary>The name that users type.</summary>
+    public const string Program = "resourcecheck";
+
     public static Diagnostic NoCommand(IEnumerable<string> commands) =>
         new("U001", Severity.Error, $"A command is missing: {OneOf(commands)} fit here.", "resourcecheck --help explains them.", Place.Of("the command line"));
 
@@ -14,7 +17,8 @@ internal static class Findings
     public static Diagnostic UnknownOption(Words words, string word, string command, IReadOnlyList<string> options)
     {
         string name = word.Split('=')[0];
-        return new("U002", Severity.Error, $"`{name}` is no option of {command}: {OneOf(options)} fit here.", Suggest(Nearest.To(name, options), $"resourcecheck {command} --help explains them."), words.PlaceOf(word));
+        string help = command == Program ? $"{Program} --help" : $"{Program} {command} --help";
+        return new("U002", Severity.Error, $"`{name}` is no option of {command}: {OneOf(options)} fit here.", Suggest(Nearest.To(name, options), $"{help} explains them."), words.PlaceOf(word));
     }
 
     public static Diagnostic OneWordTooMany(Words words, string word, string command, string takes) => new(

@@ -43,7 +43,7 @@ internal static class HelpPage
         if (command is RootCommand)
             page.Append(ExitCodeList).Append(Cautions);
         else
-            page.Append("\nThe name - stands for standard input or output. resourcecheck --help tells exit codes and cautions.\n");
+            page.Append("\nAs the name of a script or of conditions, - stands for standard input. resourcecheck --help tells exit codes and cautions.\n");
         return page.ToString();
     }
 

@@ -8,6 +8,9 @@ internal sealed class Options
     /// <summary>Choices of <c>--format</c>.</summary>
     public static readonly string[] Formats = ["text", "json", "csv", "markdown"];
 
+    /// <summary>Choices of <c>explain --format</c>.</summary>
+    public static readonly string[] PageFormats = ["text", "markdown"];
+
     /// <summary>Choices of <c>--engine</c>.</summary>
     public static readonly string[] Engines = ["dense", "product", "sampled"];
 
@@ -26,6 +29,8 @@ internal sealed class Options
     public Option<string[]> Memory { get; } = Value("--memory", "SIZE", "Most memory an engine may take, such as \"4 GB\".");
 
     public Option<string[]> Format { get; } = Value("--format", "FORMAT", "Write text, json, csv or markdown.", Formats);
+
+    public Option<string[]> PageFormat { get; } = Value("--format", "FORMAT", "Write text or markdown.", PageFormats);
 
     public Option<string[]> Out { get; } = Value("--out", "FILE", "Write the result to a file, whole or not at all, instead of standard output.");
 

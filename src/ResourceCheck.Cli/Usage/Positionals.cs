@@ -7,34 +7,28 @@ namespace ResourceCheck.Cli.Usage;
 /// <summary>Tells a command's own words from options that it does not know.</summary>
 internal static class Positionals
 {
-    /// <summary>The words of the command; unknown options become findings. A word behind an unknown option is taken for its value.</summary>
+    /// <summary>The words of the command; unknown options become findings. When there are too many, one behind an unknown option is taken for its value.</summary>
     public static IReadOnlyList<string> Read(ParseResult parsed, Words words, List<Diagnostic> findings)
     {
         Command command = parsed.CommandResult.Command;
         string[] known = [.. command.Options.Where(o => !o.Hidden).Select(o => o.Name).Append(Options.Help.Name)];
-        List<string> kept = [];
-        bool onlyWords = false, afterUnknown = false;
+        List<(string Word, bool BehindUnknown)> kept = [];
+        bool onlyWords = false, behindUnknown = false;
         foreach (Token token in parsed.Tokens)
         {
             onlyWords |= token.Type == TokenType.DoubleDash;
-            if (token.Type != TokenType.Argument || !IsOwn(parsed, token))
-            {
-                afterUnknown = false;
-            }
-            else if (!onlyWords && LooksLikeOption(token.Value))
-            {
+            bool own = token.Type == TokenType.Argument && IsOwn(parsed, token);
+            bool unknown = own && !onlyWords && LooksLikeOption(token.Value);
+            if (unknown)
                 findings.Add(Findings.UnknownOption(words, token.Value, command.Name, known));
-                afterUnknown = !token.Value.Contains('=', StringComparison.Ordinal);
-            }
-            else
-            {
-                if (!afterUnknown || kept.Count == 0)
-                    kept.Add(token.Value);
-                afterUnknown = false;
-            }
+            else if (own)
+                kept.Add((token.Value, behindUnknown));
+            behindUnknown = unknown && !token.Value.Contains('=', StringComparison.Ordinal);
         }
 
-        return kept;
+        while (kept.Count > 1 && kept.FindIndex(k => k.BehindUnknown) is >= 0 and int index)
+            kept.RemoveAt(index);
+        return [.. kept.Select(k => k.Word)];
     }
 
     private static bool IsOwn(ParseResult parsed, Token token) =>

@@ -27,7 +27,7 @@ internal sealed class Words(IReadOnlyList<string> args)
 
     private Place At(int index)
     {
-        const string program = "resourcecheck ";
+        const string program = $"{Findings.Program} ";
         int start = program.Length + _shown.Take(index).Sum(w => w.Length + 1);
         string line = program + string.Join(' ', _shown);
         return new Place(Name, 0, 0, line, start, index < _shown.Length ? _shown[index].Length : 0);

@@ -62,7 +62,7 @@ internal static class ConditionsMessages
     {
         List<string> units = [.. UnitsOf(shape)];
         string fits = units.Count == 0 ? "a plain number without a unit" : Phrase.Or(units);
-        string cure = NearUnit(unit, units) is { } near ? $"did you mean {near}?" : $"write {shape.InWords}";
+        string cure = unit == "%" ? "divide by 100: per cent are not taken" : NearUnit(unit, units) is { } near ? $"did you mean {near}?" : $"write {shape.InWords}";
         return Error("C013", at, $"`{unit}` is no unit known here: {fits} fit{(units.Count > 1 ? "" : "s")} `{path}`.", cure);
     }
 
@@ -103,13 +103,13 @@ internal static class ConditionsMessages
         Error("C020", at, $"`{Cut(written)}` does not fit `{path}`: {shape.InWords} does.", $"write {shape.InWords}");
 
     public static Diagnostic MissingKey(Spot at, string path, IReadOnlyList<Key> keys) =>
-        Error("C021", at, $"`{path}` lacks {Phrase.Or(keys.Select(k => $"`{k.Name}`"))}.", $"give {Phrase.Or(keys.Select(k => $"`{k.Name}`, {k.Shape.InWords}"))}");
+        Error("C021", at, $"`{path}` lacks {Phrase.Or(keys.Select(k => $"`{k.Name}`"))}.", $"give {Phrase.Or(keys.Select(k => $"`{k.Name}` ({k.Shape.InWords})"))}");
 
     public static Diagnostic Exclusive(Spot at, string path, string first, string second) =>
         Error("C022", at, $"`{path}` has both `{first}` and `{second}`, of which only one can hold.", "keep one of them");
 
     public static Diagnostic ListLength(ArrayNode node, string path, ListShape shape) =>
-        Error("C023", node.Spot, $"`{path}` has {node.Items.Count} entries, but {shape.InWords} fits there.", shape.Least == shape.Most ? $"give {shape.Most} entries" : $"give {shape.Least} to {shape.Most} entries");
+        Error("C023", node.Spot, $"`{path}` has {Entries(node.Items.Count)}, but {shape.InWords} fits there.", shape.Least == shape.Most ? $"give {shape.Most} entries" : $"give {shape.Least} to {shape.Most} entries");
 
     public static Diagnostic BadMapKey(Spot at, string path, string name, MapShape shape) => Error(
         "C024",
@@ -153,7 +153,7 @@ internal static class ConditionsMessages
     public static Diagnostic ConfusionSum(Spot at, string path, double sum) =>
         Error("C034", at, $"The row `{path}` adds up to {Number(sum)}, but some outcome is always read: each row must add up to 1.", "mend the row; rows are true outcomes, columns the outcomes read");
 
-    public static Diagnostic NotSquare(Spot at, string path, int found, int wanted) => Error("C034", at, $"The row `{path}` has {found} entries, but the matrix has {wanted} rows.", $"give {wanted} entries");
+    public static Diagnostic NotSquare(Spot at, string path, int found, int wanted) => Error("C034", at, $"The row `{path}` has {Entries(found)}, but the matrix has {wanted} rows.", $"give {wanted} entries");
 
     public static Diagnostic PairBothWays(Spot at, string path, string pair) =>
         Error("C035", at, $"`{path}` gives {pair} a dephasing time although `coherence` already covers them.", "give `coherence` (T2, decay included) or `dephasingTime` (pure dephasing alone), never both for one pair");
@@ -191,16 +191,16 @@ internal static class ConditionsMessages
         Error("C051", at, $"`{section}` speaks of {name}, who is an outsider: nothing that conditions describe happens to outsiders.", "take the entry out");
 
     public static Diagnostic MemberAbove(Spot at, string name, string section, string last) =>
-        new("C052", Severity.Note, $"`{section}` speaks of {name}; at today's parameters the family ends with {last}, so that the rest has no effect.", null, at.ToPlace());
+        new("C052", Severity.Note, $"`{section}` speaks of {name}; at today's parameters the family ends with {last}, and what lies above it has no effect.", null, at.ToPlace());
 
     public static Diagnostic NoSuchLevel(Spot at, string path, int level, int levels) =>
         Error("C053", at, $"`{path}` speaks of level {level}, but the protocol's qudits have {levels} levels, 0 to {levels - 1}.", "use one of these levels");
 
     public static Diagnostic WrongSize(Spot at, string path, int found, int levels) =>
-        Error("C054", at, $"`{path}` has {found} entries, but the protocol's qudits have {levels} levels.", $"give {levels} entries, one per level");
+        Error("C054", at, $"`{path}` has {Entries(found)}, but the protocol's qudits have {levels} levels.", $"give {levels} entries, one per level");
 
     public static Diagnostic CoherenceTooLong(Spot at, string path, double seconds, double limit, string pair) =>
-        Error("C055", at, $"`{path}` is {Time(seconds)}, longer than the decay of {pair} allows: T2 is at most {Time(limit)}.", "shorten it, or leave it out for coherence that only decay limits");
+        Error("C055", at, $"`{path}` is {Time(seconds)}, longer than decay allows for {pair}: T2 is at most {Time(limit)}.", "shorten it, or leave it out for coherence that only decay limits");
 
     public static Diagnostic NotRealisable(Spot at, string path) =>
         Error("C056", at, $"The times in `{path}` fit no physical noise: the matrix of factors exp(-φt) of all pairs of levels has a negative eigenvalue.", "check that no pair keeps its phase while both lose it with a third level; pairs not named do not dephase");
@@ -209,7 +209,7 @@ internal static class ConditionsMessages
         Error("C057", at, $"`{path}` builds states of 2 to {most} parties, but {parties} hold a qudit here.", "take it out, or give the state as `resource.file`");
 
     public static Diagnostic ExchangeSteps(Spot at, string path, int found, int steps) =>
-        Error("C058", at, $"`{path}` has {found} entries, but {steps + 1} qudits are built in {steps} steps.", $"give {steps} entries; {{}} is a step without errors");
+        Error("C058", at, $"`{path}` has {Entries(found)}, but {steps + 1} qudits are built in {steps} steps.", $"give {steps} entries; {{}} is a step without errors");
 
     public static Diagnostic NoSuchQudit(Spot at, string path, int qudit, int qudits) =>
         Error("C059", at, $"`{path}` speaks of qudit {qudit}, but this step joins {qudits} qudits, counted from 1.", "name two of these");
@@ -222,7 +222,7 @@ internal static class ConditionsMessages
         Error("C070", at, $"`{Cut(path)}` is no path: keys are joined by points, list entries are counted in brackets from 0.", "write it like flight.Dov.length or levels.decay[0].lifetime");
 
     public static Diagnostic NoSuchItem(Spot at, string path, string list, int index, int count) =>
-        Error("C071", at, count == 0 ? $"`{Cut(path)}` leads nowhere: `{Cut(list)}` is no list with entries." : $"`{Cut(path)}` leads nowhere: `{Cut(list)}` has {count} entries, counted from 0, and none is number {index}.", count == 0 ? "set the whole list" : $"use an index from 0 to {count - 1}");
+        Error("C071", at, count == 0 ? $"`{Cut(path)}` leads nowhere: `{Cut(list)}` is no list with entries." : $"`{Cut(path)}` leads nowhere: `{Cut(list)}` has {Entries(count)}, counted from 0, and none is number {index}.", count == 0 ? "set the whole list" : count == 1 ? "use index 0" : $"use an index from 0 to {count - 1}");
 
     public static Diagnostic PathIntoList(Spot at, string path, string reached, int count) =>
         Error("C071", at, $"`{Cut(path)}` leads nowhere: `{Cut(reached)}` is a list.", count == 0 ? "set the whole list" : $"say which entry, such as {Cut(reached)}[0]");
@@ -242,11 +242,13 @@ internal static class ConditionsMessages
 
     private static string UnitOf(string example) => example[(example.IndexOf(' ', StringComparison.Ordinal) + 1)..];
 
+    private static string Entries(int count) => count == 1 ? "1 entry" : $"{count} entries";
+
     private static string Bare(Dimension dimension) => UnitTable.NameOf(dimension).Split(' ', 2)[1];
 
     private static string Number(double value) => value.ToString("G6", CultureInfo.InvariantCulture);
 
-    private static string TwoPiTimes(double value) => (2 * Math.PI * value).ToString("G4", CultureInfo.InvariantCulture);
+    private static string TwoPiTimes(double value) => (2 * Math.PI * value).ToString("0.####e0", CultureInfo.InvariantCulture);
 
     private static string Time(double seconds) => QuantityText.Of(Duration.FromSeconds(seconds), 4);
 

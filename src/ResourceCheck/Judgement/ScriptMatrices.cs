@@ -18,12 +18,12 @@ internal static class ScriptMatrices
     public static (IReadOnlyDictionary<string, Complex[,]> Matrices, IReadOnlyList<Diagnostic> Findings) Read(Protocol protocol)
     {
         Dictionary<string, Complex[,]> matrices = [];
-        Findings findings = new();
+        Conditions.Findings findings = new();
         string folder = Path.GetDirectoryName(protocol.Source.Name) ?? "";
         foreach ((string file, Span span) in Named(protocol).DistinctBy(n => n.File))
         {
             Spot spot = new(protocol.Source, span, false);
-            if (MatrixFile.Read(new TextSetting(spot, $"matrix \"{file}\"", file), folder, false, findings) is not [var matrix])
+            if (MatrixFile.Read(new TextSetting(spot, $"matrix \"{file}\"", file), folder, false, findings) is not [{ } matrix])
                 continue;
             int size = matrix.GetLength(0);
             double defect = MatrixMath.DeviationFromUnitary(matrix);

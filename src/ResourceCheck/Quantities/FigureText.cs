@@ -46,13 +46,17 @@ internal static class FigureText
         double size = Math.Abs(value);
         if (value == 0)
             return "0";
-        if (size >= LeastFixed && size < GreatestWhole && (value == Math.Floor(value) || CountDigits(shortest) <= Significant))
+        if (size >= LeastFixed && size < GreatestWhole && value == Math.Floor(value))
             return shortest;
-        return size is < LeastFixed or >= GreatestFixed ? Scientific(value, rounding) : Fixed(value, rounding);
+        return size is < LeastFixed or >= GreatestFixed ? Scientific(value, rounding) : Fixed(value, shortest, rounding);
     }
 
     /// <summary>A difference of two figures of order one, so that rounding errors of the two do not show.</summary>
-    public static string Difference(double value) => Math.Abs(value) < RoundOff ? "0" : Number(value);
+    public static string Difference(double value, Rounding rounding = Rounding.Nearest) => Math.Abs(value) < RoundOff ? "0" : Number(value, rounding);
+
+    /// <summary>A rough size, such as an estimated amount of work.</summary>
+    public static string About(double value) =>
+        double.IsFinite(value) ? value.ToString(Math.Abs(value) < GreatestFixed ? "0.##" : "0.#e0", CultureInfo.InvariantCulture) : NonFinite(value);
 
     /// <summary>A time in the unit that suits it.</summary>
     public static string Time(double seconds)
@@ -83,13 +87,15 @@ internal static class FigureText
     public static string NonFinite(double value) =>
         double.IsNaN(value) ? "not a number" : value > 0 ? "infinite" : "minus infinite";
 
-    private static string Fixed(double value, Rounding rounding)
+    private static string Fixed(double value, string shortest, Rounding rounding)
     {
         double rounded = double.Parse(value.ToString("E3", CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
         int decimals = Significant - 1 - (int)Math.Floor(Math.Log10(Math.Abs(rounded)));
         if (value is > 0.9 and < 1)
             decimals = Math.Max(Significant, (int)Math.Ceiling(-Math.Log10(1 - value)) + 1);
         decimals = Math.Max(decimals, 0);
+        if (shortest.Length - 1 - shortest.IndexOf('.', StringComparison.Ordinal) <= decimals)
+            return shortest;
         decimal shown = decimal.Parse(value.ToString($"F{decimals}", CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
         return Direct(shown, (double)shown, value, decimals, rounding);
     }
@@ -112,12 +118,6 @@ internal static class FigureText
         if (rounding == Rounding.Up && shown < value)
             digits += last;
         return digits.ToString($"F{decimals}", CultureInfo.InvariantCulture);
-    }
-
-    private static int CountDigits(string shortest)
-    {
-        int e = shortest.IndexOf('E', StringComparison.Ordinal);
-        return (e < 0 ? shortest : shortest[..e]).TrimStart('-', '0', '.').Count(char.IsAsciiDigit);
     }
 
     private static string Trim(string number) =>

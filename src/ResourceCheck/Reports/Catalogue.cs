@@ -14,6 +14,8 @@ public static class Catalogue
     {
         IReadOnlyList<Explanation>[] steps =
         [
+            Scripts.SyntaxCatalogue.All,
+            Resources.StateCatalogue.All,
             UsageCatalogue.All,
         ];
         return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];

@@ -22,5 +22,9 @@ internal sealed record TextCell(string Text) : Cell;
 /// <summary>A number with its unit and the way it may be rounded for people.</summary>
 internal sealed record NumberCell(double Value, string Unit, Rounding Rounding) : Cell;
 
-/// <summary>A difference of two figures: what is below the round-off of both shows as 0.</summary>
-internal sealed record DifferenceCell(double Value) : Cell;
+/// <summary>A difference of two figures: what is below the round-off of both shows as 0. That of a bound is a bound itself, and says its side.</summary>
+internal sealed record DifferenceCell(double Value, Rounding Rounding, string Side) : Cell
+{
+    /// <summary>The difference as people read it.</summary>
+    public string Shown => Side + FigureText.Difference(Value, Rounding);
+}

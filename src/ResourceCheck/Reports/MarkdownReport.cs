@@ -47,7 +47,7 @@ internal static class MarkdownReport
     private static string Show(Cell cell) => cell switch
     {
         NumberCell number => FigureText.Of(number.Value, number.Unit, number.Rounding),
-        DifferenceCell difference => FigureText.Difference(difference.Value),
+        DifferenceCell difference => difference.Shown,
         TextCell text => Escape(text.Text),
         _ => "",
     };

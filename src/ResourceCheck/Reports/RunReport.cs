@@ -46,7 +46,7 @@ internal static class RunReport
             Truth.CellOf(f.Estimate, f.Unit),
             f.Unit == "s" ? Cell.Empty : Cell.Of(Truth.Describe(f.Estimate)),
             Cell.Of(f.Ideal),
-            f.Lost is { } lost ? new DifferenceCell(lost) : Cell.Empty,
+            f.Lost is { } lost ? Truth.LessThan(f.Estimate, lost) : Cell.Empty,
             Cell.Of(ShortNote(f.Note, run)),
         ])],
         Headed: false);
@@ -110,10 +110,17 @@ internal static class RunReport
             [new("goal", "Goal"), new("met", "Met"), new("value", "Value"), new("label", "Label"), new("margin", "Margin", Lead: "margin ")],
             [.. run.Goals.Select(g => (IReadOnlyList<Cell>)
             [
-                Cell.Of(g.Text), Cell.Of(g.Met ? "met" : "not met"), Truth.CellOf(g.Value), Cell.Of(Truth.Describe(g.Value)), new DifferenceCell(g.Margin),
+                Cell.Of(g.Text), Cell.Of(g.Met ? "met" : "not met"), Truth.CellOf(g.Value), Cell.Of(Truth.Describe(g.Value)), Margin(g),
             ])],
             Headed: false), []),
     ];
+
+    // A margin is the figure less the threshold for >= and the reverse for <=; which of the two tells a bound's side.
+    private static DifferenceCell Margin(GoalResult goal)
+    {
+        double above = goal.Value.Value - goal.Threshold;
+        return Math.Abs(above - goal.Margin) <= Math.Abs(above + goal.Margin) ? Truth.MoreThan(goal.Value, goal.Margin) : Truth.LessThan(goal.Value, goal.Margin);
+    }
 
     private static bool Differ(IReadOnlyList<BranchEvaluation> branches)
     {

@@ -36,18 +36,20 @@ internal static class StateReport
 
     private static Table Figures(StateDescription state) => new(
         [new("quantity", "Figure"), new("value", state.MendedBy is null ? "Value" : "As read"), new("mended", "Mended"), new("label", "Label")],
-        [.. state.Figures.Select(FigureRow)]);
+        [.. state.Figures.Select(f => Row(f, f.Label == TruthLabel.Bound ? "bound, at least" : Truth.Name(f.Label)))]);
 
-    private static IReadOnlyList<Cell> FigureRow(StateFigure figure) =>
-        [Cell.Of(figure.Name), Cell.Of(figure.Value, "", RoundingOf(figure.Label)), Cell.Of(figure.Mended, ""), Cell.Of(Truth.Name(figure.Label))];
-
-    // A figure labelled bound in a state's description is a fidelity found by search: the true one is at least it.
-    private static Rounding RoundingOf(TruthLabel label) => label == TruthLabel.Bound ? Rounding.Down : Rounding.Nearest;
+    // Figures of a state are sums of terms of order one, so what is below their round-off shows as 0.
+    // A bound in a state's description is a fidelity found by search: the true one is at least that.
+    private static IReadOnlyList<Cell> Row(StateFigure figure, string label)
+    {
+        Rounding rounding = figure.Label == TruthLabel.Bound ? Rounding.Down : Rounding.Nearest;
+        return [Cell.Of(figure.Name), new DifferenceCell(figure.Value, rounding, ""), figure.Mended is { } mended ? new DifferenceCell(mended, rounding, "") : Cell.Empty, Cell.Of(label)];
+    }
 
     private static Table Data(StateDescription state) => new(
         [new("quantity", "Quantity"), new("value", "Value"), new("mended", "Mended"), new("label", "Label")],
         [
-            .. state.Figures.Select(FigureRow),
+            .. state.Figures.Select(f => Row(f, Truth.Name(f.Label))),
             .. state.Populations.Select(p => (IReadOnlyList<Cell>)[Cell.Of($"population {p.Key}"), Cell.Of(p.Value), Cell.Empty, Cell.Of("exact")]),
         ]);
 

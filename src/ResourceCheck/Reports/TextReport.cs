@@ -7,6 +7,10 @@ namespace ResourceCheck.Reports;
 internal static class TextReport
 {
     private const string Gap = "  ";
+
+    /// <summary>A longer text pushes the rest of its own row aside instead of widening the column for all.</summary>
+    private const int WidestColumn = 48;
+
     private const string Good = "\u001b[1;32m";
     private const string Bad = "\u001b[1;31m";
     private const string Plain = "\u001b[0m";
@@ -44,11 +48,11 @@ internal static class TextReport
         List<string[]> rows = [.. table.Rows.Select(row => row.Select((cell, c) => Show(cell, table.Headed ? "" : table.Columns[c].Lead)).ToArray())];
         if (table.Headed)
             rows.Insert(0, [.. table.Columns.Select(c => c.Title)]);
-        int[] widths = [.. Enumerable.Range(0, table.Columns.Count).Select(c => rows.Max(row => Width(row[c])))];
+        int[] widths = [.. Enumerable.Range(0, table.Columns.Count).Select(c => rows.Select(row => Width(row[c])).Where(w => w <= WidestColumn).Append(0).Max())];
         writer.Write('\n');
         foreach (string[] row in rows)
         {
-            IEnumerable<string> padded = row.Select((text, c) => text + new string(' ', widths[c] - Width(text)));
+            IEnumerable<string> padded = row.Select((text, c) => text + new string(' ', Math.Max(0, widths[c] - Width(text))));
             writer.Write($"{Gap}{string.Join(Gap, padded).TrimEnd()}\n");
         }
     }
@@ -64,7 +68,7 @@ internal static class TextReport
     private static string Show(Cell cell, string lead) => cell switch
     {
         NumberCell number => lead + FigureText.Of(number.Value, number.Unit, number.Rounding),
-        DifferenceCell difference => lead + FigureText.Difference(difference.Value),
+        DifferenceCell difference => lead + difference.Shown,
         TextCell { Text: "" } => "",
         TextCell text => lead + Visible.InLine(text.Text),
         _ => "",

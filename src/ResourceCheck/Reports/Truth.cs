@@ -41,6 +41,25 @@ internal static class Truth
         _ => Rounding.Nearest,
     });
 
-    private static string Interval(Estimate estimate) =>
-        $"{FigureText.Number(estimate.Low, Rounding.Down)} to {FigureText.Number(estimate.High, Rounding.Up)}";
+    /// <summary>What a figure has more than something fixed.</summary>
+    public static DifferenceCell MoreThan(Estimate estimate, double difference) => Difference(difference, Side(estimate));
+
+    /// <summary>What something fixed has more than a figure: a bound changes its side.</summary>
+    public static DifferenceCell LessThan(Estimate estimate, double difference) => Difference(difference, Side(estimate) switch
+    {
+        "at least" => "at most",
+        "at most" => "at least",
+        var side => side,
+    });
+
+    private static DifferenceCell Difference(double value, string? side) => side switch
+    {
+        "at least" => new(value, Rounding.Down, "at least "),
+        "at most" => new(value, Rounding.Up, "at most "),
+        _ => new(value, Rounding.Nearest, ""),
+    };
+
+    private static string Interval(Estimate estimate) => !double.IsFinite(estimate.Low) && !double.IsFinite(estimate.High)
+        ? "no interval"
+        : $"{FigureText.Number(estimate.Low, Rounding.Down)} to {FigureText.Number(estimate.High, Rounding.Up)}";
 }

@@ -14,13 +14,16 @@ public static class Resource
     {
         ArgumentNullException.ThrowIfNull(model);
         ArgumentOutOfRangeException.ThrowIfLessThan(parties, 1);
-        return model.Preparation switch
+        Outcome<PreparedState> prepared = model.Preparation switch
         {
             IdealPreparation => Ideal(parties),
             ExchangePreparation exchange => ExchangePrepared.From(exchange, parties),
             FilePreparation file => Fit(StateFile.Read(file.File, file.Mend), file.File, parties),
             _ => throw new NotSupportedException($"No way to prepare {model.Preparation.GetType().Name} is known."),
         };
+        return prepared.Value is { } state && model.PhysicalLevels is { } levels
+            ? new Outcome<PreparedState>(LevelOrdering.Of(state, levels), prepared.Findings)
+            : prepared;
     }
 
     private static Outcome<PreparedState> Ideal(int parties) =>

@@ -29,11 +29,12 @@ internal static class StateDescriber
         MendedBy = state.MendedBy,
     };
 
-    private static StateFigure Evaluate(Definition definition, CheckedState state) => new(
-        definition.Name,
-        definition.Evaluate(state.Original),
-        state.Mended is { } mended ? definition.Evaluate(mended) : null,
-        definition.Label);
+    private static StateFigure Evaluate(Definition definition, CheckedState state)
+    {
+        double original = definition.Evaluate(state.Original);
+        double? mended = state.Mended is null ? null : ReferenceEquals(state.Mended, state.Original) ? original : definition.Evaluate(state.Mended);
+        return new(definition.Name, original, mended, definition.Label);
+    }
 
     private static IEnumerable<Definition> Definitions(PreparedState state)
     {

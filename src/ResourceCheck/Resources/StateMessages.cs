@@ -93,7 +93,7 @@ internal static class StateMessages
 
     public static Diagnostic Trace(string file, Complex trace, double tolerance) => Error(
         "D014",
-        $"The trace is {Text(trace.Real)}{(trace.Imaginary == 0 ? "" : $" + {Text(trace.Imaginary)}i")}; a density matrix has 1, within {Text(tolerance)}.",
+        $"The trace is {Text(trace.Real)}{(Math.Abs(trace.Imaginary) <= tolerance ? "" : $" with the imaginary part {Text(trace.Imaginary)}")}; a density matrix has 1, within {Text(tolerance)}.",
         CureFor(Complex.Abs(trace - 1)),
         Place.Of(file));
 
@@ -274,7 +274,7 @@ internal static class StateMessages
 
     private static string CureFor(double deviation) => deviation <= StateTolerances.Mendable ? MendCure : TooFarCure;
 
-    private static string Text(double value) => value.ToString("G6", CultureInfo.InvariantCulture);
+    private static string Text(double value) => value.ToString("g6", CultureInfo.InvariantCulture);
 
     /// <summary>Names from files may be of any length.</summary>
     private static string Short(string name) => name.Length <= 40 ? name : $"{name[..40]}…";

@@ -21,6 +21,9 @@ internal static class SyntaxMessages
     public static SyntaxMessage NoNumber(string found) =>
         new("S003", $"{Show(found)} is no number: digits with at most one point inside and an exponent fit, as in 0.25 or 1e-6.", NumberCure(found));
 
+    public static SyntaxMessage ForeignDigit(Rune rune) =>
+        new("S003", $"The digit {rune} (U+{rune.Value:X4}) is none of the language's: the digits 0 to 9 fit.", "write it with the digits 0 to 9");
+
     public static SyntaxMessage DecimalComma(string before, string after) =>
         new("S003", $"`{Cut(before)},{Cut(after)}` is no number: a point parts the decimals.", $"write {Cut(before)}.{Cut(after)}");
 
@@ -42,7 +45,7 @@ internal static class SyntaxMessages
             : $"{Show(found)} is no verb: {Words(VerbTable.BaseForms)} fit after the actors.", near is null ? null : DidYouMean(near));
 
     public static SyntaxMessage Misplaced(string found, string where, string home) =>
-        new("S008", $"`{found}` does not fit {where}: it belongs {home}.", $"move the line {home}");
+        new("S008", $"`{found}` does not fit {where}: it belongs {home}.", "move the line, or look for an end that is missing or stands too early");
 
     public static SyntaxMessage Unclosed(string block) =>
         new("S009", $"The `{block}` opened here is never closed: a line with `end` fits after its last line.", "add the missing end");
@@ -55,7 +58,7 @@ internal static class SyntaxMessages
             second ? "put a second when inside the first otherwise" : "open a when above it");
 
     public static SyntaxMessage Misfit(Token found, string fitting, string? cure) =>
-        new("S012", found.Kind == TokenKind.LineEnd ? $"The line ends too early: {fitting} should follow." : $"{Show(found)} does not fit here: {fitting} would.", cure);
+        new("S012", found.Kind == TokenKind.LineEnd ? $"The line ends where {fitting} should follow." : $"{Show(found)} stands where {fitting} should.", cure);
 
     public static SyntaxMessage RestOfLine(Token found, string complete) =>
         new("S013", $"{Show(found)} stands behind a complete statement: {complete}, and the line ends there.", "start a new line, or take the rest out");

@@ -17,7 +17,7 @@ public sealed class LocalFramesTests
     public void A_turned_antisymmetric_state_is_recognised(int n)
     {
         PreparedState turned = Turned(n, 5);
-        Assert.True(StateFigures.Fidelity(turned) < 0.9);
+        Assert.True(StateFigures.Fidelity(turned) < 0.99);
         Assert.Equal(1, StateFigures.FidelityInBestFrames(turned), 1e-8);
     }
 

@@ -16,7 +16,8 @@ public sealed class MendingTests
     public void Cut_eigenvalues_are_taken_evenly_from_the_others()
     {
         double[] lambda = SimplexProjection.Of([0.6, 0.5, 0.1, -0.2]);
-        Assert.Equal([0.6 - 0.2 / 3, 0.5 - 0.2 / 3, 0.1 - 0.2 / 3, 0], lambda.Select(x => Math.Round(x, 15)).Zip([0.6 - 0.2 / 3, 0.5 - 0.2 / 3, 0.1 - 0.2 / 3, 0], (a, b) => Math.Abs(a - b) < 1e-14 ? b : a));
+        double[] expected = [8 / 15.0, 13 / 30.0, 1 / 30.0, 0];
+        Assert.All(lambda.Zip(expected), pair => Assert.Equal(pair.Second, pair.First, 1e-14));
     }
 
     /// <summary>Optimality (Karush, Kuhn, Tucker): all kept values move by the same amount, and no cut one would stay positive after it.</summary>
@@ -100,5 +101,25 @@ public sealed class MendingTests
         Complex[] hermitian = HermitianMatrix.HermitianPart([.. a.Cast<Complex>()], Size);
         double lowest = HermitianMatrix.Eigenvalues(hermitian, Size)[0];
         return Cholesky.IsAbove(hermitian, Size, -lowest + 1e-6) && !Cholesky.IsAbove(hermitian, Size, -lowest - 1e-6);
+    }
+
+    [Fact]
+    public void Large_matrices_are_checked_without_their_eigenvalues()
+    {
+        string good = Diagonal(_ => 1 / 529.0);
+        Outcome<StateDescription> described = Fixture.With(".json", good, path => StateFile.Describe(path, mend: false));
+        Assert.Equal((Severity.Note, "D019"), (described.Findings.Single().Severity, described.Findings.Single().Code));
+        Assert.Equal(1 / 529.0, described.Value!.Figures.Single(f => f.Name == "purity").Value, 1e-12);
+        Assert.Equal(-1e-9, described.Value.Validity.LowestEigenvalue, 1e-15);
+        string bad = Diagonal(i => i == 300 ? -1e-8 : (1 + 1e-8) / 528);
+        Assert.Equal(["D015"], Fixture.With(".json", bad, path => StateFile.Read(path, mend: false)).Findings.Select(f => f.Code));
+        Assert.Equal(["D015", "D017"], Fixture.With(".json", bad, path => StateFile.Read(path, mend: true)).Findings.Select(f => f.Code));
+    }
+
+    /// <summary>A diagonal matrix of two qudits with 23 levels as JSON.</summary>
+    private static string Diagonal(Func<int, double> value)
+    {
+        IEnumerable<string> rows = Enumerable.Range(0, 529).Select(r => $"[{string.Join(',', Enumerable.Range(0, 529).Select(c => r == c ? $"{value(r):R}" : "0"))}]");
+        return $"{{\"parties\": 2, \"levels\": 23, \"density\": [{string.Join(",\n", rows)}]}}";
     }
 }

@@ -67,7 +67,7 @@ internal sealed class MatrixFile
         for (int i = 0; i < size; i++)
         {
             if (rows.Items[i] is not ArrayNode row || row.Items.Count != size)
-                return Refuse(rows.Items[i], $"a row of {size} entries, as there are {size} rows")?[0];
+                return Refuse(rows.Items[i], $"a row of {size} entries")?[0];
             for (int j = 0; j < size; j++)
             {
                 if (Entry(row.Items[j]) is not { } entry)

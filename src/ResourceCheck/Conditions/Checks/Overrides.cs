@@ -44,7 +44,7 @@ internal sealed class Overrides
         Findings own = new();
         if (JsonTree.Read(source, true, own) is { } node && !own.HasErrors)
             return node;
-        if (source.Text.Length <= JsonTree.MaxLength && !source.Text.TrimStart().StartsWith(['{', '[', '"']))
+        if (source.Text.Length <= JsonTree.MaxLength && !"{[\"".Contains(source.Text.TrimStart().FirstOrDefault(), StringComparison.Ordinal))
             return new TextNode(spot, source.Text.Trim());
         foreach (Diagnostics.Diagnostic finding in own.InOrder(source.Name))
             findings.Add(finding);

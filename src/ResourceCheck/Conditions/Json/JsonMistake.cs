@@ -26,7 +26,7 @@ internal static class JsonMistake
             return ConditionsMessages.DecimalComma(spot);
         if (found is '"' or '{' or '[' && !(previous is ',' or ':' or '{' or '[' or '\0'))
             return ConditionsMessages.MissingComma(spot);
-        return ConditionsMessages.NotJson(spot, text.Substring(offset, spot.Span.Length));
+        return ConditionsMessages.NotJson(spot, text.Substring(offset, Math.Min(spot.Span.Length, 40)));
     }
 
     private static Spot SpotAt(SourceText source, bool isOption, int offset, int length) => new(source, new Span(offset, length), isOption);
@@ -40,6 +40,8 @@ internal static class JsonMistake
 
     private static int WordLength(string text, int offset)
     {
+        if (text[offset] is '"' or '\'' && text.IndexOf(text[offset], offset + 1) is > 0 and int close && text.IndexOf('\n', offset) is int line && (line < 0 || line > close))
+            return close + 1 - offset;
         int end = offset;
         while (end < text.Length && end - offset < 20 && (char.IsLetterOrDigit(text[end]) || text[end] is '_' or '.' or '-' or '+'))
             end++;

@@ -23,7 +23,7 @@ internal sealed class DynamicsBuilder(LevelOrder order, Findings findings)
         foreach (GroupSetting entry in section.Groups("leakage"))
         {
             if (order.Check(entry.Find("from")) is { } from && entry.NumberOf(key) is { } number)
-                leakage[from] = key == "rate" ? leakage[from] + number.Value : 1 - ((1 - leakage[from]) * (1 - number.Value));
+                leakage[from] = key == "rate" ? leakage[from] + number.Value : leakage[from] + (number.Value * (1 - leakage[from]));
         }
 
         return leakage;

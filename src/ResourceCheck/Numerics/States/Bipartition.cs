@@ -40,7 +40,7 @@ internal sealed record Bipartition(bool[] Inside)
         for (int index = 0; index < ket.Length; index++)
         {
             (int inner, int outer) = Split(index, d);
-            matrix[outer, inner] = ket[index];
+            matrix[outer, inner] = HermitianMatrix.WithoutDenormals(ket[index]);
         }
 
         return [.. matrix.Svd(false).S.Select(value => value.Real)];

@@ -10,6 +10,11 @@ internal static class HermitianMatrix
     /// <summary>Dimension up to which all eigenvalues are computed: 256 takes a tenth of a second, 512 about one, 3125 would take many minutes.</summary>
     public const int LargestDecomposed = 512;
 
+    /// <summary>
+    /// Denormal parts, from about 2e-308 downwards, let the library's decompositions divide 0 by 0. Parts this small change no figure.
+    /// </summary>
+    private const double Negligible = 1e-200;
+
     /// <summary>Eigenvalues in ascending order. The entries must be finite, else the decomposition fails.</summary>
     public static double[] Eigenvalues(Complex[] rows, int size)
     {
@@ -28,9 +33,10 @@ internal static class HermitianMatrix
         return scaled.ConjugateTransposeAndMultiply(v).ToRowMajorArray();
     }
 
-    /// <summary>Trace norm: the sum of the singular values, of any square matrix.</summary>
-    public static double TraceNorm(Complex[] rows, int size) =>
-        Matrix<Complex>.Build.Dense(size, size, rows).Svd(false).S.Sum(value => value.Real);
+    /// <summary>Trace norm: the sum of the singular values, of any square matrix. Those of a Hermitian one come several times faster.</summary>
+    public static double TraceNorm(Complex[] rows, int size) => LargestAsymmetry(rows, size).Deviation == 0
+        ? Eigenvalues(rows, size).Sum(Math.Abs)
+        : Matrix<Complex>.Build.Dense(size, size, [.. rows.Select(WithoutDenormals)]).Svd(false).S.Sum(value => value.Real);
 
     /// <summary>(ρ + ρ†)/2, the Hermitian matrix nearest to any square one.</summary>
     public static Complex[] HermitianPart(Complex[] rows, int size)
@@ -71,13 +77,17 @@ internal static class HermitianMatrix
         return trace;
     }
 
+    /// <summary>The number with negligible parts set to 0, as decompositions need it.</summary>
+    public static Complex WithoutDenormals(Complex z) =>
+        new(Math.Abs(z.Real) < Negligible ? 0 : z.Real, Math.Abs(z.Imaginary) < Negligible ? 0 : z.Imaginary);
+
     private static Evd<Complex> Decompose(Complex[] rows, int size)
     {
         Complex[] columns = new Complex[rows.Length];
         for (int r = 0; r < size; r++)
         {
             for (int c = 0; c < size; c++)
-                columns[c * size + r] = rows[r * size + c];
+                columns[c * size + r] = WithoutDenormals(rows[r * size + c]);
         }
 
         return Matrix<Complex>.Build.Dense(size, size, columns).Evd(Symmetricity.Hermitian);

@@ -91,7 +91,7 @@ internal static class LocalFrames
 
     private static Matrix<Complex> PolarFactor(Matrix<Complex> matrix)
     {
-        Svd<Complex> svd = matrix.Svd();
+        Svd<Complex> svd = matrix.Map(HermitianMatrix.WithoutDenormals).Svd();
         return svd.U * svd.VT;
     }
 

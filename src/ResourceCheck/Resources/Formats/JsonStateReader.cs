@@ -163,6 +163,13 @@ internal ref struct JsonStateReader
         {
             string label = _reader.GetString()!;
             int start = (int)_reader.TokenStartIndex;
+            if (terms.Count == StateShape.LargestVector)
+            {
+                _findings.Add(StateMessages.JsonTooLong(Here(), StateShape.LargestVector));
+                SkipRest();
+                return;
+            }
+
             if (!seen.Add(label))
                 _findings.Add(StateMessages.JsonTwice(Here(), label));
             _reader.Read();
@@ -269,5 +276,7 @@ internal ref struct JsonStateReader
     private readonly Place Here() =>
         PlaceOf((int)_reader.TokenStartIndex, _reader.HasValueSequence ? 1 : Math.Max(1, (int)(_reader.BytesConsumed - _reader.TokenStartIndex)));
 
-    private readonly Place PlaceOf(int start, int length) => TextPlaces.InBytes(_file, _text, start, length);
+    /// <summary>Finding a line takes a walk through the text, which is spared for findings that are not listed any more.</summary>
+    private readonly Place PlaceOf(int start, int length) =>
+        _findings.Full ? Place.Of(_file) : TextPlaces.InBytes(_file, _text, start, length);
 }

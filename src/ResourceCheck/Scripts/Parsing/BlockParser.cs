@@ -91,7 +91,9 @@ internal sealed class BlockParser
         }
 
         _balance.TellLeftOpen();
-        _findings.Add(header.Span, SyntaxMessages.Unclosed(header.Tokens[0].Text));
+        // A block guessed from a misspelt word has been told already, and may have been none.
+        if (StatementTable.Find(header.Tokens[0].Text) is not null)
+            _findings.Add(header.Span, SyntaxMessages.Unclosed(header.Tokens[0].Text));
         return false;
     }
 

@@ -25,7 +25,8 @@ internal sealed class EndBalance
         TokenLine header = open[^1];
         if (line.Tokens[0].Is("end") || line.Tokens[0].Is("otherwise"))
             return line.Indent < header.Indent && open.Any(o => o.Indent == line.Indent);
-        return line.Indent <= header.Indent && StatementParser.WordOf(line) is { } word && (word.Places & Places.Script) != 0 && !IsLoopBody(header, word);
+        return line.Indent <= header.Indent && StatementParser.WordOf(line) is { } word
+            && word.Places.HasFlag(Places.Script) && !IsLoopBody(header, word);
     }
 
     /// <summary>One of the missing ends has been told.</summary>

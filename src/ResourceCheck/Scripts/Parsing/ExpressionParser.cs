@@ -89,8 +89,7 @@ internal sealed class ExpressionParser(LineCursor cursor)
     {
         Token opening = cursor.Take();
         Expression inner = Nested(opening.Span);
-        Close(opening);
-        return inner;
+        return inner with { Span = opening.Span.Through(Close(opening).Span) }; // quoted in messages and results as written
     }
 
     private Token Close(Token opening)

@@ -5,6 +5,9 @@ namespace ResourceCheck.Scripts.Parsing;
 /// <summary>Reads the statements that judge: sifting, checkpoints, success, reports, claims, goals, harm.</summary>
 internal static class FigureParser
 {
+    private static readonly BinaryOperator[] GoalSigns = [BinaryOperator.LessOrEqual, BinaryOperator.GreaterOrEqual];
+    private static readonly BinaryOperator[] ClaimSigns = [BinaryOperator.Equal, .. GoalSigns];
+
     public static Statement Keep(LineCursor cursor) => new KeepStatement(DeclarationParser.Start(cursor), Condition(cursor));
 
     public static Statement Success(LineCursor cursor) => new SuccessStatement(DeclarationParser.Start(cursor), Condition(cursor));
@@ -32,10 +35,10 @@ internal static class FigureParser
     }
 
     public static Statement Claim(LineCursor cursor) =>
-        new ClaimStatement(DeclarationParser.Start(cursor), Comparison(cursor, "claim", [BinaryOperator.Equal, BinaryOperator.LessOrEqual, BinaryOperator.GreaterOrEqual]));
+        new ClaimStatement(DeclarationParser.Start(cursor), Comparison(cursor, "claim", ClaimSigns));
 
     public static Statement Goal(LineCursor cursor) =>
-        new GoalStatement(DeclarationParser.Start(cursor), Comparison(cursor, "goal", [BinaryOperator.LessOrEqual, BinaryOperator.GreaterOrEqual]));
+        new GoalStatement(DeclarationParser.Start(cursor), Comparison(cursor, "goal", GoalSigns));
 
     /// <summary>The condition behind <c>when</c>.</summary>
     internal static Expression Condition(LineCursor cursor)
@@ -48,8 +51,9 @@ internal static class FigureParser
     {
         Expression comparison = ExpressionParser.Parse(cursor);
         bool fits = comparison is BinaryExpression binary && fitting.Contains(binary.Operator);
+        string signs = SyntaxMessages.Words(fitting.Select(o => OperatorTable.Of(o).Text));
         if (!fits && cursor.Peek.Kind == TokenKind.LineEnd)
-            cursor.Fail(comparison.Span, SyntaxMessages.NoComparison(statement, SyntaxMessages.Words(fitting.Select(o => OperatorTable.Of(o).Text))));
+            cursor.Fail(comparison.Span, SyntaxMessages.NoComparison(statement, signs));
         return comparison;
     }
 }

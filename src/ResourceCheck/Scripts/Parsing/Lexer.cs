@@ -142,11 +142,19 @@ internal sealed class Lexer
     {
         bool valid = Rune.DecodeFromUtf16(_text.AsSpan(_position), out Rune rune, out int length) == System.Buffers.OperationStatus.Done;
         Span span = new(_position, length);
+        if (valid && Rune.IsDigit(rune))
+        {
+            Add(TokenKind.Number, span.End, "0");
+            Report(span, SyntaxMessages.ForeignDigit(rune));
+            return;
+        }
+
         _position += length;
         bool told = _strayTold;
         _strayTold = _faulty = true;
+        bool readable = valid && !Rune.IsControl(rune) && rune != Rune.ReplacementChar;
         if (!told)
-            _findings.Add(span, valid && !Rune.IsControl(rune) ? SyntaxMessages.StrayCharacter(rune) : SyntaxMessages.ControlCharacter(_text[span.Start]));
+            _findings.Add(span, readable ? SyntaxMessages.StrayCharacter(rune) : SyntaxMessages.ControlCharacter(_text[span.Start]));
     }
 
     private void Add(TokenKind kind, int end, string text)

@@ -101,16 +101,19 @@ internal sealed class LineCursor(TokenLine line, FindingList findings, IReadOnly
     public void ExpectEnd(string complete)
     {
         if (Peek.Kind != TokenKind.LineEnd)
-            Fail(Peek.Span, SyntaxMessages.RestOfLine(Peek, complete));
+            FailAtComma(SyntaxMessages.RestOfLine(Peek, complete));
     }
 
     /// <summary>Fails at the next token, which does not fit.</summary>
-    public void FailHere(string fitting)
+    public void FailHere(string fitting) => FailAtComma(SyntaxMessages.Misfit(Peek, fitting, null));
+
+    /// <summary>Fails at the next token, unless the slip is a comma for a decimal point.</summary>
+    private void FailAtComma(SyntaxMessage otherwise)
     {
-        if (IsDecimalComma() is { } comma)
+        if (FindDecimalComma() is { } comma)
             Fail(comma.Span, SyntaxMessages.DecimalComma(comma.Before, comma.After));
         else
-            Fail(Peek.Span, SyntaxMessages.Misfit(Peek, fitting, null));
+            Fail(Peek.Span, otherwise);
     }
 
     public void Fail(Span span, SyntaxMessage message)
@@ -149,14 +152,11 @@ internal sealed class LineCursor(TokenLine line, FindingList findings, IReadOnly
         return false;
     }
 
-    private (Span Span, string Before, string After)? IsDecimalComma()
+    private (Span Span, string Before, string After)? FindDecimalComma()
     {
-        if (_next == 0 || !Is(","))
-        {
-            return _next < 2 || Peek.Kind != TokenKind.Number ? null : CommaBetween(_next - 2);
-        }
-
-        return CommaBetween(_next - 1);
+        if (_next >= 1 && Is(","))
+            return CommaBetween(_next - 1);
+        return _next >= 2 && Peek.Kind == TokenKind.Number ? CommaBetween(_next - 2) : null;
     }
 
     private (Span Span, string Before, string After)? CommaBetween(int first)

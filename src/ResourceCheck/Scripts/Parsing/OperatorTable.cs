@@ -17,6 +17,9 @@ internal static class OperatorTable
     /// <summary>An <c>if</c> reaches to the end of what surrounds it.</summary>
     public const int Conditional = 0;
 
+    /// <summary><c>v of Ada, Ben</c> takes part in no operation without brackets.</summary>
+    public const int PartyList = 5;
+
     public const int Not = 40;
     public const int Comparison = 50;
 

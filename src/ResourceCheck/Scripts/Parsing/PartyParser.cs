@@ -5,6 +5,9 @@ namespace ResourceCheck.Scripts.Parsing;
 /// <summary>Reads who acts or is meant: <c>Ada, P[1..n]</c>, <c>all</c>, <c>others</c>.</summary>
 internal static class PartyParser
 {
+    // What may follow a plain party; an operator or a point would make it a value.
+    private static readonly string[] Behind = [",", ";", ")", "]", "}", ".."];
+
     /// <summary>A list as long as commas go on.</summary>
     public static PartyList List(LineCursor cursor)
     {
@@ -60,7 +63,7 @@ internal static class PartyParser
         if (first.Kind != TokenKind.Word || (Vocabulary.IsReserved(first.Text) && !first.Is("all") && !first.Is("others")))
             return false;
         Token behind = cursor.Ahead(2).Is("[") ? BehindBrackets(cursor, 2) : cursor.Ahead(2);
-        return behind.Kind is TokenKind.Word or TokenKind.LineEnd || behind.Is(",") || behind.Is(")") || behind.Is(";") || behind.Is("}");
+        return behind.Kind is TokenKind.Word or TokenKind.LineEnd || Array.Exists(Behind, behind.Is);
     }
 
     private static Token BehindBrackets(LineCursor cursor, int opening)

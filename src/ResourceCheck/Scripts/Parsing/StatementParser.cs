@@ -61,7 +61,8 @@ internal static class StatementParser
     {
         Token first = cursor.Peek, second = cursor.Ahead(1);
         bool isParty = first.Is("all") || first.Is("others") || (first.Kind == TokenKind.Word && !Vocabulary.IsReserved(first.Text));
-        return isParty && (second.Is(",") || second.Is("[") || cursor.IsDeclared(first.Text) || IsNearlyVerb(second) || first.Text is "all" or "others");
+        return isParty
+            && (second.Is(",") || second.Is("[") || cursor.IsDeclared(first.Text) || IsNearlyVerb(second) || first.Text is "all" or "others");
     }
 
     private static bool IsNearlyVerb(Token token) =>

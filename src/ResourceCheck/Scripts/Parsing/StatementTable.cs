@@ -46,7 +46,7 @@ internal static class StatementTable
         new("round", Turns, BlockHeaderParser.Round, Places.Round),
         new("discussion", Turns, BlockHeaderParser.Discussion, Places.Discussion),
         new("when", Places.Round | Places.Discussion | Places.Replacement, BlockHeaderParser.When, Places.Anywhere),
-        new("keep", Quantum, FigureParser.Keep),
+        new("keep", Quantum | Turns, FigureParser.Keep),
         new("checkpoint", Turns | Places.Round, FigureParser.Checkpoint),
         new("success", Top, FigureParser.Success),
         new("report", Turns, FigureParser.Report),
@@ -65,6 +65,8 @@ internal static class StatementTable
     private static readonly Dictionary<string, string> Habits = new()
     {
         ["if"] = "when",
+        ["fro"] = "for",
+        ["foreach"] = "for",
         ["while"] = "for",
         ["repeat"] = "for",
         ["title"] = "protocol",
@@ -75,11 +77,14 @@ internal static class StatementTable
     /// <summary>The statement a word begins, or null.</summary>
     public static StatementWord? Find(string word) => ByWord.GetValueOrDefault(word);
 
+    // Of three letters, a change makes too many other words.
+    private static readonly string[] Guessable = [.. ByWord.Keys.Where(w => w.Length > 3)];
+
     /// <summary>The statement that was probably meant, or null.</summary>
     public static StatementWord? Near(string word)
     {
-        string? near = Habits.GetValueOrDefault(word.ToLowerInvariant()) ?? NearWords.Find(word, ByWord.Keys);
-        return near is null ? null : ByWord[near];
+        string lower = word.ToLowerInvariant();
+        return Find(lower) ?? Find(Habits.GetValueOrDefault(lower) ?? NearWords.Find(lower, Guessable) ?? "");
     }
 
     /// <summary>The words that may begin a line there.</summary>

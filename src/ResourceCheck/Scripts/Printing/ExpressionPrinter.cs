@@ -82,6 +82,8 @@ internal sealed class ExpressionPrinter
         UnaryExpression => OperatorTable.Negation,
         IfExpression => OperatorTable.Conditional,
         BasisExpression { Kind: BasisKind.Fourier, Argument: not null } => OperatorTable.FourierOn,
+        // An operator behind the last of several parties would make that party a value of its own.
+        OfExpression { Parties.Items.Count: > 1 } => OperatorTable.PartyList,
         _ => OperatorTable.Whole,
     };
 
