@@ -115,4 +115,32 @@ public sealed class MeaningTests
     [Fact]
     public void Sending_the_same_value_again_is_no_second_meaning() =>
         Assert.Empty(Bound.Codes(Bound.Three("round \"r\"\n  Cyd measures fourier as k\n  Cyd sends k to Ada\n  Cyd announces k\n  Ada, Ben apply complement(fourier, k)\nend")));
+
+    [Fact]
+    public void A_requirement_that_divides_by_zero_at_these_values_is_broken_not_wrong()
+    {
+        Requirement requirement = Assert.Single(Bound.Right("parameter a = 1 in 0 to 1\nparties Ada, Ben\nresource antisymmetric on all\nrequire 1/(a - 1) < 3, \"no room\"\nsuccess when true\n").Requirements);
+        Assert.False(requirement.Holds);
+        Assert.Equal("none < 3", requirement.Figures);
+        Assert.Equal(["S055"], Bound.Codes("parameter n = 2 in 2..3\nparties P[1..n]\nresource antisymmetric on all\nsuccess when true\nclaim success >= 1/(n - 2)\n"));
+    }
+
+    [Fact]
+    public void What_parameters_switch_off_need_not_exist()
+    {
+        const string Text = "parameter n = 3 in 3..4\nparties P[1..n]\nresource antisymmetric on all\nround \"r\"\n  all measure level as v\n  when n > 3\n    P[4] set w to 1\n  end\nend\nsuccess when (if n > 3 then P[4].v else P[3].v) = 0\n";
+        Assert.Equal(2, Assert.IsType<BoundSlot>(Assert.IsType<BoundBinary>(Bound.Right(Text).Success).Left).Slot);
+        Assert.Equal(3, Assert.IsType<BoundSlot>(Assert.IsType<BoundBinary>(Bound.Right(Text, ("n", 4)).Success).Left).Slot);
+    }
+
+    [Fact]
+    public void A_message_in_one_branch_is_known_only_as_that_message_afterwards()
+    {
+        Protocol protocol = Bound.Right(Bound.Three(
+            "round \"r\"\n  Ada pick a from 0, 1\n  Ada pick c from 0, 1\n  Ada announces c\n  when Ada.c = 0\n    Ada announces a\n  end\n  Ben set got to Ada.a\nend"));
+        int read = Assert.IsType<BoundSlot>(Assert.Single(protocol.Steps.OfType<SetStep>()).Value).Slot;
+        Assert.Equal(SlotKind.Message, protocol.Slots[read].Kind);
+        Assert.Equal(["S036"], Bound.Codes(Bound.Three(
+            "round \"r\"\n  Ada pick a from 0, 1\n  Ada pick c from 0, 1\n  Ada announces c\n  when Ada.c = 0\n    Ada announces a\n  end\n  keep when Ada.a = 0\nend")));
+    }
 }

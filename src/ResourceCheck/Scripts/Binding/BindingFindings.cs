@@ -27,7 +27,7 @@ internal sealed class BindingFindings(SourceText source)
     public void Report(Span span, Message message)
     {
         // What stands in a part that these parameter values switch off may be impossible only because of them.
-        if (_muted > 0 && BindingMessages.DependsOnParameters(message.Code))
+        if (IsMuted && BindingMessages.DependsOnParameters(message.Code))
             return;
         // Several lines may be missing from one script; all of these findings stand at its beginning.
         if (_seen.Add((message.Code, span, span.Length == 0 ? message.Text : null)))
@@ -36,6 +36,9 @@ internal sealed class BindingFindings(SourceText source)
 
     /// <summary>Adds a finding about a value given from outside the script.</summary>
     public void Report(string input, Message message) => _found.Add((-1, From(message, Place.Of(input))));
+
+    /// <summary>Whether the current part is switched off by the parameter values.</summary>
+    public bool IsMuted => _muted > 0;
 
     /// <summary>Keeps a name from causing further findings.</summary>
     public void Suspect(string name) => _suspects.Add(name);

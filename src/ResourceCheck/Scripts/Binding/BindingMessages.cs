@@ -139,7 +139,7 @@ internal static class BindingMessages
         new("S054", $"{name} is given the wrong arguments: {shape} fits.", null);
 
     public static Message Undefined(string text) =>
-        new("S055", $"`{text}` has no value: it divides by zero.", null);
+        new("S055", $"`{text}` has no value here: a number fits that does not divide by zero.", null);
 
     public static Message WholeNumberNeeded(string value) =>
         new("S055", $"This is {value}: a whole number fits here.", null);

@@ -58,6 +58,8 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
         if (open || expression is BinaryExpression { Operator: < BinaryOperator.Plus } or UnaryExpression { Operator: UnaryOperator.Not })
             return null;
         Value? value = new ExpressionBinder(context, new ConstantView(context)).Expect(expression, ValueKind.Number).Constant;
+        if (value is NoneValue)
+            context.Findings.Report(expression.Span, BindingMessages.Undefined(context.TextOf(expression.Span)));
         return value is NumberValue number ? new NumberFigure(expression.Span, number.Number.ToDouble()) : null;
     }
 
