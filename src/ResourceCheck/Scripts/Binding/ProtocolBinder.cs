@@ -23,9 +23,10 @@ internal static partial class ProtocolBinder
         StepBinder binder = new(context, labels);
         IReadOnlyList<Step> steps = binder.Bind();
         RefereeBinder referee = new(context, labels, steps);
-        if (!referee.Bind(binder.RefereeLines))
+        referee.Bind(binder.RefereeLines);
+        if (!tree.Statements.Any(s => s is SuccessStatement))
             declarations.Missing("success", "success when true");
-        if (!context.Findings.IsEmpty || referee.Success is null || tree.Statements.Any(s => s is BrokenStatement))
+        if (!context.Findings.IsEmpty || referee.Success is null || TreeWalk.Statements(tree.Statements).Any(s => s is BrokenStatement))
             return Outcome<Protocol>.Failed(context.Findings.All);
         return Outcome<Protocol>.Of(Assemble(context, given, declared, requirements, steps, referee));
     }
