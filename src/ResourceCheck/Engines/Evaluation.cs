@@ -39,7 +39,10 @@ public sealed record Evaluation
     public required IReadOnlyList<Estimate> Reports { get; init; }
 
     /// <summary>The sides of the script's claims in order: left, right.</summary>
-    public required IReadOnlyList<(double Left, double Right)> Claims { get; init; }
+    public required IReadOnlyList<(Estimate Left, Estimate Right)> Claims { get; init; }
+
+    /// <summary>Outcomes of whole runs, most probable first, at most a handful.</summary>
+    public required IReadOnlyList<BranchEvaluation> Ends { get; init; }
 
     /// <summary>Outcomes in which the success condition fails, most probable first, at most a handful.</summary>
     public required IReadOnlyList<BranchEvaluation> Failures { get; init; }

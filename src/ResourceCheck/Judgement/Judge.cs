@@ -6,11 +6,23 @@ namespace ResourceCheck.Judgement;
 public static class Judge
 {
     /// <summary>Evaluates a protocol under conditions.</summary>
-    public static Outcome<RunResult> Run(RunRequest request) => throw new NotSupportedException();
+    public static Outcome<RunResult> Run(RunRequest request) => Setup.From(request) switch
+    {
+        { Value: { } setup } => RunJudgement.Of(setup),
+        { Findings: var findings } => Outcome<RunResult>.Failed(findings),
+    };
 
     /// <summary>Proves or refutes a protocol's claims under ideal conditions.</summary>
-    public static Outcome<VerifyResult> Verify(RunRequest request) => throw new NotSupportedException();
+    public static Outcome<VerifyResult> Verify(RunRequest request) => Setup.From(request with { Conditions = null, Overrides = [] }) switch
+    {
+        { Value: { } setup } => VerifyJudgement.Of(setup),
+        { Findings: var findings } => Outcome<VerifyResult>.Failed(findings),
+    };
 
     /// <summary>Tells what would be computed, without computing it.</summary>
-    public static Outcome<InspectResult> Inspect(RunRequest request) => throw new NotSupportedException();
+    public static Outcome<InspectResult> Inspect(RunRequest request) => Setup.From(request) switch
+    {
+        { Value: { } setup } => InspectJudgement.Of(setup),
+        { Findings: var findings } => Outcome<InspectResult>.Failed(findings),
+    };
 }

@@ -24,6 +24,9 @@ public sealed record RunRequest
     /// <summary>Threads; 0 uses all cores.</summary>
     public int Threads { get; init; }
 
+    /// <summary>Stops the evaluation.</summary>
+    public CancellationToken Cancellation { get; init; }
+
     /// <summary>Most memory an engine may take, bytes; null uses what the machine has free.</summary>
     public double? MemoryLimit { get; init; }
 }

@@ -5,6 +5,19 @@ namespace ResourceCheck.Reports;
 /// <summary>Cause and cure of every message, gathered from the steps that give them.</summary>
 public static class Catalogue
 {
+    private static readonly Lazy<IReadOnlyList<Explanation>> Gathered = new(Gather);
+
     /// <summary>All explanations in order of code.</summary>
-    public static IReadOnlyList<Explanation> All { get; } = [];
+    public static IReadOnlyList<Explanation> All => Gathered.Value;
+
+    private static IReadOnlyList<Explanation> Gather()
+    {
+        IReadOnlyList<Explanation>[] steps =
+        [
+            Scripts.SyntaxCatalogue.All,
+            Resources.StateCatalogue.All,
+            UsageCatalogue.All,
+        ];
+        return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];
+    }
 }

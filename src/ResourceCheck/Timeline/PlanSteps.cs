@@ -61,8 +61,8 @@ public sealed record SiteNoise
     /// <summary>A fixed unitary; null for none.</summary>
     public System.Numerics.Complex[,]? Rotation { get; init; }
 
-    /// <summary>Root-mean-square phase per level step, rad.</summary>
-    public double PhaseNoise { get; init; }
+    /// <summary>d×d: factor of each element by phase noise; null for none.</summary>
+    public double[,]? PhaseFactors { get; init; }
 
     /// <summary>Off-diagonals times 1 minus this.</summary>
     public double Dephasing { get; init; }

@@ -1,0 +1,22 @@
+using ResourceCheck.Cli.Usage;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement;
+using ResourceCheck.Reports;
+
+namespace ResourceCheck.Cli.Commands;
+
+/// <summary><c>run</c>.</summary>
+internal static class RunCommand
+{
+    /// <summary>Executes it.</summary>
+    public static async Task<int> Execute(Invocation use, Options o, CancellationToken token)
+    {
+        Target target = Work.TargetOf(use, o);
+        if (Work.Request(use, o) is not { } request)
+            return Work.Refuse(use);
+        Outcome<RunResult> outcome = await Work.Compute(() => use.Session.Library.Run(request), token);
+        return Work.Finish(use, target, outcome, (run, writer, colour) => ReportWriter.Write(run, target.Format, writer, colour), CodeOf, run => run.Warnings);
+    }
+
+    private static int CodeOf(RunResult run) => run.Verdict == Verdict.NotMet ? ExitCodes.NotMet : ExitCodes.Done;
+}

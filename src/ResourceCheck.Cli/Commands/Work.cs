@@ -1,0 +1,107 @@
+using System.CommandLine;
+using ResourceCheck.Cli.Files;
+using ResourceCheck.Cli.Usage;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement;
+using ResourceCheck.Reports;
+
+namespace ResourceCheck.Cli.Commands;
+
+/// <summary>What commands that compute have in common: request, work, findings, result, exit code.</summary>
+internal static class Work
+{
+    private const string NothingComputed = "nothing was computed";
+
+    /// <summary>The request that the words and options of a command make; null when any of them is wrong.</summary>
+    public static RunRequest? Request(Invocation use, Options o)
+    {
+        string? script = use.Only("a script");
+        InputText? protocol = use.Read(script);
+        InputText? conditions = Uses(o.Under) ? use.Read(use.Text(o.Under)) : null;
+        IReadOnlyList<KeyValuePair<string, string>> overrides = Uses(o.Set) ? use.Pairs(o.Set, "flight.Dov.length=\"5 km\"") : [];
+        IReadOnlyList<KeyValuePair<string, string>> parameters = use.Pairs(o.Parameter, "n=4");
+        string? engine = Uses(o.Engine) ? use.Choice(o.Engine, Options.Engines) : null;
+        double? memory = use.Memory(o.Memory);
+        long seed = use.Whole(o.Seed, long.MinValue, long.MaxValue, otherwise: 1);
+        int threads = (int)use.Whole(o.Threads, 0, MostThreads, otherwise: 0);
+        return protocol is null || use.Findings.Count > 0 ? null : new RunRequest
+        {
+            Script = protocol,
+            Conditions = conditions,
+            Overrides = overrides,
+            Parameters = parameters,
+            Engine = engine,
+            MemoryLimit = memory,
+            Seed = seed,
+            Threads = threads,
+        };
+
+        bool Uses(Option option) => use.Command.Options.Contains(option);
+    }
+
+    /// <summary>More threads than any machine has cores would only cost memory.</summary>
+    private const int MostThreads = 4096;
+
+    /// <summary>Computes apart from the waiting task, so that an interruption is answered at once; what still runs ends with the process.</summary>
+    public static Task<Outcome<T>> Compute<T>(Func<Outcome<T>> compute, CancellationToken token)
+        where T : class => Task.Run(compute, token).WaitAsync(token);
+
+    /// <summary>Where and how the result is to be written; whatever is wrong with that becomes a finding of the use.</summary>
+    public static Target TargetOf(Invocation use, Options o)
+    {
+        string? format = use.Choice(o.Format, Options.Formats);
+        return new Target(format switch
+        {
+            "json" => ReportFormat.Json,
+            "csv" => ReportFormat.Csv,
+            "markdown" => ReportFormat.Markdown,
+            _ => ReportFormat.Text,
+        }, FileOf(use, o), use.Has(o.Quiet));
+    }
+
+    /// <summary>The file that <c>--out</c> names, checked as far as can be before writing; null for standard output.</summary>
+    public static string? FileOf(Invocation use, Options o)
+    {
+        string? file = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
+        if (file is not null && OutputFile.Check(file) is { } finding)
+            use.Findings.Add(finding);
+        return file;
+    }
+
+    /// <summary>Tells wrong usage.</summary>
+    public static int Refuse(Invocation use, string closing = NothingComputed) =>
+        use.Session.Terminal.Fail(use.Findings, ExitCodes.WrongInput, closing);
+
+    /// <summary>Shows an outcome's findings and writes its value, if there is one.</summary>
+    public static int Finish<T>(Invocation use, Target target, Outcome<T> outcome, Action<T, TextWriter, bool> write, Func<T, int> code, Func<T, IReadOnlyList<Diagnostic>> warnings)
+        where T : class
+    {
+        Terminal terminal = use.Session.Terminal;
+        if (outcome.Value is not { } value)
+            return terminal.Fail(outcome.Findings, CodeOf(outcome.Findings), NothingComputed);
+        bool shownAlready = target is { Format: ReportFormat.Text, File: null } && terminal.Host.OutputIsTerminal;
+        Diagnostic[] told = [.. outcome.Findings.Concat(warnings(value)).Distinct()];
+        if (!target.Quiet && !shownAlready)
+            terminal.Show(told);
+        using StringWriter text = new();
+        write(value, text, target.File is null && terminal.Host.Colour);
+        return Deliver(use, target.File, text.ToString(), code(value));
+    }
+
+    /// <summary>Writes a text to a file or to standard output.</summary>
+    public static int Deliver(Invocation use, string? file, string text, int code)
+    {
+        if (file is null)
+            return use.Session.Terminal.Write(text, code);
+        return OutputFile.Write([(file, text)]) is { } finding
+            ? use.Session.Terminal.Fail([finding], ExitCodes.WrongInput, "nothing was written")
+            : code;
+    }
+
+    // Only when nothing is wrong with the input does "no trustworthy result" say what to look into.
+    private static int CodeOf(IReadOnlyList<Diagnostic> findings)
+    {
+        Diagnostic[] errors = [.. findings.Where(f => f.Severity == Severity.Error)];
+        return errors.Length > 0 && errors.All(f => f.Code.StartsWith('E')) ? ExitCodes.NoResult : ExitCodes.WrongInput;
+    }
+}

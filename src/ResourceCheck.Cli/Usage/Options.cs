@@ -1,0 +1,61 @@
+using System.CommandLine;
+
+namespace ResourceCheck.Cli.Usage;
+
+/// <summary>All options. Their values are read as text and checked by us, so that every mistake of a command line is told at once and in our own words.</summary>
+internal sealed class Options
+{
+    /// <summary>Choices of <c>--format</c>.</summary>
+    public static readonly string[] Formats = ["text", "json", "csv", "markdown"];
+
+    /// <summary>Choices of <c>explain --format</c>.</summary>
+    public static readonly string[] PageFormats = ["text", "markdown"];
+
+    /// <summary>Choices of <c>--engine</c>.</summary>
+    public static readonly string[] Engines = ["dense", "product", "sampled"];
+
+    public static Option<bool> Help { get; } = new("--help", "-h") { Description = "Show how a command is used.", Recursive = true };
+
+    public Option<bool> Version { get; } = new("--version") { Description = "Show the program's version." };
+
+    public Option<string[]> Under { get; } = Value("--under", "FILE", "Conditions to judge under; without it everything is ideal.");
+
+    public Option<string[]> Set { get; } = Value("--set", "PATH=VALUE", "Override a value of the conditions, such as flight.Dov.length=\"5 km\". May be repeated.");
+
+    public Option<string[]> Parameter { get; } = Value("--parameter", "NAME=VALUE", "Set a parameter: a number, a fraction, a list 3,4, a range 3..8, or all. May be repeated.");
+
+    public Option<string[]> Engine { get; } = Value("--engine", "NAME", "Evaluate with dense, product or sampled instead of letting the program choose.", Engines);
+
+    public Option<string[]> Memory { get; } = Value("--memory", "SIZE", "Most memory an engine may take, such as \"4 GB\".");
+
+    public Option<string[]> Format { get; } = Value("--format", "FORMAT", "Write text, json, csv or markdown.", Formats);
+
+    public Option<string[]> PageFormat { get; } = Value("--format", "FORMAT", "Write text or markdown.", PageFormats);
+
+    public Option<string[]> Out { get; } = Value("--out", "FILE", "Write the result to a file, whole or not at all, instead of standard output.");
+
+    public Option<string[]> Seed { get; } = Value("--seed", "NUMBER", "Seed of sampled figures; the same seed gives the same figures. Default 1.");
+
+    public Option<string[]> Threads { get; } = Value("--threads", "NUMBER", "Threads to use; 0, the default, uses all cores.");
+
+    public Option<bool> Quiet { get; } = new("--quiet") { Description = "Show no warnings on standard error; documents still hold them." };
+
+    public Option<bool> Mend { get; } = new("--mend") { Description = "Replace a state that is slightly none by the nearest density matrix, and show both." };
+
+    public Option<bool> Check { get; } = new("--check") { Description = "Write nothing; exit with 1 when the script is not in its one shape." };
+
+    public Option<bool> Write { get; } = new("--write") { Description = "Write the script back in its one shape." };
+
+    public Option<bool> Force { get; } = new("--force") { Description = "Replace files that exist." };
+
+    /// <summary>Whether an option may be given several times.</summary>
+    public static bool MayRepeat(Option option) => option.Name is "--set" or "--parameter";
+
+    private static Option<string[]> Value(string name, string helpName, string description, string[]? choices = null)
+    {
+        Option<string[]> option = new(name) { Description = description, HelpName = helpName, Arity = ArgumentArity.ZeroOrMore, AllowMultipleArgumentsPerToken = false };
+        if (choices is not null)
+            option.CompletionSources.Add(choices);
+        return option;
+    }
+}

@@ -1,0 +1,25 @@
+namespace ResourceCheck.Engines.Dense;
+
+/// <summary>A checkpoint's sums over branches.</summary>
+internal sealed class Look(string label, double at, History history)
+{
+    /// <summary>Histories kept per checkpoint in results; the rest adds up to little and would only fill the document.</summary>
+    private const int BranchesTold = 256;
+
+    private double _overlap;
+
+    public string Label { get; } = label;
+
+    /// <summary>Probability of getting here, so far.</summary>
+    public double Weight { get; private set; }
+
+    public void Add(Branch branch, double weight, double overlap)
+    {
+        Weight += weight;
+        _overlap += overlap;
+        history.Add(branch.Slots, weight, overlap);
+    }
+
+    public CheckpointEvaluation Conclude() =>
+        new(Label, Estimate.Exact(Tally.Ratio(_overlap, Weight)), Weight, at, [.. history.MostProbable(Weight, BranchesTold)]);
+}

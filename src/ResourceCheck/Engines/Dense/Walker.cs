@@ -1,0 +1,127 @@
+using ResourceCheck.Numerics;
+using ResourceCheck.Scripts.Binding;
+using ResourceCheck.Timeline;
+
+namespace ResourceCheck.Engines.Dense;
+
+/// <summary>Follows every branch of a plan to its end and hands looks and ends to the tally.</summary>
+internal sealed class Walker(Plan plan, LocalModels models, Tally tally, CancellationToken cancellation)
+{
+    /// <summary>Branches less probable than this are round-off of impossible outcomes, whose sign is random.</summary>
+    private const double Negligible = 1e-15;
+
+    public void Walk(Branch start) => Go(new Cursor(plan.Steps, 0, null), start);
+
+    /// <summary>Rest of a list of steps and what follows it.</summary>
+    private sealed record Cursor(IReadOnlyList<PlanStep> Steps, int Index, Cursor? Then);
+
+    private void Go(Cursor? cursor, Branch branch)
+    {
+        while (cursor is not null)
+        {
+            if (cursor.Index == cursor.Steps.Count)
+            {
+                cursor = cursor.Then;
+                continue;
+            }
+
+            PlanStep step = cursor.Steps[cursor.Index];
+            cursor = cursor with { Index = cursor.Index + 1 };
+            if (Next(step, ref cursor, branch) is not { } next)
+                return;
+            branch = next;
+        }
+
+        tally.End(branch, branch.Weight(models.Basis.Trace));
+    }
+
+    /// <summary>The branch after a step; null when the branch has split or ended.</summary>
+    private Branch? Next(PlanStep step, ref Cursor cursor, Branch branch)
+    {
+        switch (step)
+        {
+            case NoisePlanStep noise:
+                return branch.Acting(noise.Party, models.Noise(noise.Noise));
+            case HeraldPlanStep herald:
+                return branch.Acting(herald.Party, models.Basis.DropSink());
+            case ApplyPlanStep apply:
+                return models.Unitary(apply.Unitary, apply.Model, branch.Slots) is { } map ? branch.Acting(apply.Party, map) : branch;
+            case AssignPlanStep assign:
+                return branch.With(assign.Slot, Value(assign.Value, branch));
+            case AbortPlanStep abort:
+                return Holds(abort.Condition, branch) ? branch.WithAborted(abort.Party) : branch;
+            case WhenPlanStep block:
+                cursor = new Cursor(Holds(block.Condition, branch) ? block.Then : block.Otherwise, 0, cursor);
+                return branch;
+            case CheckpointPlanStep checkpoint:
+                tally.Look(checkpoint, branch, models);
+                return branch;
+            default:
+                return Split(step, cursor, branch);
+        }
+    }
+
+    private Branch? Split(PlanStep step, Cursor cursor, Branch branch)
+    {
+        cancellation.ThrowIfCancellationRequested();
+        switch (step)
+        {
+            case KeepPlanStep keep:
+                return Holds(keep.Condition, branch) ? branch : null;
+            case PickPlanStep pick:
+                foreach (BoundExpression option in pick.Options)
+                    Go(cursor, branch.With(pick.Slot, Value(option, branch)).Scaled(1.0 / pick.Options.Count));
+                return null;
+            case MeasurePlanStep measure:
+                Measure(measure, cursor, branch);
+                return null;
+            case InterceptPlanStep intercept:
+                Intercept(intercept, cursor, branch);
+                return null;
+            default:
+                throw new InvalidOperationException($"The dense engine does not know {step.GetType().Name}.");
+        }
+    }
+
+    private void Measure(MeasurePlanStep step, Cursor cursor, Branch branch)
+    {
+        if (Value(step.Basis, branch) is not BasisValue basis)
+        {
+            Go(cursor, branch.Reading(step.Party, models.Basis.Trace).With(step.Slot, Scripts.Binding.Value.None)); // no basis, no measurement, no outcome
+            return;
+        }
+
+        double[][] effects = models.Effects(basis, step.Model);
+        for (int k = 0; k < effects.Length; k++)
+        {
+            Branch next = branch.Reading(step.Party, effects[k]);
+            bool unseen = k == effects.Length - 1;
+            double weight = next.Weight(models.Basis.Trace);
+            if (unseen && !plan.Protocol.HandlesNone)
+                tally.Unseen(weight);
+            else if (weight > Negligible)
+                Go(cursor, next.With(step.Slot, unseen ? Scripts.Binding.Value.None : Scripts.Binding.Value.Of(k)));
+        }
+    }
+
+    private void Intercept(InterceptPlanStep step, Cursor cursor, Branch branch)
+    {
+        if (Value(step.Basis, branch) is not BasisValue basis)
+        {
+            Go(cursor, branch.With(step.Slot, Scripts.Binding.Value.None));
+            return;
+        }
+
+        SiteMap[] projections = models.Projections(basis);
+        for (int k = 0; k < projections.Length; k++)
+        {
+            Branch next = branch.Acting(step.Victim, projections[k]);
+            if (next.Weight(models.Basis.Trace) > Negligible)
+                Go(cursor, next.With(step.Slot, Scripts.Binding.Value.Of(k)));
+        }
+    }
+
+    private Value Value(BoundExpression expression, Branch branch) => ValueEvaluator.Evaluate(expression, branch.Slots, models.Basis.Levels);
+
+    private bool Holds(BoundExpression condition, Branch branch) => Value(condition, branch) is TruthValue { Truth: true };
+}

@@ -1,0 +1,50 @@
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Engines.Dense;
+using ResourceCheck.Resources;
+using ResourceCheck.Scripts.Binding;
+using ResourceCheck.Timeline;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>Chooses an engine for a setting, refuses what does not fit before anything is allocated, and evaluates.</summary>
+internal static class Evaluator
+{
+    /// <summary>Part of the machine's memory that an evaluation may take; the rest is for the system and the runtime.</summary>
+    private const double UsableMemory = 0.8;
+
+    /// <summary>The engine that would run; findings when none can.</summary>
+    public static Outcome<EngineChoice> Choose(Setting setting, RunRequest request)
+    {
+        if (request.Engine is not (null or "dense"))
+            return Outcome<EngineChoice>.Failed([JudgementMessages.UnknownEngine(request.Engine)]);
+        EngineChoice choice = DenseEngine.Estimate(setting.Plan, Reason(setting, request));
+        double limit = Math.Min(request.MemoryLimit ?? (GC.GetGCMemoryInfo().TotalAvailableMemoryBytes * UsableMemory), DenseEngine.LargestMemory);
+        return choice.MemoryBytes > limit ? Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit)]) : Outcome<EngineChoice>.Of(choice);
+    }
+
+    /// <summary>Evaluates a setting for all private inputs.</summary>
+    public static Outcome<IReadOnlyList<Evaluation>> Evaluate(Setting setting, RunRequest request)
+    {
+        Outcome<EngineChoice> choice = Choose(setting, request);
+        if (choice.Value is not { } engine)
+            return Outcome<IReadOnlyList<Evaluation>>.Failed(choice.Findings);
+        Outcome<PreparedState> prepared = Resource.Prepare(setting.World.Resource, setting.Protocol.Holders.Count);
+        if (prepared.Value is not { } state)
+            return Outcome<IReadOnlyList<Evaluation>>.Failed(prepared.Findings);
+        Evaluation[] evaluations = [.. setting.InputAssignments().Select(i => Evaluate(setting, setting.Plan, state, i, engine, request))];
+        return evaluations.Any(e => !(e.Yield > 0))
+            ? Outcome<IReadOnlyList<Evaluation>>.Failed([JudgementMessages.NothingKept(setting.Words)])
+            : Outcome<IReadOnlyList<Evaluation>>.From(evaluations, prepared.Findings);
+    }
+
+    /// <summary>Evaluates one plan for one assignment of the private inputs.</summary>
+    public static Evaluation Evaluate(Setting setting, Plan plan, PreparedState state, IReadOnlyList<Value> inputs, EngineChoice engine, RunRequest request) =>
+        DenseEngine.Evaluate(plan, state, inputs, engine, setting.Matrices, request.Cancellation);
+
+    private static string Reason(Setting setting, RunRequest request)
+    {
+        string size = $"{setting.Protocol.Holders.Count} qudits of {setting.Protocol.Levels} levels fit in memory as a density operator";
+        return request.Engine is null ? $"{size}, so every outcome is followed exactly" : $"asked for; {size}";
+    }
+}

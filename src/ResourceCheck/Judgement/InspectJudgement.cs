@@ -1,0 +1,32 @@
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Scripts.Binding;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>From a setup to what <c>inspect</c> tells; of several parameter assignments the most expensive is shown.</summary>
+internal static class InspectJudgement
+{
+    public static Outcome<InspectResult> Of(Setup setup)
+    {
+        Setting setting = setup.Settings.MaxBy(s => Engines.Dense.DenseEngine.Estimate(s.Plan, "").MemoryBytes)!;
+        Outcome<EngineChoice> choice = Evaluator.Choose(setting, setup.Request);
+        EngineChoice engine = choice.Value ?? Engines.Dense.DenseEngine.Estimate(setting.Plan, choice.Findings[0].Message);
+        return Outcome<InspectResult>.Of(new InspectResult
+        {
+            Version = Provenance.Version,
+            Protocol = new InputFile(setup.Request.Script.Name, setup.Request.Script.Sha256),
+            Title = setting.Protocol.Name,
+            Conditions = Provenance.Conditions(setup),
+            Parameters = Provenance.Parameters(setup),
+            Parties = setting.Protocol.Parties,
+            Levels = setting.Protocol.Levels,
+            Knowledge = Knowledge.Of(setting.Protocol),
+            Timeline = Provenance.Schedule(setting),
+            Duration = setting.Plan.Duration.Seconds,
+            Engine = engine,
+            Requirements = [.. setting.Protocol.Requirements.Select(r => new RequirementLine(r.Text, r.Reason, r.Figures, r.Holds))],
+            Warnings = setup.Notes,
+        });
+    }
+}

@@ -1,0 +1,89 @@
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Quantities;
+using ResourceCheck.Scripts;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>Texts about parameter choices (P001 to P019) and about results that cannot be trusted or had (E001 to E019).</summary>
+internal static class JudgementMessages
+{
+    public static Diagnostic UnknownParameter(string name, IReadOnlyList<ParameterInfo> known) => Wrong(
+        "P001",
+        name,
+        known.Count == 0 ? $"`{name}` is no parameter: this script has none." : $"`{name}` is no parameter of this script: {Words.Or(known.Select(p => p.Name))} {(known.Count == 1 ? "fits" : "fit")} here.",
+        known.Count == 0 ? "leave --parameter out" : Words.DidYouMean(name, known.Select(p => p.Name)) ?? "`inspect` lists the parameters of a script");
+
+    public static Diagnostic UnreadableChoice(string name, string value) => Wrong(
+        "P002", name, $"`{value}` gives no value for {name}: a number, a fraction, a list such as 3,4, a range such as 3..8, or all fits here.", $"write for example --parameter {name}=3");
+
+    public static Diagnostic OutsideDomain(ParameterInfo parameter, Rational value) => Wrong(
+        "P003",
+        parameter.Name,
+        $"{parameter.Name} = {value} lies outside what the script allows: {Domain(parameter)} fits here.",
+        "choose a value inside, or widen the domain in the script");
+
+    public static Diagnostic NoListedValues(ParameterInfo parameter) => Wrong(
+        "P004", parameter.Name, $"{parameter.Name} is a real range, so there is no list of all its values: numbers from {parameter.From} to {parameter.To} fit here.", "name the values you want, separated by commas");
+
+    public static Diagnostic TwiceChosen(string name) => Wrong(
+        "P005", name, $"{name} is given twice: one --parameter per name fits here.", "join the values with commas");
+
+    public static Diagnostic TooManyAssignments(double count, int most) => new(
+        "P006", Severity.Error, $"The parameter values make {count:R} combinations: up to {most} fit in one run.", "ask for fewer values at once", Place.Of("--parameter"));
+
+    public static Diagnostic BrokenRequirement(Scripts.Binding.Requirement requirement, SourceText source, string at) => new(
+        "P010",
+        Severity.Warning,
+        $"The script requires {requirement.Text}, but here {requirement.Figures}{(at.Length == 0 ? "" : $" ({at})")}: {requirement.Reason}.",
+        "choose parameters that meet the requirement; figures are shown all the same, its claims do not hold",
+        source.PlaceOf(requirement.Span));
+
+    public static Diagnostic MatrixSize(Place at, string file, int size, int levels) => new(
+        "P012", Severity.Error, $"The matrix in {file} is {size}×{size}, but each qudit here has {levels} levels: {levels}×{levels} fits here.", "give a matrix of that size, or change the number of parties", at);
+
+    public static Diagnostic NotUnitary(Place at, string file, double defect) => new(
+        "P013", Severity.Error, $"The matrix in {file} is not unitary: U†U differs from 1 by {FigureText.Number(defect)}, more than 1e-9.", "give every entry with all its digits", at);
+
+    public static Diagnostic DoesNotFit(EngineChoice choice, double limit) => new(
+        "E001",
+        Severity.Error,
+        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {FigureText.Bytes(limit)} may be used.",
+        "lower the number of parties, or avoid loss that is not heralded (it adds a level)",
+        Place.Of("engine"));
+
+    public static Diagnostic UnknownEngine(string name) => new(
+        "E002", Severity.Error, $"`{name}` is no engine: dense fits here.", "leave --engine out and the program chooses", Place.Of("--engine"));
+
+    public static Diagnostic NothingKept(string at) => new(
+        "E003",
+        Severity.Error,
+        $"No copy is kept{(at.Length == 0 ? "" : $" ({at})")}: every branch ends at a `keep`, a herald or a missing click, so there is no figure to give.",
+        "look at what `keep` asks for and at the transmission and efficiency of the conditions",
+        Place.Of("result"));
+
+    public static Diagnostic NotFinite(string name, string at) => new(
+        "E004",
+        Severity.Warning,
+        $"{name} is not defined{(at.Length == 0 ? "" : $" ({at})")}: its condition never holds, or it divides by zero.",
+        "look at the condition behind `given`, or at the divisor",
+        Place.Of("result"));
+
+    public static Diagnostic LevelsDiffer(string file, int parties) => new(
+        "E005", Severity.Error, $"The state of {file} does not fit the protocol: {parties} qudits of {parties} levels fit here.", "take a file of that size, or change the number of parties", Place.Of("resource.file"));
+
+    public static Diagnostic NoClaims(SourceText source) => new(
+        "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
+
+    public static Diagnostic OnlySeen(double seen) => new(
+        "E010",
+        Severity.Note,
+        $"Every figure is of the copies that all saw: a fraction {FigureText.Number(1 - seen)} of the copies had a measurement without a click and is dropped by announcement.",
+        "a script that mentions none handles missing clicks itself",
+        Place.Of("detection"));
+
+    private static string Domain(ParameterInfo parameter) =>
+        parameter.Values is { } values ? Words.Or(values.Select(v => v.ToString())) : $"a number from {parameter.From} to {parameter.To}";
+
+    private static Diagnostic Wrong(string code, string name, string message, string cure) => new(code, Severity.Error, message, cure, Place.Of($"--parameter {name}"));
+}

@@ -1,0 +1,64 @@
+using ResourceCheck.Engines;
+using ResourceCheck.Scripts.Binding;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>Puts the evaluations of all inputs and listed parameter values together: the least success, fidelity and yield, the greatest failure and abort, both ends of reports.</summary>
+internal static class MetricGathering
+{
+    public static IReadOnlyList<MetricResult> Metrics(IReadOnlyList<Evaluated> all)
+    {
+        List<MetricResult> metrics =
+        [
+            Worst("success", all, e => e.Success, greatest: false),
+            Worst("failure", all, e => e.Failure, greatest: true),
+            Worst("abort", all, e => e.Abort, greatest: true),
+        ];
+        foreach (string label in all.SelectMany(e => e.Setting.Protocol.Reports.Select(r => r.Label)).Distinct())
+            metrics.Add(Report(label, all));
+        return metrics;
+    }
+
+    public static IReadOnlyList<CheckpointResult> Checkpoints(IReadOnlyList<Evaluated> all) =>
+        [.. all.SelectMany(e => e.Actual.Checkpoints.Select(c => c.Label)).Distinct().Select(label => Checkpoint(label, all))];
+
+    public static YieldResult Yield(IReadOnlyList<Evaluated> all)
+    {
+        Evaluation worst = all.MinBy(e => e.Actual.Yield)!.Actual;
+        return new YieldResult(Estimate.Exact(worst.Yield), worst.Heralded, worst.Seen, worst.Kept, worst.Seen < 1 - 1e-12);
+    }
+
+    private static MetricResult Worst(string name, IReadOnlyList<Evaluated> all, Func<Evaluation, Estimate> figure, bool greatest)
+    {
+        Evaluated worst = all.MinBy(e => (greatest ? -1 : 1) * figure(e.Actual).Value)!;
+        return new MetricResult(name, figure(worst.Actual), figure(worst.Ideal).Value, Range(all.Select(e => figure(e.Actual).Value)), WorstAt(worst, all));
+    }
+
+    private static MetricResult Report(string label, IReadOnlyList<Evaluated> all)
+    {
+        MetricName name = new(MetricKind.Report, label);
+        Evaluated[] having = [.. all.Where(e => e.Figure(name) is not null)];
+        Evaluated least = having.MinBy(e => e.Figure(name)!.Value)!;
+        return new MetricResult(label, least.Figure(name)!, (least with { Actual = least.Ideal }).Figure(name)!.Value, Range(having.Select(e => e.Figure(name)!.Value)), WorstAt(least, all));
+    }
+
+    private static CheckpointResult Checkpoint(string label, IReadOnlyList<Evaluated> all)
+    {
+        (Evaluated worst, CheckpointEvaluation look) = all
+            .SelectMany(e => e.Actual.Checkpoints.Where(c => c.Label == label).Select(c => (e, c))).MinBy(pair => pair.c.Fidelity.Value);
+        double ideal = worst.Ideal.Checkpoints.First(c => c.Label == label).Fidelity.Value;
+        bool builtIn = worst.Actual.Checkpoints.Take(BuiltIn).Any(c => c.Label == label);
+        return new CheckpointResult(label, look.Fidelity, ideal, ideal - look.Fidelity.Value, look.Kept, look.At, look.Branches, builtIn);
+    }
+
+    /// <summary>prepared, stored, arrived.</summary>
+    private const int BuiltIn = 3;
+
+    private static (double Low, double High)? Range(IEnumerable<double> values)
+    {
+        double[] found = [.. values];
+        return found.Length < 2 ? null : (found.Min(), found.Max());
+    }
+
+    private static string? WorstAt(Evaluated worst, IReadOnlyList<Evaluated> all) => all.Count < 2 ? null : worst.At;
+}

@@ -1,0 +1,86 @@
+using ResourceCheck.Conditions;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Scripts.Binding;
+using ResourceCheck.Timeline;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>From a setup to the result document of <c>run</c>.</summary>
+internal static class RunJudgement
+{
+    public static Outcome<RunResult> Of(Setup setup)
+    {
+        List<Diagnostic> findings = [];
+        List<Evaluated> all = [];
+        foreach (Setting setting in setup.Settings)
+            all.AddRange(Evaluate(setting, setup.Request, findings));
+        if (findings.Any(f => f.Severity == Severity.Error))
+            return Outcome<RunResult>.Failed([.. findings.Distinct()]);
+        RunResult result = Conclude(setup, all);
+        return new Outcome<RunResult>(result, result.Warnings);
+    }
+
+    private static IEnumerable<Evaluated> Evaluate(Setting setting, RunRequest request, List<Diagnostic> findings)
+    {
+        Outcome<IReadOnlyList<Evaluation>> actual = Evaluator.Evaluate(setting, request);
+        findings.AddRange(actual.Findings);
+        if (actual.Value is not { } evaluations)
+            return [];
+        Outcome<IReadOnlyList<Evaluation>> ideal = setting.IsIdeal ? actual : Evaluator.Evaluate(setting.Idealised(), request);
+        findings.AddRange(ideal.Succeeded ? [] : ideal.Findings);
+        return ideal.Value is { } best ? evaluations.Zip(best, (a, i) => new Evaluated(setting, a, i)) : [];
+    }
+
+    private static RunResult Conclude(Setup setup, IReadOnlyList<Evaluated> all)
+    {
+        IReadOnlyList<(Goal Goal, GoalResult Result)> goals = GoalJudgement.Goals(all);
+        YieldResult yield = MetricGathering.Yield(all);
+        Setting longest = setup.Settings.MaxBy(s => s.Plan.Duration.Seconds)!;
+        return new RunResult
+        {
+            Version = Provenance.Version,
+            Protocol = new InputFile(setup.Request.Script.Name, setup.Request.Script.Sha256),
+            Title = setup.Settings[0].Protocol.Name,
+            Conditions = Provenance.Conditions(setup),
+            Overrides = setup.Request.Overrides,
+            Engine = all.MaxBy(e => e.Actual.Engine.MemoryBytes)!.Actual.Engine,
+            Seed = null,
+            Parameters = Provenance.Parameters(setup),
+            Cases = [new CaseResult("honest", [], MetricGathering.Metrics(all))],
+            Checkpoints = MetricGathering.Checkpoints(all),
+            Yield = yield,
+            Duration = longest.Plan.Duration.Seconds,
+            SecondsPerKeptCopy = SecondsPerKeptCopy(longest, yield),
+            Goals = [.. goals.Select(g => g.Result)],
+            Verdict = goals.Count == 0 ? Verdict.NoGoals : goals.All(g => g.Result.Met) ? Verdict.Met : Verdict.NotMet,
+            VerdictText = GoalJudgement.Sentence(goals, all),
+            Hint = Limits.Hint(goals, all, setup.Request),
+            Timeline = Provenance.Schedule(longest),
+            Warnings = [.. setup.Notes, .. Notes(all, yield)],
+        };
+    }
+
+    private static IEnumerable<Diagnostic> Notes(IReadOnlyList<Evaluated> all, YieldResult yield)
+    {
+        if (yield.OnlySeen)
+            yield return JudgementMessages.OnlySeen(yield.Seen);
+        foreach (Evaluated evaluated in all)
+        {
+            for (int i = 0; i < evaluated.Actual.Reports.Count; i++)
+            {
+                if (double.IsNaN(evaluated.Actual.Reports[i].Value))
+                    yield return JudgementMessages.NotFinite($"\"{evaluated.Setting.Protocol.Reports[i].Label}\"", evaluated.At);
+            }
+        }
+    }
+
+    /// <summary>Preparation and use of copies overlap, so the slower of the two sets the pace.</summary>
+    private static double? SecondsPerKeptCopy(Setting setting, YieldResult yield)
+    {
+        if (setting.World.Preparation is not { } preparation)
+            return null;
+        double period = 1 / (preparation.Attempts.PerSecond * preparation.Success.Value);
+        return Math.Max(period, setting.Plan.Duration.Seconds) / yield.Value.Value;
+    }
+}

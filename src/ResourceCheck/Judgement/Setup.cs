@@ -1,0 +1,63 @@
+using ResourceCheck.Conditions;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Quantities;
+using ResourceCheck.Resources;
+using ResourceCheck.Scripts;
+using ResourceCheck.Scripts.Binding;
+using ResourceCheck.Scripts.Syntax;
+using ResourceCheck.Timeline;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>Everything read and checked, nothing evaluated.</summary>
+/// <param name="Request">What was asked for.</param>
+/// <param name="Choices">Parameter assignments.</param>
+/// <param name="Document">The conditions; null when ideal.</param>
+/// <param name="Settings">One per parameter assignment.</param>
+/// <param name="Notes">Warnings and notes so far.</param>
+internal sealed record Setup(
+    RunRequest Request, ParameterChoices Choices, ConditionsDocument? Document, IReadOnlyList<Setting> Settings, IReadOnlyList<Diagnostic> Notes)
+{
+    /// <summary>Reads and checks a request; every mistake of every input is reported together.</summary>
+    public static Outcome<Setup> From(RunRequest request)
+    {
+        List<Diagnostic> findings = [];
+        (ScriptTree tree, IReadOnlyList<Diagnostic> formFindings) = Script.Parse(new SourceText(request.Script.Name, request.Script.Text));
+        findings.AddRange(formFindings);
+        (ParameterChoices choices, IReadOnlyList<Diagnostic> choiceFindings) = ParameterChoices.From(Script.ParametersOf(tree), request.Parameters);
+        Outcome<ConditionsDocument>? document = ReadConditions(request);
+        List<Setting> settings = [];
+        foreach (IReadOnlyDictionary<string, Rational> assignment in choices.Assignments)
+            AddSetting(tree, assignment, document, settings, findings);
+        findings.AddRange(document?.Findings ?? []);
+        findings.AddRange(choiceFindings);
+        IReadOnlyList<Diagnostic> told = [.. findings.Distinct()];
+        return Outcome<Setup>.From(new Setup(request, choices, document?.Value, settings, told), told);
+    }
+
+    private static Outcome<ConditionsDocument>? ReadConditions(RunRequest request)
+    {
+        if (request.Conditions is { } file)
+            return ConditionsFile.Read(file.Name, file.Text, request.Overrides);
+        return request.Overrides.Count > 0 ? ConditionsFile.Read("--set", "{}", request.Overrides) : null;
+    }
+
+    private static void AddSetting(
+        ScriptTree tree, IReadOnlyDictionary<string, Rational> assignment, Outcome<ConditionsDocument>? document, List<Setting> settings, List<Diagnostic> findings)
+    {
+        Outcome<Protocol> protocol = Script.Bind(tree, assignment);
+        findings.AddRange(protocol.Findings);
+        if (protocol.Value is not { } checkedProtocol)
+            return;
+        Outcome<World>? world = document?.Value is { } read ? ConditionsFile.Bind(read, checkedProtocol) : null;
+        findings.AddRange(world?.Findings ?? []);
+        (IReadOnlyDictionary<string, System.Numerics.Complex[,]> matrices, IReadOnlyList<Diagnostic> matrixFindings) = ScriptMatrices.Read(checkedProtocol);
+        findings.AddRange(matrixFindings);
+        if (world is { Succeeded: false } || matrixFindings.Count > 0)
+            return;
+        World found = world?.Value ?? World.Ideal(checkedProtocol.Parties.Count, checkedProtocol.Levels);
+        Setting setting = new(assignment, checkedProtocol, found, Planner.Lay(checkedProtocol, found), matrices);
+        findings.AddRange(checkedProtocol.Requirements.Where(r => !r.Holds).Select(r => JudgementMessages.BrokenRequirement(r, checkedProtocol.Source, setting.Words)));
+        settings.Add(setting);
+    }
+}

@@ -1,0 +1,70 @@
+using ResourceCheck.Engines;
+using ResourceCheck.Judgement;
+using ResourceCheck.Quantities;
+
+namespace ResourceCheck.Reports;
+
+/// <summary>One figure of a run: a row of every table that shows it.</summary>
+/// <param name="Case">Case it belongs to.</param>
+/// <param name="Quantity">Its name in files.</param>
+/// <param name="Title">Its name for people.</param>
+/// <param name="Kind">What sort of figure, where the name does not say it.</param>
+/// <param name="Unit">Its unit.</param>
+/// <param name="Estimate">Value, label and interval.</param>
+/// <param name="Ideal">The same under ideal conditions; null where that says nothing.</param>
+/// <param name="Lost">Ideal minus value; null where that says nothing.</param>
+/// <param name="Note">What must be known with it.</param>
+/// <param name="Prominent">Whether the short table for people shows it.</param>
+internal sealed record Figure(
+    string Case, string Quantity, string Title, string Kind, string Unit, Estimate Estimate, double? Ideal, double? Lost, string Note, bool Prominent)
+{
+    private const string Honest = "honest";
+
+    /// <summary>All figures of a run: fidelities on the way, metrics of each case, kept copies, times.</summary>
+    public static IReadOnlyList<Figure> AllOf(RunResult run) =>
+    [
+        .. run.Checkpoints.Select(c => OfCheckpoint(c, run)),
+        .. run.Cases.SelectMany(c => c.Metrics.Select(m => OfMetric(c, m, run))),
+        OfYield(run.Yield),
+        OfTime("duration", "time per copy", run.Duration),
+        .. run.SecondsPerKeptCopy is { } seconds ? [OfTime("seconds per kept copy", "time until the next kept copy", seconds)] : Array.Empty<Figure>(),
+    ];
+
+    private static Figure OfCheckpoint(CheckpointResult checkpoint, RunResult run) => new(
+        Honest, checkpoint.Name, checkpoint.Name, "fidelity", FigureText.One, checkpoint.Fidelity, checkpoint.Ideal, checkpoint.Loss,
+        Join(KeptNote(checkpoint.Kept, run.Yield.Value.Value), SeenNote(run)), !checkpoint.BuiltIn);
+
+    private static Figure OfMetric(CaseResult of, MetricResult metric, RunResult run) => new(
+        of.Case, metric.Name, of.Case == Honest ? metric.Name : $"{metric.Name} \"{of.Case}\"", of.Dishonest.Count == 0 ? "" : $"by {string.Join(", ", of.Dishonest)}",
+        FigureText.One, metric.Estimate, metric.Ideal, null, Join(RangeNote(metric), PresentNote(metric.Estimate), SeenNote(run)), !IsIdleAbort(metric));
+
+    private static Figure OfYield(YieldResult yield) =>
+        new(Honest, "yield", "copies kept", "", FigureText.One, yield.Value, null, null, FactorNote(yield), true);
+
+    private static Figure OfTime(string quantity, string title, double seconds) =>
+        new(Honest, quantity, title, "", "s", Estimate.Exact(seconds), null, null, "", true);
+
+    // A protocol in which nobody can give up needs no line that says so.
+    private static bool IsIdleAbort(MetricResult metric) => metric is { Name: "abort", Estimate: { Label: TruthLabel.Exact, Value: 0 } };
+
+    private static string RangeNote(MetricResult metric) => Join(
+        metric.WorstAt is { Length: > 0 } at ? $"worst at {at}" : "",
+        metric.Range is { } range ? $"from {FigureText.Number(range.Low)} to {FigureText.Number(range.High)}" : "");
+
+    private static string PresentNote(Estimate estimate) => estimate.Present < 1 ? $"present in {FigureText.Number(estimate.Present)} of copies" : "";
+
+    private static string KeptNote(double kept, double yield) =>
+        kept < 1 && Math.Abs(kept - yield) > 1e-12 ? $"{FigureText.Number(kept)} of copies kept so far" : "";
+
+    private static string FactorNote(YieldResult yield) => Join(
+        yield.Heralded < 1 ? $"{FigureText.Number(yield.Heralded)} arrive" : "",
+        yield.Seen < 1 ? $"{FigureText.Number(yield.Seen)} are seen by all" : "",
+        yield.Kept < 1 ? $"{FigureText.Number(yield.Kept)} are kept by the script" : "");
+
+    private static string SeenNote(RunResult run) => run.Yield.OnlySeen ? OnlySeen : "";
+
+    /// <summary>The note on figures from which copies without a click were dropped.</summary>
+    public const string OnlySeen = "of the copies that all saw";
+
+    private static string Join(params IEnumerable<string> notes) => string.Join("; ", notes.Where(n => n.Length > 0));
+}

@@ -1,0 +1,40 @@
+using System.Globalization;
+using ResourceCheck.Engines;
+using ResourceCheck.Judgement;
+
+namespace ResourceCheck.Reports;
+
+/// <summary>Where numbers come from, in lines.</summary>
+internal static class Provenance
+{
+    private const int ShownHash = 16;
+
+    /// <summary>Of a run.</summary>
+    public static IReadOnlyList<string> Of(RunResult run) =>
+    [
+        Inputs(run.Version, run.Title, run.Protocol, run.Conditions, ideal: "ideal conditions"),
+        .. run.Overrides.Select(o => $"Set: {o.Key} = {o.Value}"),
+        .. Parameters(run.Parameters),
+        Engine(run.Engine) + (run.Seed is { } seed ? string.Create(CultureInfo.InvariantCulture, $"; seed {seed}") : ""),
+    ];
+
+    /// <summary>Of a verification.</summary>
+    public static IReadOnlyList<string> Of(VerifyResult verification) =>
+        [Inputs(verification.Version, verification.Title, verification.Protocol, null, ideal: "ideal conditions")];
+
+    /// <summary>Of an inspection.</summary>
+    public static IReadOnlyList<string> Of(InspectResult inspection) =>
+        [Inputs(inspection.Version, inspection.Title, inspection.Protocol, inspection.Conditions, ideal: "ideal conditions"), .. Parameters(inspection.Parameters)];
+
+    /// <summary>A file and the start of its hash.</summary>
+    public static string File(string name, string sha256) => $"{name} (SHA-256 {sha256[..Math.Min(ShownHash, sha256.Length)]})";
+
+    private static string Inputs(string version, string title, InputFile protocol, InputFile? conditions, string ideal) =>
+        $"ResourceCheck {version}; \"{title}\" from {File(protocol.Name, protocol.Sha256)}; "
+        + (conditions is null ? ideal : $"under {File(conditions.Name, conditions.Sha256)}");
+
+    private static string Engine(EngineChoice engine) => $"Engine {engine.Name}: {engine.Reason.TrimEnd('.')}";
+
+    private static IEnumerable<string> Parameters(IReadOnlyList<ParameterUse> parameters) => parameters.Count == 0 ? [] :
+        [$"Parameters: {string.Join("; ", parameters.Select(p => $"{p.Name} = {string.Join(", ", p.Values)}{(p.IsDefault ? " (default)" : "")}"))}"];
+}

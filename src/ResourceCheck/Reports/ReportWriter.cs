@@ -1,0 +1,47 @@
+using ResourceCheck.Judgement;
+using ResourceCheck.Resources;
+
+namespace ResourceCheck.Reports;
+
+/// <summary>Writes results. The same result gives the same text, whatever the machine's culture.</summary>
+public static class ReportWriter
+{
+    /// <summary>Writes the result of <c>run</c>.</summary>
+    /// <param name="result">What to write.</param>
+    /// <param name="format">How.</param>
+    /// <param name="writer">Where to.</param>
+    /// <param name="colour">Whether text may mark the verdict by colour: only for a terminal.</param>
+    public static void Write(RunResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => RunReport.From(result), () => RunDocument.Write(result, writer));
+
+    /// <summary>Writes the result of <c>verify</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(VerifyResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => VerifyReport.From(result), () => VerifyDocument.Write(result, writer));
+
+    /// <summary>Writes the result of <c>inspect</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(InspectResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => InspectReport.From(result), () => InspectDocument.Write(result, writer));
+
+    /// <summary>Writes the result of <c>state</c> with the program's version, which a state's description does not hold.</summary>
+    public static void Write(StateDescription result, string version, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => StateReport.From(result, version), () => StateDocument.Write(result, version, writer));
+
+    private static void Write(ReportFormat format, TextWriter writer, bool colour, Func<Report> build, Action writeDocument)
+    {
+        switch (format)
+        {
+            case ReportFormat.Json:
+                writeDocument();
+                break;
+            case ReportFormat.Csv:
+                CsvReport.Write(build(), writer);
+                break;
+            case ReportFormat.Markdown:
+                MarkdownReport.Write(build(), writer);
+                break;
+            default:
+                TextReport.Write(build(), writer, colour);
+                break;
+        }
+    }
+}

@@ -1,0 +1,104 @@
+using System.Text.Json;
+using ResourceCheck.Judgement;
+
+namespace ResourceCheck.Reports;
+
+/// <summary>The JSON document of <c>run</c>; docs/schema/result.schema.json describes it.</summary>
+internal static class RunDocument
+{
+    /// <summary>Writes the document.</summary>
+    public static void Write(RunResult run, TextWriter writer) => JsonParts.WriteDocument(writer, "result", run.Version, json =>
+    {
+        json.WriteString("verdict", Name(run.Verdict));
+        json.WriteString("verdictText", run.VerdictText);
+        json.WriteString("hint", run.Hint);
+        JsonParts.Protocol(json, run.Protocol, run.Title);
+        JsonParts.Conditions(json, run.Conditions, run.Overrides);
+        JsonParts.Engine(json, run.Engine);
+        Seed(json, run.Seed);
+        JsonParts.Parameters(json, run.Parameters);
+        JsonParts.Objects(json, "cases", run.Cases, c => Case(json, c));
+        JsonParts.Objects(json, "checkpoints", run.Checkpoints, c => Checkpoint(json, c));
+        JsonParts.Object(json, "yield", () => Yield(json, run.Yield));
+        JsonParts.Object(json, "copies", () => JsonParts.Number(json, "secondsPerKept", run.SecondsPerKeptCopy));
+        JsonParts.Number(json, "duration", run.Duration);
+        JsonParts.Objects(json, "goals", run.Goals, g => Goal(json, g));
+        JsonParts.Objects<object>(json, "claims", [], _ => { });
+        JsonParts.Objects<object>(json, "sources", [], _ => { });
+        JsonParts.Timeline(json, run.Timeline);
+        JsonParts.Warnings(json, run.Warnings);
+    });
+
+    private static string Name(Verdict verdict) => verdict switch
+    {
+        Verdict.Met => "met",
+        Verdict.NotMet => "not met",
+        _ => "no goals",
+    };
+
+    private static void Seed(Utf8JsonWriter json, long? seed)
+    {
+        if (seed is { } number)
+            json.WriteNumber("seed", number);
+        else
+            json.WriteNull("seed");
+    }
+
+    private static void Case(Utf8JsonWriter json, CaseResult of)
+    {
+        json.WriteString("case", of.Case);
+        JsonParts.Array(json, "dishonest", of.Dishonest, json.WriteStringValue);
+        JsonParts.Objects(json, "metrics", of.Metrics, m => Metric(json, m));
+    }
+
+    private static void Metric(Utf8JsonWriter json, MetricResult metric)
+    {
+        json.WriteString("name", metric.Name);
+        JsonParts.EstimateFields(json, metric.Estimate);
+        JsonParts.Number(json, "ideal", metric.Ideal);
+        if (metric.Range is { } range)
+        {
+            JsonParts.Object(json, "range", () =>
+            {
+                JsonParts.Number(json, "low", range.Low);
+                JsonParts.Number(json, "high", range.High);
+            });
+        }
+        else
+        {
+            json.WriteNull("range");
+        }
+
+        json.WriteString("worstAt", metric.WorstAt);
+    }
+
+    private static void Checkpoint(Utf8JsonWriter json, CheckpointResult checkpoint)
+    {
+        json.WriteString("name", checkpoint.Name);
+        json.WriteBoolean("builtIn", checkpoint.BuiltIn);
+        JsonParts.Object(json, "fidelity", () => JsonParts.EstimateFields(json, checkpoint.Fidelity));
+        JsonParts.Number(json, "ideal", checkpoint.Ideal);
+        JsonParts.Number(json, "loss", checkpoint.Loss);
+        JsonParts.Number(json, "kept", checkpoint.Kept);
+        JsonParts.Number(json, "at", checkpoint.At);
+        JsonParts.Branches(json, "branches", checkpoint.Branches);
+    }
+
+    private static void Yield(Utf8JsonWriter json, YieldResult yield)
+    {
+        JsonParts.EstimateFields(json, yield.Value);
+        JsonParts.Number(json, "heralded", yield.Heralded);
+        JsonParts.Number(json, "seen", yield.Seen);
+        JsonParts.Number(json, "kept", yield.Kept);
+        json.WriteBoolean("onlySeen", yield.OnlySeen);
+    }
+
+    private static void Goal(Utf8JsonWriter json, GoalResult goal)
+    {
+        json.WriteString("text", goal.Text);
+        JsonParts.EstimateFields(json, goal.Value);
+        JsonParts.Number(json, "threshold", goal.Threshold);
+        json.WriteBoolean("met", goal.Met);
+        JsonParts.Number(json, "margin", goal.Margin);
+    }
+}

@@ -1,0 +1,139 @@
+using ResourceCheck.Engines;
+using ResourceCheck.Judgement;
+
+namespace ResourceCheck.Reports;
+
+/// <summary>The report of <c>run</c>: verdict, figures, fidelity by outcome, goals.</summary>
+internal static class RunReport
+{
+    private const int ShownBranches = 8;
+
+    /// <summary>Branches closer than this are the same for anybody who would choose between them.</summary>
+    private const double SameFidelity = 1e-6;
+
+    /// <summary>Builds the report.</summary>
+    public static Report From(RunResult run)
+    {
+        IReadOnlyList<Figure> figures = Figure.AllOf(run);
+        return new Report(
+            run.VerdictText,
+            run.Verdict switch { Verdict.Met => true, Verdict.NotMet => false, _ => null },
+            [
+                new Section(null, Short(figures, run), Remarks(run)),
+                .. Goals(run),
+                .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
+                .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
+            ],
+            Long(figures),
+            Provenance.Of(run),
+            run.Warnings);
+    }
+
+    private static Table Short(IReadOnlyList<Figure> figures, RunResult run) => new(
+        [
+            new("name", "Figure"),
+            new("kind", "Kind"),
+            new("value", "Value"),
+            new("label", "Label"),
+            new("ideal", "Ideal", Lead: "ideal "),
+            new("lost", "Lost", Lead: "lost "),
+            new("note", "Note"),
+        ],
+        [.. figures.Where(f => f.Prominent).Select(f => (IReadOnlyList<Cell>)
+        [
+            Cell.Of(f.Title),
+            Cell.Of(f.Kind),
+            Truth.CellOf(f.Estimate, f.Unit),
+            f.Unit == "s" ? Cell.Empty : Cell.Of(Truth.Describe(f.Estimate)),
+            Cell.Of(f.Ideal),
+            f.Lost is { } lost ? Truth.LessThan(f.Estimate, lost) : Cell.Empty,
+            Cell.Of(ShortNote(f.Note, run)),
+        ])],
+        Headed: false);
+
+    // Said once below the table, not in every row of it.
+    private static string ShortNote(string note, RunResult run) =>
+        run.Yield.OnlySeen ? string.Join("; ", note.Split("; ").Where(n => n != Figure.OnlySeen)) : note;
+
+    private static Table Long(IReadOnlyList<Figure> figures) => new(
+        [
+            new("case", "Case", Legend: "honest or the name of a dishonest block"),
+            new("quantity", "Quantity", Legend: "metric or checkpoint"),
+            new("unit", "Unit"),
+            new("value", "Value"),
+            new("label", "Label", Legend: "exact, bound or sampled"),
+            new("low", "Low", Legend: "lower end; empty where there is none"),
+            new("high", "High", Legend: "upper end; empty where there is none"),
+            new("confidence", "Confidence"),
+            new("ideal", "Ideal", Legend: "the same under ideal conditions"),
+            new("note", "Note"),
+        ],
+        [.. figures.Select(LongRow)]);
+
+    private static IReadOnlyList<Cell> LongRow(Figure f) =>
+    [
+        Cell.Of(f.Case),
+        Cell.Of(f.Quantity),
+        Cell.Of(f.Unit),
+        Cell.Of(f.Estimate.Value, f.Unit),
+        Cell.Of(Truth.Name(f.Estimate.Label)),
+        Cell.Of(f.Estimate.Low, f.Unit),
+        Cell.Of(f.Estimate.High, f.Unit),
+        Cell.Of(f.Estimate.Confidence),
+        Cell.Of(f.Ideal),
+        Cell.Of(string.Join("; ", new[] { f.Kind == "fidelity" ? "" : f.Kind, Truth.Side(f.Estimate) ?? "", NotFinite(f.Estimate), f.Note }.Where(n => n.Length > 0))),
+    ];
+
+    private static string NotFinite(Estimate estimate) =>
+        double.IsFinite(estimate.Value) ? "" : Quantities.FigureText.NonFinite(estimate.Value);
+
+    private static List<string> Remarks(RunResult run)
+    {
+        List<string> remarks = [];
+        CheckpointResult[] way = [.. run.Checkpoints.Where(c => c.BuiltIn)];
+        if (way.Length > 0)
+            remarks.Add($"Fidelity on the way: {string.Join(", ", way.Select(OnTheWay))}.");
+        if (run.Yield.OnlySeen)
+            remarks.Add($"Every figure is {Figure.OnlySeen}: copies in which a measurement did not click were dropped by announcement.");
+        return remarks;
+    }
+
+    private static string OnTheWay(CheckpointResult checkpoint)
+    {
+        string value = Truth.CellOf(checkpoint.Fidelity) is NumberCell cell ? Quantities.FigureText.Of(cell.Value, cell.Unit, cell.Rounding) : "";
+        return $"{checkpoint.Name} {value} ({Truth.Describe(checkpoint.Fidelity)})";
+    }
+
+    private static Section[] Goals(RunResult run) => run.Goals.Count == 0 ? [] :
+    [
+        new Section("Goals", new Table(
+            [new("goal", "Goal"), new("met", "Met"), new("value", "Value"), new("label", "Label"), new("margin", "Margin", Lead: "margin ")],
+            [.. run.Goals.Select(g => (IReadOnlyList<Cell>)
+            [
+                Cell.Of(g.Text), Cell.Of(g.Met ? "met" : "not met"), Truth.CellOf(g.Value), Cell.Of(Truth.Describe(g.Value)), Margin(g),
+            ])],
+            Headed: false), []),
+    ];
+
+    // A margin is the figure less the threshold for >= and the reverse for <=; which of the two tells a bound's side.
+    private static DifferenceCell Margin(GoalResult goal)
+    {
+        double above = goal.Value.Value - goal.Threshold;
+        return Math.Abs(above - goal.Margin) <= Math.Abs(above + goal.Margin) ? Truth.MoreThan(goal.Value, goal.Margin) : Truth.LessThan(goal.Value, goal.Margin);
+    }
+
+    private static bool Differ(IReadOnlyList<BranchEvaluation> branches)
+    {
+        double[] fidelities = [.. branches.Where(b => b is { Fidelity: not null, Probability: > 0 }).Select(b => b.Fidelity!.Value)];
+        return fidelities.Length > 1 && fidelities.Max() - fidelities.Min() > SameFidelity;
+    }
+
+    private static Section Branches(CheckpointResult checkpoint)
+    {
+        int hidden = checkpoint.Branches.Count - ShownBranches;
+        return new Section(
+            $"Fidelity \"{checkpoint.Name}\" by outcome",
+            BranchTable.Of(checkpoint.Branches.Take(ShownBranches)),
+            hidden > 0 ? [$"{hidden} more in the JSON document."] : []);
+    }
+}

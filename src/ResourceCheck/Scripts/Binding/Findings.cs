@@ -1,0 +1,56 @@
+using ResourceCheck.Diagnostics;
+
+namespace ResourceCheck.Scripts.Binding;
+
+/// <summary>A finding's code and words, before it has a place.</summary>
+/// <param name="Code">Stable code.</param>
+/// <param name="Text">One sentence.</param>
+/// <param name="Cure">What to do; null when the sentence says it.</param>
+internal readonly record struct Message(string Code, string Text, string? Cure = null);
+
+/// <summary>Gathers the findings of a script, each once although loops and actors repeat a line, and keeps names whose making failed.</summary>
+/// <param name="source">The script's text.</param>
+internal sealed class Findings(SourceText source)
+{
+    private readonly HashSet<(string Code, Span Span)> _seen = [];
+    private readonly List<(int Offset, Diagnostic Finding)> _found = [];
+    private readonly HashSet<string> _suspects = [];
+    private int _muted;
+
+    /// <summary>All findings in order of place; those without a line come first.</summary>
+    public IReadOnlyList<Diagnostic> All => [.. _found.OrderBy(f => f.Offset).Select(f => f.Finding)];
+
+    /// <summary>Whether nothing was found so far.</summary>
+    public bool IsEmpty => _found.Count == 0;
+
+    /// <summary>Adds a finding about a place of the script.</summary>
+    public void Report(Span span, Message message)
+    {
+        // What stands in a part that these parameter values switch off may be impossible only because of them.
+        if (_muted > 0 && BindingMessages.DependsOnParameters(message.Code))
+            return;
+        if (_seen.Add((message.Code, span)))
+            _found.Add((span.Start, From(message, source.PlaceOf(span))));
+    }
+
+    /// <summary>Adds a finding about a value given from outside the script.</summary>
+    public void Report(string input, Message message) => _found.Add((-1, From(message, Place.Of(input))));
+
+    /// <summary>Keeps a name from causing further findings.</summary>
+    public void Suspect(string name) => _suspects.Add(name);
+
+    /// <summary>Whether a name is known to be broken already; asking marks nothing.</summary>
+    public bool IsSuspect(string name) => _suspects.Contains(name);
+
+    /// <summary>Reports a finding about a name unless the name is broken already, and marks it as broken.</summary>
+    public void ReportName(string name, Span span, Message message)
+    {
+        if (_suspects.Add(name))
+            Report(span, message);
+    }
+
+    /// <summary>Silences findings that parameter values may cause, until the matching call with false.</summary>
+    public void Mute(bool on) => _muted += on ? 1 : -1;
+
+    private static Diagnostic From(Message message, Place place) => new(message.Code, Severity.Error, message.Text, message.Cure, place);
+}

@@ -1,0 +1,162 @@
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Judgement;
+using ResourceCheck.Resources;
+using ResourceCheck.Timeline;
+
+namespace ResourceCheck.Tests.Reports;
+
+/// <summary>Made-up results that use every field: the numbers mean nothing.</summary>
+internal static class Samples
+{
+    private const string Hash = "9f86d081884c7d659a2feaa0c55ad015a3bf4f1b2b0b822cd15d6c15b0f00a08";
+
+    public static Diagnostic Warning { get; } = new(
+        "C034", Severity.Warning, "`P[7]` is given a flight, but the protocol has 4 parties.", "leave it out, or raise n.", new Place("winter.conditions.json", 12, 5, "\"P[7]\": { }", 0, 6));
+
+    private static EngineChoice Engine { get; } = new("product", "every step acts on one qudit, so 4 small matrices a branch are enough.", 1_250_000, 4.2e7);
+
+    private static InputFile Script { get; } = new("removal.protocol", Hash);
+
+    private static IReadOnlyList<ScheduleLine> Timeline { get; } =
+    [
+        new(0, 2.94e-5, "Dov", TimelineKind.Flight, "flies 6 km", null),
+        new(2.94e-5, 3.44e-5, "Dov", TimelineKind.Detection, "measures fourier as k", null),
+        new(3.44e-5, 6.2e-5, "Dov", TimelineKind.Message, "k", "Ada"),
+        new(6.2e-5, 6.4e-5, "Ada", TimelineKind.Operation, "applies complement(fourier, k)", null),
+    ];
+
+    private static BranchEvaluation Branch(double probability, double? fidelity, params (string, string)[] outcomes) =>
+        new([.. outcomes.Select(o => new KeyValuePair<string, string>(o.Item1, o.Item2))], probability, fidelity);
+
+    private static CheckpointResult BuiltIn(string name, double fidelity, double at) => new(name, Estimate.Exact(fidelity), 1, 1 - fidelity, 0.81, at, [], true);
+
+    /// <summary>A goal missed, a bound, a sampled figure, a range, a cheat, dropped copies.</summary>
+    public static RunResult Full { get; } = new()
+    {
+        Version = "0.1.0",
+        Protocol = Script,
+        Title = "Party removal",
+        Conditions = new("winter.conditions.json", Hash),
+        Overrides = [new("flight.Dov.length", "5 km")],
+        Engine = Engine,
+        Seed = 1,
+        Parameters = [new("n", ["4"], true), new("x", ["0", "1"], false)],
+        Cases =
+        [
+            new("honest", [],
+            [
+                new("success", Estimate.Exact(0.94123456789), 1, (0.94123456789, 0.95), "x = 1"),
+                new("failure", Estimate.Exact(0.05876543211), 0, (0.05, 0.05876543211), "x = 1"),
+                new("abort", Estimate.Exact(0), 0, null, null),
+                new("mean of k", new(1.4962, TruthLabel.Sampled, 1.49021, 1.50219, 0.99, 0.97), 1.5, null, null),
+            ]),
+            new("split the receivers", ["Ada", "Ben"], [new("harm", Estimate.AtMost(0.155332982), 0, null, null)]),
+        ],
+        Checkpoints =
+        [
+            BuiltIn("prepared", 0.985, 0), BuiltIn("stored", 0.985, 0), BuiltIn("arrived", 0.9012345, 2.94e-5),
+            new("after removal", Estimate.AtLeast(0.871267), 1, 0.128733, 0.8123, 6.4e-5,
+            [
+                Branch(0.75, 0.8283560, ("Dov.k", "0"), ("Dov.note", "late")),
+                Branch(0.25, 0.999986, ("Dov.k", "1")),
+            ], false),
+        ],
+        Yield = new(Estimate.Exact(0.8123), 0.85, 0.9556470588235294, 1, true),
+        Duration = 6.4e-5,
+        SecondsPerKeptCopy = 0.000615536,
+        Goals = [new("\"after removal\" >= 0.90", Estimate.AtLeast(0.871267), 0.9, false, -0.028733), new("success >= 0.9", Estimate.Exact(0.94123456789), 0.9, true, 0.04123456789)],
+        Verdict = Verdict.NotMet,
+        VerdictText = "Goal not met: fidelity after removal is at least 0.871, the goal is 0.900.",
+        Hint = "Most is lost while Ada waits for Dov's message (0.061).",
+        Timeline = Timeline,
+        Warnings = [Warning],
+    };
+
+    /// <summary>No goals, no metrics, no checkpoints, ideal conditions.</summary>
+    public static RunResult Bare { get; } = Full with
+    {
+        Conditions = null,
+        Overrides = [],
+        Seed = null,
+        Parameters = [],
+        Cases = [new("honest", [], [])],
+        Checkpoints = [],
+        Yield = new(Estimate.Exact(1), 1, 1, 1, false),
+        Duration = 0,
+        SecondsPerKeptCopy = null,
+        Goals = [],
+        Verdict = Verdict.NoGoals,
+        VerdictText = "No goals are set.",
+        Hint = null,
+        Timeline = [],
+        Warnings = [],
+    };
+
+    /// <summary>Numbers that are none, and names that try to break each format.</summary>
+    public static RunResult Odd { get; } = Bare with
+    {
+        Title = "a | b\u001b[31m <b>*bold*</b>, \"quoted\"\u202e",
+        Cases =
+        [
+            new("honest", [],
+            [
+                new("success", new(double.NaN, TruthLabel.Sampled, double.NaN, double.NaN, 0.99), double.NaN, null, null),
+                new("a very long label, \"with\" quotes | pipes, <tags> & a line\nbreak that goes on for much longer than any column should be", Estimate.Exact(double.PositiveInfinity), null, null, null),
+                new("failure", Estimate.Exact(1.234e-15), 0, null, null),
+                new("almost one", Estimate.Exact(0.9999999867), 1, null, null),
+                new("=cmd()", Estimate.Exact(-2.5e7), null, (double.NegativeInfinity, -2.5e7), "x = 1/3"),
+            ]),
+        ],
+        Checkpoints = [new("[link](x) `code`", Estimate.Exact(0.9999999999999998), 1, 2.2e-16, 1, double.NaN, [], false)],
+        VerdictText = "No goals are set for \"a | b\u001b[31m\".",
+    };
+
+    /// <summary>One claim of each verdict.</summary>
+    public static VerifyResult Verification { get; } = new(
+        "0.1.0", Script, "Party removal",
+        [
+            new("success = 1", "n = 3", ClaimVerdict.Proved, 1, 1, [], null),
+            new("success = 1", "n = 4", ClaimVerdict.Refuted, 0.75, 1, [Branch(0.125, null, ("Dov.k", "1"), ("Ada.v", "2")), Branch(0.125, 0.5, ("Dov.k", "3"))], null),
+            new("guess(Dov.k from Ada.v) <= 1/3", "n = 4", ClaimVerdict.NotVerified, null, null, [], "9.1 GB are needed, 4 GB may be used"),
+            new("success = 1", "n = 2", ClaimVerdict.OutsideRequirements, null, null, [], "requirement n > 2"),
+        ],
+        ClaimVerdict.Refuted, [Warning]);
+
+    /// <summary>All that an inspection tells.</summary>
+    public static InspectResult Inspection { get; } = new()
+    {
+        Version = "0.1.0",
+        Protocol = Script,
+        Title = "Party removal",
+        Conditions = new("winter.conditions.json", Hash),
+        Parameters = [new("n", ["4"], true)],
+        Parties = ["Ada", "Ben", "Cyd", "Dov"],
+        Levels = 4,
+        Knowledge = [new(8, "Dov measures fourier as k", "Dov knows k"), new(9, "Dov announces k", "Ada, Ben, Cyd know Dov.k")],
+        Timeline = Timeline,
+        Duration = 6.4e-5,
+        Engine = Engine,
+        Requirements = [new("a < 1/3", "a third of the positions hold each value", "0.25 < 0.3333", true)],
+        Warnings = [Warning],
+    };
+
+    /// <summary>A state that was mended.</summary>
+    public static StateDescription State { get; } = new()
+    {
+        File = "three.npy",
+        Sha256 = Hash,
+        Parties = 3,
+        Levels = 3,
+        IsVector = false,
+        Validity = (1.2e-9, 3e-7, -0.0021),
+        Figures =
+        [
+            new("fidelity", 0.9512345, 0.950123, TruthLabel.Exact),
+            new("fidelity after local unitaries", 0.96789, 0.9671, TruthLabel.Bound),
+            new("purity", 0.91, 0.912, TruthLabel.Exact),
+        ],
+        Populations = [new("0-1-2", 0.1634), new("2-1-0", 0.16)],
+        MendedBy = 0.0042,
+    };
+}
