@@ -69,9 +69,6 @@ internal static class JudgementMessages
         "look at the condition behind `given`, or at the divisor",
         Place.Of("result"));
 
-    public static Diagnostic LevelsDiffer(string file, int parties) => new(
-        "E005", Severity.Error, $"The state of {file} does not fit the protocol: {parties} qudits of {parties} levels fit here.", "take a file of that size, or change the number of parties", Place.Of("resource.file"));
-
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
 

@@ -15,7 +15,10 @@ public static class Catalogue
         IReadOnlyList<Explanation>[] steps =
         [
             Scripts.SyntaxCatalogue.All,
+            Scripts.Binding.BindingCatalogue.All,
+            Conditions.ConditionsCatalogue.All,
             Resources.StateCatalogue.All,
+            Judgement.JudgementCatalogue.All,
             UsageCatalogue.All,
         ];
         return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];
