@@ -1,4 +1,8 @@
+using ResourceCheck.Conditions;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Resources;
+using ResourceCheck.Scripts;
+using ResourceCheck.Scripts.Binding;
 
 namespace ResourceCheck.Reports;
 
@@ -14,8 +18,10 @@ public static class Catalogue
     {
         IReadOnlyList<Explanation>[] steps =
         [
-            Scripts.SyntaxCatalogue.All,
-            Resources.StateCatalogue.All,
+            SyntaxCatalogue.All,
+            BindingCatalogue.All,
+            ConditionsCatalogue.All,
+            StateCatalogue.All,
             UsageCatalogue.All,
         ];
         return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];
