@@ -12,7 +12,6 @@ internal static class JudgementCatalogue
         new("E002", "unknown engine", "The engine named with --engine does not exist.", "Leave --engine out; the program chooses and says why.", "--engine fast"),
         new("E003", "nothing kept", "No copy survives: a `keep` that never holds, a transmission of 0 on a heralded flight, or detectors that never click.", "Look at the keeps of the script and at transmission, efficiency and dark counts of the conditions."),
         new("E004", "undefined figure", "A figure divides by zero or is asked for copies that never occur, such as probability(A given B) with B impossible, or a Bell value at a checkpoint where a party holds no qudit.", "Change the condition behind `given`, or give the figure a case in which it is defined."),
-        new("E010", "of the copies that all saw", "Some measurement gave no click. The script does not mention `none`, so such copies are dropped by announcement and every figure is of the others.", "Nothing, if that is what you mean; else handle `none` in the script."),
         new("P001", "unknown parameter", "--parameter names something that the script does not declare.", "Use a declared name; `inspect` lists them.", "--parameter m=3"),
         new("P002", "unreadable value", "The value of --parameter is no number, fraction, list, range or `all`.", "Write a number, 1/3, 3,4 or 3..8.", "--parameter n=three"),
         new("P003", "outside the domain", "The script limits the values of this parameter.", "Choose a value inside, or widen the domain in the script.", "--parameter n=40"),
