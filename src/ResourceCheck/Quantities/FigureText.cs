@@ -14,6 +14,7 @@ internal static class FigureText
     /// <summary>Exact engines add up to some thousand rounded terms; a distance from 1 below this is theirs and not the protocol's.</summary>
     private const double RoundOff = 1e-12;
 
+    private const int RoundOffDecimals = 12;
     private const double LeastFixed = 1e-4;
     private const double GreatestFixed = 1e6;
     private const double GreatestWhole = 1e15;
@@ -52,7 +53,8 @@ internal static class FigureText
     }
 
     /// <summary>A difference of two figures of order one, so that rounding errors of the two do not show.</summary>
-    public static string Difference(double value, Rounding rounding = Rounding.Nearest) => Math.Abs(value) < RoundOff ? "0" : Number(value, rounding);
+    public static string Difference(double value, Rounding rounding = Rounding.Nearest) =>
+        Math.Abs(value) < RoundOff ? "0" : Number(rounding == Rounding.Nearest && Math.Abs(value) < 1 ? Math.Round(value, RoundOffDecimals) : value, rounding);
 
     /// <summary>A rough size, such as an estimated amount of work.</summary>
     public static string About(double value) =>
@@ -68,6 +70,10 @@ internal static class FigureText
         int i = Array.FindIndex(TimesFrom, from => Math.Abs(seconds) >= from);
         return $"{Trim(Number(seconds / Times[i].Size))} {Times[i].Name}";
     }
+
+    /// <summary>An estimated time, with two digits.</summary>
+    public static string AboutTime(double seconds) =>
+        Time(double.IsFinite(seconds) ? double.Parse(seconds.ToString("E1", CultureInfo.InvariantCulture), CultureInfo.InvariantCulture) : seconds);
 
     /// <summary>A memory size in decimal units.</summary>
     public static string Bytes(double bytes)

@@ -1,4 +1,9 @@
+using ResourceCheck.Conditions;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement;
+using ResourceCheck.Resources;
+using ResourceCheck.Scripts;
+using ResourceCheck.Scripts.Binding;
 
 namespace ResourceCheck.Reports;
 
@@ -14,8 +19,11 @@ public static class Catalogue
     {
         IReadOnlyList<Explanation>[] steps =
         [
-            Scripts.SyntaxCatalogue.All,
-            Resources.StateCatalogue.All,
+            SyntaxCatalogue.All,
+            BindingCatalogue.All,
+            ConditionsCatalogue.All,
+            StateCatalogue.All,
+            JudgementCatalogue.All,
             UsageCatalogue.All,
         ];
         return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];

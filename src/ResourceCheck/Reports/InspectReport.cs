@@ -44,7 +44,7 @@ internal static class InspectReport
 
     private static string Cost(EngineChoice engine) =>
         $"Engine {engine.Name}: {engine.Reason.TrimEnd('.')}. It would take {FigureText.Bytes(engine.MemoryBytes)} of memory and "
-        + $"about {FigureText.About(engine.Work)} multiplications, some {FigureText.Time(engine.Work / MultiplicationsPerSecond)} on one core.";
+        + $"about {FigureText.About(engine.Work)} multiplications, some {FigureText.AboutTime(engine.Work / MultiplicationsPerSecond)} on one core.";
 
     private static Section[] Some(string title, Table table) => table.Rows.Count == 0 ? [] : [new Section(title, table, [])];
 

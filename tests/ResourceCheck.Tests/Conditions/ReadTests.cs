@@ -86,6 +86,15 @@ public sealed class ReadTests
     public void A_slip_that_removes_a_speed_does_not_also_count_as_a_missing_speed() =>
         Assert.Equal("C010", Assert.Single(Findings("""{ "flight": { "length": "2 km", "sped": "2e8 m/s" } }""")).Code);
 
+    [Fact]
+    public void Every_conditions_file_that_the_project_ships_is_read_without_a_finding()
+    {
+        string root = Path.Combine(ConditionsCase.Folder, "..", "..", "..", "..");
+        string[] files = [.. Directory.GetFiles(Path.Combine(root, "protocols"), "*.conditions.json"), .. Directory.GetFiles(Path.Combine(root, "tests", "reference", "cases"), "*.conditions.json")];
+        Assert.NotEmpty(files);
+        Assert.All(files, file => Assert.Equal("", string.Join("\n", ConditionsFile.Read(file, File.ReadAllText(file), []).Findings)));
+    }
+
     private static ConditionsDocument Read(string text, params (string Path, string Value)[] overrides)
     {
         Outcome<ConditionsDocument> outcome = ConditionsFile.Read("valley.conditions.json", text, [.. overrides.Select(o => KeyValuePair.Create(o.Path, o.Value))]);

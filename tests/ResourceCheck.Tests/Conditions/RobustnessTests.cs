@@ -23,7 +23,7 @@ public sealed class RobustnessTests
     [Property(MaxTest = 2000)]
     public void Random_text_never_throws(string? text) => Handle(text ?? "", []);
 
-    [Property(MaxTest = 3000)]
+    [Property(MaxTest = 1000)]
     public Property Random_trees_of_known_words_never_throw() => Prop.ForAll(Tree(5).ToArbitrary(), text => Handle(text, []));
 
     [Property(MaxTest = 2000)]
@@ -34,7 +34,7 @@ public sealed class RobustnessTests
     [Property(MaxTest = 1000)]
     public void Random_paths_never_throw(string? path, string? value) => Handle("{}", [KeyValuePair.Create(path ?? "", value ?? "")]);
 
-    [Property(MaxTest = 1000)]
+    [Property(MaxTest = 300)]
     public Property Files_made_from_the_table_never_throw() => Prop.ForAll(RandomConditions.File.ToArbitrary(), file => Handle(file.ToString(), []));
 
     [Property(MaxTest = 1000)]

@@ -62,7 +62,7 @@ public sealed class SchemaTests
         Assert.NotEmpty(Schema.Validate(text));
     }
 
-    [Property(MaxTest = 300)]
+    [Property(MaxTest = 150)]
     public Property Files_made_from_the_table_fit_the_schema_and_are_refused_only_for_what_keys_say_together() => Prop.ForAll(RandomConditions.File.ToArbitrary(), file =>
     {
         Assert.Empty(Schema.Validate(file));

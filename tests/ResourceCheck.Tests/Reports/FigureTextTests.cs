@@ -47,7 +47,7 @@ public sealed class FigureTextTests
     public void Memory_sizes_carry_a_unit_that_suits_them(double bytes, string shown) => Assert.Equal(shown, FigureText.Bytes(bytes));
 
     [Fact]
-    public void Round_off_of_a_difference_does_not_show() => Assert.Equal(("0", "0.1288"), (FigureText.Difference(2.2e-16), FigureText.Difference(0.12876)));
+    public void Round_off_of_a_difference_does_not_show() => Assert.Equal(("0", "0.1288", "0.2"), (FigureText.Difference(2.2e-16), FigureText.Difference(0.12876), FigureText.Difference(1 - 0.8)));
 
     [Property(MaxTest = 2000)]
     public bool A_bound_is_never_shown_better_than_it_is(double value, int scale)

@@ -1,3 +1,6 @@
+using MathNet.Numerics.Optimization;
+using MathVector = MathNet.Numerics.LinearAlgebra.Vector<double>;
+
 namespace ResourceCheck.Engines.Figures;
 
 /// <summary>
@@ -16,11 +19,16 @@ internal static class ChshOptimum
     /// <summary>Rounds of alternating maximisation from every start: enough to tell the hills apart.</summary>
     private const int FirstRounds = 40;
 
-    /// <summary>Rounds for the best start: convergence is linear and slow where settings nearly coincide.</summary>
-    private const int LastRounds = 50_000;
+    /// <summary>Simplex searches in a row from the best climb: alternation crawls along ridges where settings nearly coincide, a fresh simplex does not.</summary>
+    private const int Polishes = 4;
 
-    /// <summary>Gain per round below which a climb has ended.</summary>
-    private const double Standstill = 1e-16;
+    private const int PolishSteps = 4000;
+    private const double PolishTolerance = 1e-13;
+
+    /// <summary>Hills polished: the highest after the first climbs need not be the highest in the end.</summary>
+    private const int Polished = 6;
+
+    private const int Starts = 26;
 
     /// <summary>Observables per party: σx, σy, σz, anything else, identity.</summary>
     private const int Observables = 5;
@@ -75,20 +83,10 @@ internal static class ChshOptimum
         return q + (2 * p * Math.Cos(phi + (2 * Math.PI / 3)));
     }
 
-    private static double Search(double[,] t, double[] a, double[] b)
-    {
-        (double Value, double[] M, double[] Other) best = (double.NegativeInfinity, Directions[0], Directions[0]);
-        foreach (double[] m in Directions)
-        {
-            foreach (double[] other in Directions)
-            {
-                (double Value, double[] M, double[] Other) found = Climb(t, a, b, m, other, FirstRounds);
-                best = found.Value > best.Value ? found : best;
-            }
-        }
-
-        return Climb(t, a, b, best.M, best.Other, LastRounds).Value;
-    }
+    private static double Search(double[,] t, double[] a, double[] b) =>
+        Directions.SelectMany(m => Directions.Select(other => Climb(t, a, b, m, other, FirstRounds)))
+            .OrderByDescending(c => c.Value).DistinctBy(c => Math.Round(c.Value, 6)).Take(Polished)
+            .Max(c => Polish(t, a, b, c.Value, c.M, c.Other));
 
     private static (double Value, double[] M, double[] Other) Climb(double[,] t, double[] a, double[] b, double[] m, double[] m2, int rounds)
     {
@@ -100,13 +98,50 @@ internal static class ChshOptimum
             m = Direction(Sum(Times(t, Sum(n, n2, 1), true), b, 2), out double first);
             m2 = Direction(Times(t, Sum(n, n2, -1), true), out double second);
             double next = first + second + (2 * Dot(n, a));
-            if (next - value < Standstill)
-                return (next, m, m2);
             value = next;
         }
 
         return (value, m, m2);
     }
+
+    /// <summary>Nelder–Mead over the four angles of one party's settings, the other party's being closed forms.</summary>
+    private static double Polish(double[,] t, double[] a, double[] b, double value, double[] m, double[] m2)
+    {
+        MathVector angles = MathVector.Build.Dense([.. Angles(m), .. Angles(m2)]);
+        IObjectiveFunction less = ObjectiveFunction.Value(x => -Value(t, a, b, Unit(x[0], x[1]), Unit(x[2], x[3])));
+        for (int i = 0; i < Polishes; i++)
+        {
+            MathVector steps = MathVector.Build.Dense(4, Math.Pow(10, -1 - i));
+            MinimizationResult found = Minimise(less, angles, steps);
+            angles = found.MinimizingPoint;
+            value = Math.Max(value, -found.FunctionInfoAtMinimum.Value);
+        }
+
+        return value;
+    }
+
+    /// <summary>An exhausted search is no failure: what it has found is attained all the same.</summary>
+    private static MinimizationResult Minimise(IObjectiveFunction less, MathVector start, MathVector steps)
+    {
+        try
+        {
+            return NelderMeadSimplex.Minimum(less, start, steps, PolishTolerance, PolishSteps);
+        }
+        catch (MaximumIterationsException)
+        {
+            less.EvaluateAt(start);
+            return new MinimizationResult(less, PolishSteps, ExitCondition.None);
+        }
+    }
+
+    private static double Value(double[,] t, double[] a, double[] b, double[] m, double[] m2) =>
+        Length(Sum(Times(t, Sum(m, m2, 1), false), a, 2)) + Length(Times(t, Sum(m, m2, -1), false)) + (2 * Dot(b, m));
+
+    private static double Length(double[] v) => Math.Sqrt(Dot(v, v));
+
+    private static double[] Angles(double[] v) => [Math.Acos(Math.Clamp(v[2], -1, 1)), Math.Atan2(v[1], v[0])];
+
+    private static double[] Unit(double theta, double phi) => [Math.Sin(theta) * Math.Cos(phi), Math.Sin(theta) * Math.Sin(phi), Math.Cos(theta)];
 
     private static double Dot(double[] x, double[] y) => (x[0] * y[0]) + (x[1] * y[1]) + (x[2] * y[2]);
 
@@ -131,14 +166,16 @@ internal static class ChshOptimum
         return result;
     }
 
-    /// <summary>Directions to the corners, edges and faces of a cube, one of each opposite pair left in: 26 in all.</summary>
+    /// <summary>
+    /// Evenly spread directions on a golden spiral, tilted so that none lies in a plane of symmetry of a typical state:
+    /// alternation never leaves such a plane, even where the optimum lies outside.
+    /// </summary>
     private static IEnumerable<double[]> StartDirections()
     {
-        for (int k = 0; k < 27; k++)
+        for (int k = 0; k < Starts; k++)
         {
-            double[] v = [(k % 3) - 1, (k / 3 % 3) - 1, (k / 9) - 1];
-            if (k != 13)
-                yield return Direction(v, out _);
+            double z = 1 - (((2 * k) + 1.0) / Starts), angle = (Math.PI * (3 - Math.Sqrt(5)) * k) + 0.3, r = Math.Sqrt(1 - (z * z));
+            yield return Direction([r * Math.Cos(angle), (r * Math.Sin(angle) * 0.8) + (z * 0.6), (z * 0.8) - (r * Math.Sin(angle) * 0.6)], out _);
         }
     }
 }

@@ -16,7 +16,7 @@ internal sealed class BindContext(ScriptTree tree)
     public ScriptTree Tree { get; } = tree;
 
     /// <summary>Findings so far.</summary>
-    public Findings Findings { get; } = new(tree.Source);
+    public BindingFindings Findings { get; } = new(tree.Source);
 
     /// <summary>Where names are made.</summary>
     public MakerIndex Makers { get; } = new(tree);
@@ -44,6 +44,9 @@ internal sealed class BindContext(ScriptTree tree)
 
     /// <summary>Uses of values by parties that do not know them, in the current statement.</summary>
     public KnowledgeMisses Misses { get; } = new();
+
+    /// <summary>Values that a keep line used although not everybody knows them; each is told once.</summary>
+    public HashSet<string> ToldNotPublic { get; } = [];
 
     /// <summary>Slots so far.</summary>
     public IReadOnlyList<SlotInfo> Slots => _slots;

@@ -11,8 +11,9 @@ internal static class BindingMessages
     /// <summary>Whether a finding may come from the parameter values alone.</summary>
     public static bool DependsOnParameters(string code) => OfParameters.Contains(code);
 
-    public static Message NeverMade(string name, string? near) =>
-        new("S030", $"Nothing in this script is called {name}: a parameter, or a value that somebody makes or receives above, fits here.", DidYouMean(near));
+    public static Message NeverMade(string name, string? near, string? owner, IReadOnlyList<string> held) =>
+        new("S030", $"Nothing in this script is called {name}: {(owner is null ? "a parameter, or a value that somebody makes or receives above," : $"a value that {owner} makes or receives")} fits here.",
+            DidYouMean(near is null || owner is null ? near : $"{owner}.{near}") ?? (held.Count == 0 ? null : $"{owner} holds {List(held)} here"));
 
     public static Message HeldByOthers(string owner, string name, IReadOnlyList<string> others) =>
         new("S030", $"{owner} holds no {name} here; {List(others)} {Verb(others.Count, "does", "do")}.", $"write {List(others.Select(o => $"{o}.{name}"), "or")}");
@@ -25,7 +26,7 @@ internal static class BindingMessages
         string whom = actors.Count == 1 ? actors[0] : "them";
         string only = knowers.Length == 0 ? "nobody knows" : $"only {List(knowers)} {Verb(knowers.Length, "knows", "know")}";
         return new("S031", $"{List(actors)} {Verb(actors.Count, "acts", "act")} {place} {miss.Label}, which {only} here.",
-            $"let {List(makers, "or")} announce {miss.Name}, or send it to {whom}, before this line; {lines}");
+            $"let {List(makers, "or")} announce {miss.Name}, or send it to {whom}, before this line; {lines}.");
     }
 
     public static Message MadeLater(string name, int line) =>
@@ -111,7 +112,7 @@ internal static class BindingMessages
         new("S047", $"{party} cannot {Doing(verb)}: it is not in the resource and holds no qudit.", $"put {party} into the resource line, or leave it out here");
 
     public static Message InterceptTooLate(string party, int line) =>
-        new("S048", $"{party} has its qudit already on line {line}: only qudits in flight are intercepted.", $"move this line above line {line}");
+        new("S048", $"{party} uses its qudit already on line {line}: only qudits in flight are intercepted.", $"move this line above line {line}");
 
     public static Message InterceptUsesMessages(string outsider) =>
         new("S049", $"{outsider} intercepts by something that depends on a message: no message has arrived while the qudits fly.", "let the outsider pick or set its basis on its own");
@@ -138,7 +139,7 @@ internal static class BindingMessages
         new("S054", $"{name} is given the wrong arguments: {shape} fits.", null);
 
     public static Message Undefined(string text) =>
-        new("S055", $"`{text}` has no value: it divides by zero.", null);
+        new("S055", $"`{text}` has no value here: a number fits that does not divide by zero.", null);
 
     public static Message WholeNumberNeeded(string value) =>
         new("S055", $"This is {value}: a whole number fits here.", null);
@@ -208,6 +209,10 @@ internal static class BindingMessages
         new("S066", $"Nothing is labelled \"{label}\" here: {(known.Any() ? Some([.. known.Select(k => $"\"{k}\"")], "or") : "a label of a checkpoint or report")} would fit.",
             near is null ? null : $"did you mean \"{near}\"?");
 
+    public static Message UnknownCase(string label, string? near, IEnumerable<string> known) =>
+        new("S066", $"No dishonest case is called \"{label}\"{(known.Any() ? $": {Some([.. known.Select(k => $"\"{k}\"")], "or")} would fit" : "; the script has none")}.",
+            near is null ? null : $"did you mean \"{near}\"?");
+
     public static Message ReportBelow(string label, int line) =>
         new("S066", $"The report \"{label}\" stands on line {line}: a report uses only reports above it.", $"move this line below line {line}");
 
@@ -257,7 +262,13 @@ internal static class BindingMessages
 
     private static string Capital(string text) => char.ToUpperInvariant(text[0]) + text[1..];
 
-    private static string Doing(string verb) => verb == "checkpoint" ? "be in this checkpoint" : verb == "intercept" ? "be intercepted" : verb;
+    private static string Doing(string verb) => verb switch
+    {
+        "checkpoint" => "be in this checkpoint",
+        "intercept" => "be intercepted",
+        "apply" => "apply an operation",
+        _ => verb,
+    };
 
     // Long lists say less than their beginning.
     private static string Some(IReadOnlyList<string> items, string last) =>

@@ -45,8 +45,13 @@ internal sealed class DomainBinder(BindContext context)
     }
 
     /// <summary>A fixed number, or null after a finding.</summary>
-    public Rational? Number(Expression expression) =>
-        new ExpressionBinder(context, new ConstantView(context)).Expect(expression, ValueKind.Number).Constant is NumberValue number ? number.Number : null;
+    public Rational? Number(Expression expression)
+    {
+        Value? value = new ExpressionBinder(context, new ConstantView(context)).Expect(expression, ValueKind.Number).Constant;
+        if (value is NoneValue)
+            context.Findings.Report(expression.Span, BindingMessages.Undefined(context.TextOf(expression.Span)));
+        return value is NumberValue number ? number.Number : null;
+    }
 
     private List<Value>? Listed(Domain domain)
     {

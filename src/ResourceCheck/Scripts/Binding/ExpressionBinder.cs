@@ -50,8 +50,6 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
         if (!parts.All(p => p.Constant is not null))
             return new Typed(expression, kind);
         Value value = ValueEvaluator.Evaluate(expression, [], context.Levels);
-        if (value is NoneValue && kind == ValueKind.Number && !parts.Any(p => p.Constant is NoneValue))
-            return Refuse(expression.Span, BindingMessages.Undefined(context.TextOf(expression.Span)));
         return new Typed(new BoundLiteral(expression.Span, value), kind);
     }
 
@@ -107,9 +105,12 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
         Typed left = Expect(e.Left, wanted), right = Expect(e.Right, wanted);
         if (!ValueKinds.Together(left.Kind, right.Kind))
             return Refuse(e.Span, BindingMessages.NeverEqual(left.Kind, right.Kind));
-        return left.Bound is null || right.Bound is null
-            ? new Typed(null, kind)
-            : Fold(new BoundBinary(e.Span, e.Operator, left.Bound, right.Bound), kind, left, right);
+        if (left.Bound is null || right.Bound is null)
+            return new Typed(null, kind);
+        Typed folded = Fold(new BoundBinary(e.Span, e.Operator, left.Bound, right.Bound), kind, left, right);
+        bool undefined = folded.Constant is NoneValue && left.Constant is not NoneValue && right.Constant is not NoneValue;
+        // With parameters in it, an undefined number is none, so that a requirement on it is broken rather than wrong.
+        return undefined && TreeWalk.IsLiteral(e) ? Refuse(e.Span, BindingMessages.Undefined(context.TextOf(e.Span))) : folded;
     }
 
     private static (ValueKind Operands, ValueKind Result) Sorts(BinaryOperator op) => op switch
@@ -122,15 +123,27 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
 
     private Typed If(IfExpression e)
     {
-        Typed condition = Expect(e.Condition, ValueKind.Truth), then = Bind(e.Then), otherwise = Bind(e.Else);
+        Typed condition = Expect(e.Condition, ValueKind.Truth);
+        bool? known = condition.Constant is { } value ? value is TruthValue { Truth: true } : null;
+        Typed then = Branch(e.Then, known == false), otherwise = Branch(e.Else, known == true);
         if (!ValueKinds.Together(then.Kind, otherwise.Kind))
             return Refuse(e.Span, BindingMessages.BranchesDiffer(then.Kind, otherwise.Kind));
         ValueKind kind = ValueKinds.Join(then.Kind, otherwise.Kind);
-        if (condition.Bound is null || then.Bound is null || otherwise.Bound is null)
-            return new Typed(null, kind);
-        if (condition.Constant is { } fixedCondition)
-            return new Typed(fixedCondition is TruthValue { Truth: true } ? then.Bound : otherwise.Bound, kind);
-        return new Typed(new BoundIf(e.Span, condition.Bound, then.Bound, otherwise.Bound), kind);
+        if (known is { } holds)
+            return new Typed(holds ? then.Bound : otherwise.Bound, kind);
+        return condition.Bound is null || then.Bound is null || otherwise.Bound is null
+            ? new Typed(null, kind)
+            : new Typed(new BoundIf(e.Span, condition.Bound, then.Bound, otherwise.Bound), kind);
+    }
+
+    private Typed Branch(Expression expression, bool off)
+    {
+        if (off)
+            context.Findings.Mute(true);
+        Typed typed = Bind(expression);
+        if (off)
+            context.Findings.Mute(false);
+        return typed;
     }
 
     private Typed Basis(BasisExpression e)

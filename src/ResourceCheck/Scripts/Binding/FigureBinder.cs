@@ -46,6 +46,10 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
         _ => null,
     };
 
+    /// <summary>Whether an expression has the form of a metric: a metric's word, a label, or a harm.</summary>
+    public static bool NamesMetric(Expression expression) =>
+        MetricOf(expression) is not null || expression is LabelExpression or CallExpression { Function.Text: "harm" };
+
     // Numbers from parameters alone stay exact until they are complete, so that 1/3 is the double nearest to one third.
     private NumberFigure? Fixed(Expression expression)
     {
@@ -54,6 +58,8 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
         if (open || expression is BinaryExpression { Operator: < BinaryOperator.Plus } or UnaryExpression { Operator: UnaryOperator.Not })
             return null;
         Value? value = new ExpressionBinder(context, new ConstantView(context)).Expect(expression, ValueKind.Number).Constant;
+        if (value is NoneValue)
+            context.Findings.Report(expression.Span, BindingMessages.Undefined(context.TextOf(expression.Span)));
         return value is NumberValue number ? new NumberFigure(expression.Span, number.Number.ToDouble()) : null;
     }
 
@@ -160,7 +166,7 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
         string[] cases = [.. context.Tree.Statements.OfType<DishonestStatement>().Select(d => d.Title.Text)];
         if (cases.Contains(label))
             return new MetricName(MetricKind.Harm, label);
-        context.Findings.Report(e.Span, BindingMessages.UnknownLabel(label, Words.Near(label, cases), cases));
+        context.Findings.Report(e.Span, BindingMessages.UnknownCase(label, Words.Near(label, cases), cases));
         return null;
     }
 

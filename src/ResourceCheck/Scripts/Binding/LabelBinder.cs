@@ -38,6 +38,8 @@ internal sealed class LabelBinder(BindContext context)
     public string Enter(Quoted quoted, MetricKind kind)
     {
         string label = Write(quoted);
+        if (context.Findings.IsMuted)
+            return label;
         if (BuiltIn.Contains(label))
             context.Findings.Report(quoted.Span, BindingMessages.LabelBuiltIn(label));
         else if (!_labels.TryAdd(label, (kind, quoted.Span, _labels.Count)))

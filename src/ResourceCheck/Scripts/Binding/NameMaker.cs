@@ -34,6 +34,8 @@ internal sealed class NameMaker(BindContext context)
         CheckFree(name);
         if (context.Now.Own.TryGetValue((party, name.Text), out Holding? present))
             context.Findings.Report(name.Span, BindingMessages.MadeTwice(context.NameOf(party), name.Text, context.LineOf(present.Span)));
+        else if (context.Now.Sent.TryGetValue((party, name.Text), out var sent))
+            context.Findings.Report(name.Span, BindingMessages.MadeTwice(context.NameOf(party), name.Text, context.LineOf(sent[0].Span)));
         int slot = SiblingSlot(party, name, value) ?? context.AddSlot(name.Text, party, kind, value, name.Span);
         context.Now = context.Now.WithOwn(party, name.Text, new Holding([slot], value, name.Span));
         return slot;

@@ -170,7 +170,8 @@ internal sealed class PublicView(BindContext context, NameState state) : NameVie
         string[] without = [.. Context.Parties.Insiders.Where(p => State.CopyAt(p, name, identity) is null).Select(Context.NameOf)];
         if (without.Length == 0)
             return Read(holding with { Slots = [.. holding.Slots.Select(State.Origin).Distinct()] }, span);
-        Context.Findings.Report(span, BindingMessages.NotPublic(label, without));
+        if (Context.ToldNotPublic.Add(identity))
+            Context.Findings.Report(span, BindingMessages.NotPublic(label, without));
         return Typed.Broken;
     }
 }

@@ -47,12 +47,21 @@ internal sealed class ParameterBinder(BindContext context)
         }
 
         ParameterInfo info = new(name, number, range.Values, range.From, range.To);
-        string allowed = context.TextOf(statement.Domain.Span);
-        if (!info.Allows(number))
-            context.Findings.Report(statement.Default.Span, BindingMessages.OutsideDomain(name, Words.Number(number), allowed));
-        if (given.ContainsKey(name) && !info.Allows(value))
-            context.Findings.Report(Option(name, value), BindingMessages.OutsideDomain(name, Words.Number(value), allowed));
+        Check(statement, info, given.TryGetValue(name, out Rational chosen) ? chosen : null);
         return info;
+    }
+
+    // A value outside the domain is told once; the rest of the script is checked at one inside.
+    private void Check(ParameterStatement statement, ParameterInfo info, Rational? given)
+    {
+        string allowed = context.TextOf(statement.Domain.Span);
+        bool usable = info.Allows(info.Default);
+        if (!usable)
+            context.Findings.Report(statement.Default.Span, BindingMessages.OutsideDomain(info.Name, Words.Number(info.Default), allowed));
+        if (given is { } value && !info.Allows(value))
+            context.Findings.Report(Option(info.Name, value), BindingMessages.OutsideDomain(info.Name, Words.Number(value), allowed));
+        if (!info.Allows(context.Parameters[info.Name]))
+            context.Parameters[info.Name] = usable ? info.Default : info.From;
     }
 
     // Without a value nothing can be said about lines that use the parameter.

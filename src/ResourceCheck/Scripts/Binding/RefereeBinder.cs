@@ -26,8 +26,8 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
     /// <summary>Goals in the order written.</summary>
     public IReadOnlyList<Goal> Goals => _goals;
 
-    /// <summary>Resolves all lines; false when there is no success line.</summary>
-    public bool Bind(IReadOnlyList<RefereeLine> lines)
+    /// <summary>Resolves all lines.</summary>
+    public void Bind(IReadOnlyList<RefereeLine> lines)
     {
         foreach (RefereeLine line in lines)
         {
@@ -40,8 +40,6 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
                 case GoalStatement s: Need(s, line); break;
             }
         }
-
-        return _successAt is not null;
     }
 
     private void Judge(SuccessStatement statement, RefereeLine line)
@@ -73,7 +71,8 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
 
     private void Need(GoalStatement statement, RefereeLine line)
     {
-        if (statement.Comparison is not BinaryExpression { Operator: BinaryOperator.LessOrEqual or BinaryOperator.GreaterOrEqual } comparison)
+        if (statement.Comparison is not BinaryExpression { Operator: BinaryOperator.LessOrEqual or BinaryOperator.GreaterOrEqual } comparison
+            || !FigureBinder.NamesMetric(comparison.Left))
         {
             context.Findings.Report(statement.Comparison.Span, BindingMessages.GoalForm());
             return;

@@ -23,15 +23,15 @@ internal static class UnknownNames
             return;
         }
 
-        context.Findings.ReportName(name, span, Cause(context, owner, name, span));
+        context.Findings.ReportName(name, span, Cause(context, owner, Held(state, party), name, span));
     }
 
-    private static Message Cause(BindContext context, string? owner, string name, Span span)
+    private static Message Cause(BindContext context, string? owner, string[] held, string name, Span span)
     {
         IReadOnlyList<Maker> makers = context.Makers.Of(name);
         string label = owner is null ? name : $"{owner}.{name}";
         if (makers.Count == 0)
-            return BindingMessages.NeverMade(label, Words.Near(name, Candidates(context, owner is not null)));
+            return BindingMessages.NeverMade(label, Words.Near(name, owner is null ? Candidates(context) : held), owner, held);
         if (makers.FirstOrDefault(m => m.Loop is not null && !context.Loops.Contains(m.Loop)) is { } inTurn && makers.All(m => m.Span.Start < span.Start))
             return BindingMessages.OfAnEndedTurn(label, context.LineOf(inTurn.Span), context.LineOf(inTurn.Loop!.Span));
         Maker? later = makers.FirstOrDefault(m => m.Span.Start > span.Start);
@@ -40,7 +40,9 @@ internal static class UnknownNames
             : BindingMessages.NotMadeHere(label, context.LineOf(makers[0].Span));
     }
 
-    private static IEnumerable<string> Candidates(BindContext context, bool member) => member
-        ? context.Makers.Names
-        : context.Makers.Names.Concat(context.Parameters.Keys).Concat(context.Counters.Keys).Concat(context.Parties.Names).Concat(["level", "fourier"]);
+    private static string[] Held(NameState state, int? party) =>
+        [.. state.Own.Keys.Concat(state.Received.Keys).Where(k => k.Party == party).Select(k => k.Name).Distinct().Order(StringComparer.Ordinal)];
+
+    private static IEnumerable<string> Candidates(BindContext context) =>
+        context.Makers.Names.Concat(context.Parameters.Keys).Concat(context.Counters.Keys).Concat(context.Parties.Names).Concat(["level", "fourier"]);
 }

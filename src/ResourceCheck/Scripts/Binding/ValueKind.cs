@@ -54,7 +54,7 @@ internal static class ValueKinds
     public static string Name(ValueKind kind) => kind switch
     {
         ValueKind.Number => "a number",
-        ValueKind.Truth => "true or false",
+        ValueKind.Truth => "a truth value",
         ValueKind.Basis => "a basis",
         ValueKind.Party => "a party",
         _ => "none",

@@ -42,7 +42,11 @@ internal static class Words
     public static string Write(Value value) => value is NumberValue number ? Number(number.Number) : value.ToString()!;
 
     /// <summary>The known name nearest to a wrong one, or null when none is near.</summary>
-    public static string? Near(string wrong, IEnumerable<string> known) => NearWords.Find(wrong, known.Where(k => k != wrong));
+    public static string? Near(string wrong, IEnumerable<string> known)
+    {
+        string[] others = [.. known.Where(k => k != wrong).Distinct()];
+        return others.Length == 0 ? null : NearWords.Find(wrong, others);
+    }
 
     private static string Decimal(BigInteger scaled, int places)
     {

@@ -10,9 +10,9 @@ internal readonly record struct Message(string Code, string Text, string? Cure =
 
 /// <summary>Gathers the findings of a script, each once although loops and actors repeat a line, and keeps names whose making failed.</summary>
 /// <param name="source">The script's text.</param>
-internal sealed class Findings(SourceText source)
+internal sealed class BindingFindings(SourceText source)
 {
-    private readonly HashSet<(string Code, Span Span)> _seen = [];
+    private readonly HashSet<(string Code, Span Span, string? Missing)> _seen = [];
     private readonly List<(int Offset, Diagnostic Finding)> _found = [];
     private readonly HashSet<string> _suspects = [];
     private int _muted;
@@ -27,14 +27,18 @@ internal sealed class Findings(SourceText source)
     public void Report(Span span, Message message)
     {
         // What stands in a part that these parameter values switch off may be impossible only because of them.
-        if (_muted > 0 && BindingMessages.DependsOnParameters(message.Code))
+        if (IsMuted && BindingMessages.DependsOnParameters(message.Code))
             return;
-        if (_seen.Add((message.Code, span)))
+        // Several lines may be missing from one script; all of these findings stand at its beginning.
+        if (_seen.Add((message.Code, span, span.Length == 0 ? message.Text : null)))
             _found.Add((span.Start, From(message, source.PlaceOf(span))));
     }
 
     /// <summary>Adds a finding about a value given from outside the script.</summary>
     public void Report(string input, Message message) => _found.Add((-1, From(message, Place.Of(input))));
+
+    /// <summary>Whether the current part is switched off by the parameter values.</summary>
+    public bool IsMuted => _muted > 0;
 
     /// <summary>Keeps a name from causing further findings.</summary>
     public void Suspect(string name) => _suspects.Add(name);
