@@ -12,12 +12,16 @@ internal sealed class MasterEquation
     /// <summary>Share of the largest sector, equal numbers in rows and columns, for two two-level emitters; larger spaces have less.</summary>
     private const double LargestShare = 6.0 / 16;
 
+    /// <summary>Most emitters: keys of sectors stay apart, and more would not fit memory with three levels.</summary>
+    public const int MostEmitters = 8;
+
     private readonly EmitterSpace _space;
     private readonly Sectors _sectors;
 
     /// <summary>Prepares the evolution; d^N levels must fit an index and d^2N entries must fit memory.</summary>
     public MasterEquation(Couplings couplings)
     {
+        ArgumentOutOfRangeException.ThrowIfGreaterThan(couplings.Emitters, MostEmitters);
         _space = new EmitterSpace(couplings);
         _sectors = new Sectors(_space);
     }

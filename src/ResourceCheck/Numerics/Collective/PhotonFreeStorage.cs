@@ -80,8 +80,15 @@ internal sealed class PhotonFreeStorage
         return Figures();
     }
 
-    /// <summary>The unnormalised no-photon state as d^N amplitudes; the first emitter is the most significant digit.</summary>
-    public Complex[] Ket() => _frame.Expand(State, _couplings.Levels);
+    /// <summary>
+    /// The unnormalised no-photon state as d^N amplitudes; the first emitter is the most significant digit. With 8 emitters they take
+    /// 256 MiB; 9 are refused.
+    /// </summary>
+    public Complex[] Ket()
+    {
+        ArgumentOutOfRangeException.ThrowIfGreaterThan(_couplings.Emitters, States.AntisymmetricState.MostParties);
+        return _frame.Expand(State, _couplings.Levels);
+    }
 
     private StorageFigures Figures()
     {

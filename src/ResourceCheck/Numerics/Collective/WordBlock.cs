@@ -69,15 +69,6 @@ internal sealed class WordBlock
     public static ulong With(ulong code, int emitter, int letter) =>
         (code & ~(15UL << (Bits * emitter))) | ((ulong)letter << (Bits * emitter));
 
-    /// <summary>Emitters that hold a letter, as bits.</summary>
-    public int Places(ulong code, int letter)
-    {
-        int places = 0;
-        for (int i = 0; i < Emitters; i++)
-            places |= Letter(code, i) == letter ? 1 << i : 0;
-        return places;
-    }
-
     /// <summary>Number of a word of this block.</summary>
     public int Rank(ulong code)
     {
