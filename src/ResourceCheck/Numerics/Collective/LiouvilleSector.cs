@@ -10,7 +10,7 @@ namespace ResourceCheck.Numerics.Collective;
 internal sealed class LiouvilleSector : IGenerator
 {
     /// <summary>Entries from which rows are shared between cores.</summary>
-    private const int ParallelFrom = 4000;
+    private const int ParallelFrom = 20_000;
 
     /// <summary>Enough that cores finish together, few enough that taking one costs nothing.</summary>
     private const int Chunks = 64;

@@ -12,19 +12,22 @@ namespace ResourceCheck.Numerics.Collective;
 /// </summary>
 internal static class SwapKernel
 {
-    /// <summary>Adds the share of one lane to the words from <paramref name="start"/> on; start and length are multiples of the run.</summary>
+    /// <summary>Adds the shares of all lanes to the words from <paramref name="start"/> on; start and length are multiples of each run.</summary>
     public static void Accumulate(
-        SwapLane lane, ReadOnlySpan<Complex> coefficients, ReadOnlySpan<Complex> source, Span<Complex> target, int start)
+        ReadOnlySpan<SwapLane> lanes, ReadOnlySpan<Complex> coefficients, ReadOnlySpan<Complex> source, Span<Complex> target, int start)
     {
-        int runs = target.Length / lane.Length, first = start / lane.Length;
-        ReadOnlySpan<int> targets = lane.Targets.AsSpan(first, runs);
-        ReadOnlySpan<ushort> indices = lane.Coefficients.AsSpan(first, runs);
-        if (lane.Length == 1)
-            Single(targets, indices, coefficients, source, target);
-        else if (lane.Length % 2 == 0)
-            Pairs(lane.Length, targets, indices, coefficients, source, target);
-        else
-            Slices(lane.Length, targets, indices, coefficients, source, target);
+        for (int at = 0; at < lanes.Length; at++)
+        {
+            SwapLane lane = lanes[at];
+            if (lane.Length == 1 && at + 1 < lanes.Length && lanes[at + 1].Length == 1)
+                Twofold(lane, lanes[++at], coefficients, source, target, start);
+            else if (lane.Length == 1)
+                Single(lane, coefficients, source, target, start);
+            else if (lane.Length % 2 == 0)
+                Pairs(lane, coefficients, source, target, start);
+            else
+                Slices(lane, coefficients, source, target, start);
+        }
     }
 
     /// <summary>target += c · source.</summary>
@@ -43,48 +46,77 @@ internal static class SwapKernel
 
     [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     private static void Pairs(
-        int length, ReadOnlySpan<int> targets, ReadOnlySpan<ushort> indices, ReadOnlySpan<Complex> coefficients,
-        ReadOnlySpan<Complex> source, Span<Complex> target)
+        SwapLane lane, ReadOnlySpan<Complex> coefficients, ReadOnlySpan<Complex> source, Span<Complex> target, int start)
     {
         ref double x = ref Start(source);
         ref double y = ref Start(target);
-        nuint at = 0, step = (nuint)length * 2;
-        for (int run = 0; run < targets.Length; run++)
+        ref int targets = ref lane.Targets[start / lane.Length];
+        ref ushort indices = ref lane.Coefficients[start / lane.Length];
+        nuint at = 0, step = (nuint)lane.Length * 2, last = (nuint)target.Length * 2;
+        for (nuint run = 0; at < last; run++)
         {
-            Complex c = coefficients[indices[run]];
+            Complex c = coefficients[Unsafe.Add(ref indices, run)];
             Vector256<double> real = Vector256.Create(c.Real), turn = Turn(c);
-            nuint from = (nuint)targets[run] * 2;
+            nuint from = (nuint)Unsafe.Add(ref targets, run) * 2;
             for (nuint end = at + step; at < end; at += 4, from += 4)
                 Multiplied(real, turn, Vector256.LoadUnsafe(ref x, from), Vector256.LoadUnsafe(ref y, at)).StoreUnsafe(ref y, at);
         }
     }
 
+    /// <summary>Two lanes of single words in one pass: their reads, which come from afar, overlap.</summary>
     [MethodImpl(MethodImplOptions.AggressiveOptimization)]
-    private static void Single(
-        ReadOnlySpan<int> targets, ReadOnlySpan<ushort> indices, ReadOnlySpan<Complex> coefficients, ReadOnlySpan<Complex> source,
-        Span<Complex> target)
+    private static void Twofold(
+        SwapLane lane, SwapLane other, ReadOnlySpan<Complex> coefficients, ReadOnlySpan<Complex> source, Span<Complex> target, int start)
     {
         ref double x = ref Start(source);
         ref double y = ref Start(target);
         ref double table = ref Start(coefficients);
-        for (int q = 0; q < targets.Length; q++)
+        ref int targets = ref lane.Targets[start];
+        ref int others = ref other.Targets[start];
+        ref ushort indices = ref lane.Coefficients[start];
+        ref ushort otherIndices = ref other.Coefficients[start];
+        for (nuint q = 0; q < (nuint)target.Length; q++)
         {
-            Vector128<double> c = Vector128.LoadUnsafe(ref table, (nuint)indices[q] * 2);
-            Vector128<double> value = Vector128.LoadUnsafe(ref x, (nuint)targets[q] * 2);
-            Vector128<double> sum = Vector128.LoadUnsafe(ref y, (nuint)q * 2);
-            sum = Vector128.FusedMultiplyAdd(Vector128.Shuffle(c, Vector128.Create(0L, 0)), value, sum);
-            Vector128<double> turned = Vector128.Shuffle(c, Vector128.Create(1L, 1)) * Vector128.Create(-1.0, 1);
-            sum = Vector128.FusedMultiplyAdd(turned, Vector128.Shuffle(value, Vector128.Create(1L, 0)), sum);
-            sum.StoreUnsafe(ref y, (nuint)q * 2);
+            Vector128<double> sum = Vector128.LoadUnsafe(ref y, q * 2);
+            sum = Added(ref table, Unsafe.Add(ref indices, q), ref x, Unsafe.Add(ref targets, q), sum);
+            Added(ref table, Unsafe.Add(ref otherIndices, q), ref x, Unsafe.Add(ref others, q), sum).StoreUnsafe(ref y, q * 2);
+        }
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
+    private static void Single(
+        SwapLane lane, ReadOnlySpan<Complex> coefficients, ReadOnlySpan<Complex> source, Span<Complex> target, int start)
+    {
+        ref double x = ref Start(source);
+        ref double y = ref Start(target);
+        ref double table = ref Start(coefficients);
+        ref int targets = ref lane.Targets[start];
+        ref ushort indices = ref lane.Coefficients[start];
+        for (nuint q = 0; q < (nuint)target.Length; q++)
+        {
+            Vector128<double> sum = Vector128.LoadUnsafe(ref y, q * 2);
+            Added(ref table, Unsafe.Add(ref indices, q), ref x, Unsafe.Add(ref targets, q), sum).StoreUnsafe(ref y, q * 2);
         }
     }
 
     private static void Slices(
-        int length, ReadOnlySpan<int> targets, ReadOnlySpan<ushort> indices, ReadOnlySpan<Complex> coefficients,
-        ReadOnlySpan<Complex> source, Span<Complex> target)
+        SwapLane lane, ReadOnlySpan<Complex> coefficients, ReadOnlySpan<Complex> source, Span<Complex> target, int start)
     {
-        for (int run = 0; run < targets.Length; run++)
-            Add(coefficients[indices[run]], source.Slice(targets[run], length), target.Slice(run * length, length));
+        int first = start / lane.Length;
+        for (int run = 0; run < target.Length / lane.Length; run++)
+        {
+            Complex c = coefficients[lane.Coefficients[first + run]];
+            Add(c, source.Slice(lane.Targets[first + run], lane.Length), target.Slice(run * lane.Length, lane.Length));
+        }
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static Vector128<double> Added(ref double table, int index, ref double x, int target, Vector128<double> sum)
+    {
+        Vector128<double> c = Vector128.LoadUnsafe(ref table, (nuint)index * 2), value = Vector128.LoadUnsafe(ref x, (nuint)target * 2);
+        sum = Vector128.FusedMultiplyAdd(Vector128.Shuffle(c, Vector128.Create(0L, 0)), value, sum);
+        Vector128<double> turn = Vector128.Shuffle(c, Vector128.Create(1L, 1)) * Vector128.Create(-1.0, 1);
+        return Vector128.FusedMultiplyAdd(turn, Vector128.Shuffle(value, Vector128.Create(1L, 0)), sum);
     }
 
     private static Vector256<double> Turn(Complex c) => Vector256.Create(-c.Imaginary, c.Imaginary, -c.Imaginary, c.Imaginary);
