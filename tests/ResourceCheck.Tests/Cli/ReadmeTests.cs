@@ -10,7 +10,7 @@ public sealed class ReadmeTests
     [Fact]
     public async Task Readme_shows_what_its_first_command_prints()
     {
-        string readme = (await File.ReadAllTextAsync(Path.Combine(Root(), "README.md"))).ReplaceLineEndings("\n");
+        string readme = (await File.ReadAllTextAsync(Path.Combine(Root(), "README.md"), TestContext.Current.CancellationToken)).ReplaceLineEndings("\n");
         string command = readme.Split('\n').First(l => l.StartsWith("dotnet run", StringComparison.Ordinal));
         string[] words = command[(command.IndexOf(" -- ", StringComparison.Ordinal) + 4)..].Split(' ');
         using StringWriter output = new(), error = new();
