@@ -1,6 +1,5 @@
 """Two parties: CHSH value, Werner mixtures, key fraction, and the pair that removal leaves."""
 
-from functools import partial
 from math import sqrt
 
 import numpy as np
@@ -49,7 +48,7 @@ def bell(rho, levels):
 def largest(t, r, s, w):
     def value(angles):
         b, c = direction(angles[:2]), direction(angles[2:])
-        return np.linalg.norm(t @ (b + c) + 2 * r) + np.linalg.norm(t @ (b - c)) + sign * (2 * s @ b + 2 * w)
+        return np.linalg.norm(t @ (b + c) + 2 * r) + np.linalg.norm(t @ (b - c)) + 2 * s @ b + 2 * w
 
     starts = np.random.RandomState(5).uniform(0, np.pi, (24, 4))
     rough = max((minimize(lambda x: -value(x), start, method="BFGS").x for start in starts), key=value)

@@ -7,8 +7,16 @@ internal static class MemorySize
 {
     private static readonly Dictionary<string, double> Units = new(StringComparer.Ordinal)
     {
-        ["B"] = 1, ["kB"] = 1e3, ["KB"] = 1e3, ["MB"] = 1e6, ["GB"] = 1e9, ["TB"] = 1e12,
-        ["KiB"] = 1024.0, ["MiB"] = 1048576.0, ["GiB"] = 1073741824.0, ["TiB"] = 1099511627776.0,
+        ["B"] = 1,
+        ["kB"] = 1e3,
+        ["KB"] = 1e3,
+        ["MB"] = 1e6,
+        ["GB"] = 1e9,
+        ["TB"] = 1e12,
+        ["KiB"] = 1024.0,
+        ["MiB"] = 1048576.0,
+        ["GiB"] = 1073741824.0,
+        ["TiB"] = 1099511627776.0,
     };
 
     /// <summary>Bytes of a text such as <c>4 GB</c>; null when it is no memory size above 0.</summary>

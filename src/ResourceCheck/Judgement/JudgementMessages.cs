@@ -69,18 +69,8 @@ internal static class JudgementMessages
         "look at the condition behind `given`, or at the divisor",
         Place.Of("result"));
 
-    public static Diagnostic LevelsDiffer(string file, int parties) => new(
-        "E005", Severity.Error, $"The state of {file} does not fit the protocol: {parties} qudits of {parties} levels fit here.", "take a file of that size, or change the number of parties", Place.Of("resource.file"));
-
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
-
-    public static Diagnostic OnlySeen(double seen) => new(
-        "E010",
-        Severity.Note,
-        $"Every figure is of the copies that all saw: a fraction {FigureText.Number(1 - seen)} of the copies had a measurement without a click and is dropped by announcement.",
-        "a script that mentions none handles missing clicks itself",
-        Place.Of("detection"));
 
     private static string Domain(ParameterInfo parameter) =>
         parameter.Values is { } values ? Words.Or(values.Select(v => v.ToString())) : $"a number from {parameter.From} to {parameter.To}";

@@ -55,13 +55,13 @@ internal static class Limits
         Protocol protocol = worst.Setting.Protocol;
         (int party, double value) = protocol.Holders.Select(p => (p, without(source, p))).MaxBy(pair => Sign(metric) * pair.Item2);
         double gain = Math.Abs(value - worst.Figure(metric)!.Value);
-        return gain < Noticeable ? null : $"{protocol.Parties[party]}'s ({FigureText.Number(gain)})";
+        return gain < Noticeable ? null : $"{protocol.Parties[party]}'s {FigureText.Number(gain)}";
     }
 
     private static string Sentence(MetricName metric, double now, Source source, double best, string? party)
     {
         string above = party is null ? "" : $", above all {party}";
-        return $"Most is lost {Words(source)} ({FigureText.Number(Math.Abs(best - now))}{above}); without it {GoalJudgement.Name(metric)} would be {FigureText.Number(best)}.";
+        return $"Most is lost {Words(source)}: {FigureText.Number(Math.Abs(best - now))}{above}; without it {GoalJudgement.Name(metric)} would be {FigureText.Number(best)} (exact).";
     }
 
     private static string Words(Source source) => source switch

@@ -57,14 +57,12 @@ internal static class RunJudgement
             VerdictText = GoalJudgement.Sentence(goals, all),
             Hint = Limits.Hint(goals, all, setup.Request),
             Timeline = Provenance.Schedule(longest),
-            Warnings = [.. setup.Notes, .. Notes(all, yield)],
+            Warnings = [.. setup.Notes, .. Notes(all)],
         };
     }
 
-    private static IEnumerable<Diagnostic> Notes(IReadOnlyList<Evaluated> all, YieldResult yield)
+    private static IEnumerable<Diagnostic> Notes(IReadOnlyList<Evaluated> all)
     {
-        if (yield.OnlySeen)
-            yield return JudgementMessages.OnlySeen(yield.Seen);
         foreach (Evaluated evaluated in all)
         {
             for (int i = 0; i < evaluated.Actual.Reports.Count; i++)

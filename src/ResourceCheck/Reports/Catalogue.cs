@@ -1,5 +1,6 @@
 using ResourceCheck.Conditions;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement;
 using ResourceCheck.Resources;
 using ResourceCheck.Scripts;
 using ResourceCheck.Scripts.Binding;
@@ -22,6 +23,7 @@ public static class Catalogue
             BindingCatalogue.All,
             ConditionsCatalogue.All,
             StateCatalogue.All,
+            JudgementCatalogue.All,
             UsageCatalogue.All,
         ];
         return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];

@@ -15,6 +15,7 @@ public sealed class Planner
     private readonly World _world;
     private readonly List<TimelineEntry> _timeline = [];
     private readonly PlanWords _words;
+    private readonly Dictionary<int, BoundExpression> _sent = [];
 
     private Planner(Protocol protocol, World world)
     {
@@ -197,14 +198,25 @@ public sealed class Planner
     {
         double start = Start(step.Party, [.. ambient, .. Dependencies.Of(step.Value)], clock);
         steps.Add(new AssignPlanStep(step.Slot, step.Value));
+        _sent[step.Slot] = step.Value;
         clock.Know(step.Party, step.Slot, start);
         foreach (int recipient in step.Recipients)
         {
             double arrives = start + _world.Messages.From(step.Party, recipient).Seconds;
             clock.Know(recipient, step.Slot, arrives);
-            if (step.Value is BoundSlot original) // what is named after its maker is known from the same message
-                clock.Know(recipient, original.Slot, arrives);
+            foreach (int original in Passed(step.Value)) // what is named after its maker is known from the same message
+                clock.Know(recipient, original, arrives);
             Record(start, arrives, step.Party, TimelineKind.Message, _words.Of(step), recipient);
+        }
+    }
+
+    /// <summary>The slots whose content a message passes on, however often it was passed on before.</summary>
+    private IEnumerable<int> Passed(BoundExpression? value)
+    {
+        while (value is BoundSlot { Slot: var slot })
+        {
+            yield return slot;
+            value = _sent.GetValueOrDefault(slot);
         }
     }
 

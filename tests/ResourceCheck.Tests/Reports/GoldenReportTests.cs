@@ -9,7 +9,10 @@ public sealed class GoldenReportTests
 {
     private static readonly Dictionary<ReportFormat, string> Endings = new()
     {
-        [ReportFormat.Text] = "txt", [ReportFormat.Json] = "json", [ReportFormat.Csv] = "csv", [ReportFormat.Markdown] = "md",
+        [ReportFormat.Text] = "txt",
+        [ReportFormat.Json] = "json",
+        [ReportFormat.Csv] = "csv",
+        [ReportFormat.Markdown] = "md",
     };
 
     private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state"];

@@ -1,5 +1,5 @@
-using ResourceCheck.Numerics;
 using ResourceCheck.Engines.Figures;
+using ResourceCheck.Numerics;
 using ResourceCheck.Numerics.States;
 using ResourceCheck.Resources;
 using ResourceCheck.Scripts.Binding;

@@ -48,3 +48,20 @@ public enum ValueFunction
     /// <summary>Absolute value.</summary>
     Absolute,
 }
+
+// Expressions on lists. Inside a predicate, slots of the rounds stand for their value in the copy at hand; everywhere else slots hold one value per run.
+
+/// <summary>The positions at which a predicate holds: <c>where(v = bit)</c>. The predicate may read the actor's per-copy slots and its single values.</summary>
+public sealed record BoundWhere(Span Span, BoundExpression Predicate) : BoundExpression(Span);
+
+/// <summary>Positions drawn uniformly at random from a set, all of them when it holds fewer: <c>some(k of SET)</c>.</summary>
+public sealed record BoundSome(Span Span, BoundExpression Count, BoundExpression Set) : BoundExpression(Span);
+
+/// <summary>How many positions a set holds: <c>size(SET)</c>.</summary>
+public sealed record BoundSize(Span Span, BoundExpression Set) : BoundExpression(Span);
+
+/// <summary>How many positions of a set satisfy a predicate, or (<paramref name="IsShare"/>) which fraction of them; none for the share of an empty set.</summary>
+public sealed record BoundTally(Span Span, BoundExpression Predicate, BoundExpression Set, bool IsShare) : BoundExpression(Span);
+
+/// <summary>A number left to a cheat, by its index among the case's choices.</summary>
+public sealed record BoundChoice(Span Span, int Choice) : BoundExpression(Span);

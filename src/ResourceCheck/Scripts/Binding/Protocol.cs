@@ -54,6 +54,12 @@ public sealed record Protocol
     /// <summary>Conditions on parameters, with whether they hold here.</summary>
     public required IReadOnlyList<Requirement> Requirements { get; init; }
 
+    /// <summary>The part that works on lists; null for a protocol on single copies.</summary>
+    public ListProtocol? Lists { get; init; }
+
+    /// <summary>Cheating strategies, in the order written.</summary>
+    public IReadOnlyList<DishonestCase> Dishonest { get; init; } = [];
+
     /// <summary>Whether the script mentions <c>none</c>, and so handles measurements without a click itself.</summary>
     public required bool HandlesNone { get; init; }
 }

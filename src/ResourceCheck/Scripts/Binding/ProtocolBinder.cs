@@ -34,24 +34,24 @@ internal static partial class ProtocolBinder
     private static Protocol Assemble(
         BindContext context, IReadOnlyDictionary<string, Rational> given, IReadOnlyList<ParameterInfo> declared,
         IReadOnlyList<Requirement> requirements, IReadOnlyList<Step> steps, RefereeBinder referee) => new()
-    {
-        Source = context.Tree.Source,
-        Name = context.Tree.Statements.OfType<ProtocolStatement>().FirstOrDefault()?.Title.Text ?? Path.GetFileNameWithoutExtension(context.Tree.Source.Name),
-        About = context.Tree.Statements.OfType<AboutStatement>().FirstOrDefault()?.Text.Text ?? "",
-        Parties = context.Parties.Names,
-        Holders = context.Parties.Holders,
-        Outsiders = context.Parties.Outsiders,
-        Parameters = [.. declared.Select(d => new ParameterValue(d.Name, context.Parameters[d.Name], !given.ContainsKey(d.Name)))],
-        Inputs = context.Inputs,
-        Slots = context.Slots,
-        Steps = steps,
-        Success = referee.Success!,
-        Reports = referee.Reports,
-        Claims = referee.Claims,
-        Goals = referee.Goals,
-        Requirements = requirements,
-        HandlesNone = TreeWalk.Statements(context.Tree.Statements).SelectMany(TreeWalk.Expressions).SelectMany(TreeWalk.Within).Any(e => e is NoneExpression),
-    };
+        {
+            Source = context.Tree.Source,
+            Name = context.Tree.Statements.OfType<ProtocolStatement>().FirstOrDefault()?.Title.Text ?? Path.GetFileNameWithoutExtension(context.Tree.Source.Name),
+            About = context.Tree.Statements.OfType<AboutStatement>().FirstOrDefault()?.Text.Text ?? "",
+            Parties = context.Parties.Names,
+            Holders = context.Parties.Holders,
+            Outsiders = context.Parties.Outsiders,
+            Parameters = [.. declared.Select(d => new ParameterValue(d.Name, context.Parameters[d.Name], !given.ContainsKey(d.Name)))],
+            Inputs = context.Inputs,
+            Slots = context.Slots,
+            Steps = steps,
+            Success = referee.Success!,
+            Reports = referee.Reports,
+            Claims = referee.Claims,
+            Goals = referee.Goals,
+            Requirements = requirements,
+            HandlesNone = TreeWalk.Statements(context.Tree.Statements).SelectMany(TreeWalk.Expressions).SelectMany(TreeWalk.Within).Any(e => e is NoneExpression),
+        };
 
     // A line that could not be read was told about already; names in it, and names that a part not available would make,
     // must not be reported as missing elsewhere.

@@ -1,0 +1,26 @@
+using ResourceCheck.Diagnostics;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>Cause and cure of the messages about parameter choices and results.</summary>
+internal static class JudgementCatalogue
+{
+    /// <summary>All explanations, in order of code.</summary>
+    public static IReadOnlyList<Explanation> All { get; } =
+    [
+        new("E001", "does not fit", "The evaluation was estimated before anything was allocated, and it needs more memory than may be used. A density operator of N qudits of d levels takes d^2N numbers, of which four are held at once.", "Lower the number of parties, or raise --memory on a larger machine. Loss that is not heralded adds a component per qudit.", "resourcecheck run protocols/leader-draw.protocol --parameter n=7"),
+        new("E002", "unknown engine", "The engine named with --engine does not exist.", "Leave --engine out; the program chooses and says why.", "--engine fast"),
+        new("E003", "nothing kept", "No copy survives: a `keep` that never holds, a transmission of 0 on a heralded flight, or detectors that never click.", "Look at the keeps of the script and at transmission, efficiency and dark counts of the conditions."),
+        new("E004", "undefined figure", "A figure divides by zero or is asked for copies that never occur, such as probability(A given B) with B impossible, or a Bell value at a checkpoint where a party holds no qudit.", "Change the condition behind `given`, or give the figure a case in which it is defined."),
+        new("P001", "unknown parameter", "--parameter names something that the script does not declare.", "Use a declared name; `inspect` lists them.", "--parameter m=3"),
+        new("P002", "unreadable value", "The value of --parameter is no number, fraction, list, range or `all`.", "Write a number, 1/3, 3,4 or 3..8.", "--parameter n=three"),
+        new("P003", "outside the domain", "The script limits the values of this parameter.", "Choose a value inside, or widen the domain in the script.", "--parameter n=40"),
+        new("P004", "no list of all values", "`all` was asked for a parameter that may take any real number of a range.", "Name the values you want.", "--parameter t=all"),
+        new("P005", "chosen twice", "The same parameter stands behind --parameter twice.", "Join the values with commas.", "--parameter n=3 --parameter n=4"),
+        new("P006", "too many combinations", "Every combination of the chosen values is evaluated, and there are too many for one run.", "Ask for fewer values at once."),
+        new("P010", "requirement broken", "The script states with `require` what its parameters must satisfy; these values do not. Figures are shown all the same, but what the protocol claims need not hold.", "Choose parameters that meet the requirement."),
+        new("P011", "no claims", "`verify` proves what a script claims, and this one claims nothing.", "State what the protocol promises, such as `claim success = 1`."),
+        new("P012", "matrix size", "A matrix file named by the script does not have as many rows as each qudit has levels.", "Give a matrix of that size."),
+        new("P013", "not unitary", "The columns of a matrix file named by the script are not orthonormal to 1e-9.", "Give every entry with all its digits."),
+    ];
+}

@@ -1,0 +1,35 @@
+namespace ResourceCheck.Scripts.Binding;
+
+/// <summary>
+/// The classical part of a protocol that runs on many copies. Its steps are <see cref="SetStep"/>, <see cref="SendStep"/>,
+/// <see cref="AbortStep"/> and <see cref="WhenStep"/> over slots that hold one value (number, truth, set of positions) per run;
+/// slots below <paramref name="CopySlots"/> are the rounds' and hold one value per copy.
+/// </summary>
+/// <param name="Copies">M, the number of kept copies.</param>
+/// <param name="CopySlots">Slots with a lower index belong to the rounds.</param>
+/// <param name="Steps">All discussions in order, in the honest case.</param>
+/// <param name="Blocks">Where each discussion's steps begin and end within <paramref name="Steps"/>, by title.</param>
+public sealed record ListProtocol(int Copies, int CopySlots, IReadOnlyList<Step> Steps, IReadOnlyList<BlockRange> Blocks);
+
+/// <summary>Steps of one block.</summary>
+/// <param name="Title">Title of the round or discussion.</param>
+/// <param name="First">Index of its first step.</param>
+/// <param name="Count">Number of its steps.</param>
+public sealed record BlockRange(string Title, int First, int Count);
+
+/// <summary>A cheating strategy, bound: the steps that run in place of the honest ones.</summary>
+/// <param name="Name">Title of the <c>dishonest</c> block.</param>
+/// <param name="By">Indices of the parties that cheat.</param>
+/// <param name="Choices">Numbers left to the cheat.</param>
+/// <param name="CopySteps">Steps of the rounds under this strategy.</param>
+/// <param name="ListSteps">Steps of the discussions under this strategy; null for a protocol on single copies.</param>
+/// <param name="Harm">When harm is done.</param>
+public sealed record DishonestCase(
+    string Name, IReadOnlyList<int> By, IReadOnlyList<Choice> Choices, IReadOnlyList<Step> CopySteps, IReadOnlyList<Step>? ListSteps, BoundExpression Harm);
+
+/// <summary>A number left to the cheat; its range may depend on what the cheat holds when it is used.</summary>
+/// <param name="Name">Its name.</param>
+/// <param name="From">Least value.</param>
+/// <param name="To">Greatest value.</param>
+/// <param name="Whole">Whether only whole numbers count.</param>
+public sealed record Choice(string Name, BoundExpression From, BoundExpression To, bool Whole);
