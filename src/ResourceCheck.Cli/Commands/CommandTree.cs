@@ -38,8 +38,11 @@ internal static class CommandTree
                 command.Options.Add(option);
             command.SetAction((parsed, token) => parsed.GetValue(Options.Help)
                 ? Task.FromResult(session.Terminal.Write(HelpPage.Of(command), ExitCodes.Done))
-                : execute(new Invocation(parsed, session), o, token));
+                : Interruptible(() => execute(new Invocation(parsed, session), o, token), token));
             root.Subcommands.Add(command);
         }
     }
+
+    // A read from a terminal or a pipe cannot be cancelled: it is left behind instead, and ends with the process.
+    private static Task<int> Interruptible(Func<Task<int>> execute, CancellationToken token) => Task.Run(execute, token).WaitAsync(token);
 }
