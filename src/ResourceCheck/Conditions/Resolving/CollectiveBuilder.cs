@@ -14,7 +14,7 @@ internal sealed class CollectiveBuilder(int emitters, Findings findings)
     public CollectiveModel? Build(GroupSetting section, string timeKey)
     {
         double[] wavelengths = Wavelengths(section);
-        if (Positions(section, wavelengths[0]) is not { } positions)
+        if (Positions(section, wavelengths[0]) is not { } positions || positions.Any(p => p.Any(double.IsNaN)))
             return null;
         CollectiveModel model = new()
         {
@@ -79,9 +79,10 @@ internal sealed class CollectiveBuilder(int emitters, Findings findings)
     {
         if (length.Dimension == Dimension.Wavelengths)
             return length.Value;
-        if (section.Find("wavelength") is null)
-            findings.Add(ConditionsMessages.WavelengthNeeded(length.Spot, length.Path));
-        return length.Value / wavelength;
+        if (section.Find("wavelength") is not null)
+            return length.Value / wavelength;
+        findings.Add(ConditionsMessages.WavelengthNeeded(length.Spot, length.Path));
+        return double.NaN;
     }
 
     private TransitionModel[] Transitions(GroupSetting section, double[] wavelengths)
