@@ -65,7 +65,15 @@ internal static class Work
         string? file = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
         if (file is not null && OutputFile.Check(file) is { } finding)
             use.Findings.Add(finding);
+        else if (file is not null && Inputs(use, o).Any(input => Path.GetFullPath(input) == Path.GetFullPath(file)))
+            use.Findings.Add(Findings.OverInput(file));
         return file;
+    }
+
+    private static IEnumerable<string> Inputs(Invocation use, Options o)
+    {
+        IEnumerable<string> read = use.Command.Options.Contains(o.Under) && use.Text(o.Under) is { } under ? [.. use.Positional, under] : use.Positional;
+        return read.Where(name => name.Length > 0 && name != InputFiles.StandardInput);
     }
 
     /// <summary>Tells wrong usage.</summary>

@@ -84,6 +84,9 @@ internal static class Findings
     public static Diagnostic UnfitName(string name) =>
         new("U033", Severity.Error, $"`{name}` is no name for new files.", "give a name such as study or work/study.", Place.Of("the command line"));
 
+    public static Diagnostic OverInput(string name) =>
+        new("U035", Severity.Error, $"--out {name} would write over a file that is read here.", "choose another name for the result.", Place.Of("--out"));
+
     public static Diagnostic OutputRefused(string reason) =>
         new("U034", Severity.Error, $"Standard output cannot be written: {Sentence(reason)}", "free some space, or send the result elsewhere with --out.", Place.Of("standard output"));
 

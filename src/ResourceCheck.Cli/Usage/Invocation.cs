@@ -134,11 +134,13 @@ internal sealed class Invocation
     }
 
     /// <summary>Two switches that must not stand together.</summary>
-    public void Exclude(Option<bool> first, Option<bool> second)
+    public void Exclude(Option first, Option second)
     {
-        if (Has(first) && Has(second))
+        if (Given(first) && Given(second))
             Findings.Add(Usage.Findings.Excluding(_words, first.Name, second.Name));
     }
+
+    private bool Given(Option option) => option is Option<bool> flag ? Has(flag) : Text((Option<string[]>)option) is not null;
 
     // A missing word beside an unknown option is most likely that option's doing: one slip, one error.
     private bool HasStrayWords => Findings.Any(f => f.Code == "U002");

@@ -26,7 +26,7 @@ internal static class InspectJudgement
             Duration = setting.Plan.Duration.Seconds,
             Engine = engine,
             Requirements = [.. setting.Protocol.Requirements.Select(r => new RequirementLine(r.Text, r.Reason, r.Figures, r.Holds))],
-            Warnings = setup.Notes,
+            Warnings = [.. setup.Notes, .. choice.Findings.Select(f => f with { Severity = Severity.Warning })],
         });
     }
 }

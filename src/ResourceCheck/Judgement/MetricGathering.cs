@@ -39,7 +39,7 @@ internal static class MetricGathering
         MetricName name = new(MetricKind.Report, label);
         Evaluated[] having = [.. all.Where(e => e.Figure(name) is not null)];
         Evaluated least = having.MinBy(e => e.Figure(name)!.Value)!;
-        return new MetricResult(label, least.Figure(name)!, (least with { Actual = least.Ideal }).Figure(name)!.Value, Range(having.Select(e => e.Figure(name)!.Value)), WorstAt(least, all));
+        return new MetricResult(label, least.Figure(name)!, (least with { Actual = least.Ideal }).Figure(name)!.Value, Range(having.Select(e => e.Figure(name)!.Value)), null); // which end is the worse one only a goal could tell
     }
 
     private static CheckpointResult Checkpoint(string label, IReadOnlyList<Evaluated> all)

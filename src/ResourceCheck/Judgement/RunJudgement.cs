@@ -17,7 +17,7 @@ internal static class RunJudgement
             all.AddRange(Evaluate(setting, setup.Request, findings));
         if (findings.Any(f => f.Severity == Severity.Error))
             return Outcome<RunResult>.Failed([.. findings.Distinct()]);
-        RunResult result = Conclude(setup, all);
+        RunResult result = Conclude(setup with { Notes = [.. setup.Notes, .. findings.Distinct()] }, all);
         return new Outcome<RunResult>(result, result.Warnings);
     }
 

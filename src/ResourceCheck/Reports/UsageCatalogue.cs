@@ -32,6 +32,7 @@ public static class UsageCatalogue
         new("U032", "file exists", "new writes no file over another.", "Choose another name, or add --force to replace the files."),
         new("U033", "unfit name for new files", "The name is empty or ends with a separator.", "Give a name such as study or work/study.", "resourcecheck new work/"),
         new("U034", "standard output cannot be written", "The system refused to take the result, most likely for lack of space.", "Free some space, or send the result elsewhere with --out."),
+        new("U035", "output over an input", "The file named with --out is the script, conditions or state that the command reads.", "Choose another name for the result.", "resourcecheck run removal.protocol --out removal.protocol"),
         new("U040", "unknown code", "There is no message with this code.", "resourcecheck explain lists all codes.", "resourcecheck explain S999"),
         new("U041", "unknown schema", "There is no schema of this name.", "Use one of the names that the message lists.", "resourcecheck schema results"),
         new("U090", "out of memory", "The work needs more memory than there is.", "Use a smaller case, or set --memory so that a leaner engine is chosen."),

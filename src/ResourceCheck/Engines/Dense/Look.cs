@@ -21,5 +21,5 @@ internal sealed class Look(string label, double at, History history)
     }
 
     public CheckpointEvaluation Conclude() =>
-        new(Label, Estimate.Exact(Tally.Ratio(_overlap, Weight)), Weight, at, [.. history.MostProbable(Weight, BranchesTold)]);
+        new(Label, Estimate.Exact(Tally.Clip(Tally.Ratio(_overlap, Weight))), Tally.Clip(Weight), at, [.. history.MostProbable(Weight, BranchesTold)]);
 }

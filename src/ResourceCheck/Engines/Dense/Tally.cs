@@ -13,6 +13,9 @@ internal sealed class Tally
     /// <summary>Histories told for a failing success condition.</summary>
     private const int FailuresTold = 8;
 
+    /// <summary>Far above what sums of some thousand terms lose, far below what anybody would notice.</summary>
+    private const double RoundOff = 1e-9;
+
     private readonly Plan _plan;
     private readonly OperatorBasis _basis;
     private readonly Dictionary<string, Look> _looks = [];
@@ -22,7 +25,7 @@ internal sealed class Tally
     private readonly BellTally _bell;
     private readonly History _failures;
     private readonly History _ends;
-    private double _success, _failure, _abort, _unseen, _error;
+    private double _success, _failure, _abort, _dropped, _error;
 
     public Tally(Plan plan, OperatorBasis basis)
     {
@@ -34,8 +37,8 @@ internal sealed class Tally
         _ends = new History(plan.Protocol, false);
     }
 
-    /// <summary>A measurement gave no click and the script does not handle that: the copy is dropped.</summary>
-    public void Unseen(double weight) => _unseen += weight;
+    /// <summary>A <c>keep</c> dropped the copy.</summary>
+    public void Dropped(double weight) => _dropped += weight;
 
     /// <summary>Estimated error of integrating collective decay.</summary>
     public void IntegrationError(double error) => _error = Math.Max(_error, error);
@@ -69,19 +72,19 @@ internal sealed class Tally
     /// <summary>Everything added up; figures are of kept copies.</summary>
     public Evaluation Conclude(EngineChoice choice, IReadOnlyList<Value> inputs)
     {
-        double kept = _success + _failure;
-        double heralded = _lookOrder.First(l => l.Label == "arrived").Weight;
-        double seen = heralded - _unseen;
+        double kept = Clip(_success + _failure);
+        double heralded = Clip(_lookOrder.FirstOrDefault(l => l.Label == "arrived")?.Weight ?? 0);
+        double seen = kept + _dropped; // not what was lost subtracted: with a weak detector nearly all is lost
         CheckpointEvaluation[] checkpoints = [.. _lookOrder.Select(l => l.Conclude())];
-        Metrics metrics = new(Ratio(_success, kept), Ratio(_failure, kept), Ratio(_abort, kept), kept, checkpoints);
+        Metrics metrics = new(Clip(Ratio(_success, _success + _failure)), Clip(Ratio(_failure, _success + _failure)), Clip(Ratio(_abort, _success + _failure)), kept, checkpoints);
         FigureValues figures = new(_plan.Protocol, metrics, _figures, _bell);
         return new Evaluation
         {
             Engine = choice,
             Inputs = inputs,
             Heralded = heralded,
-            Seen = Ratio(seen, heralded),
-            Kept = Ratio(kept, seen),
+            Seen = Clip(Ratio(seen, heralded)),
+            Kept = Clip(Ratio(kept, seen)),
             Success = Estimate.Exact(metrics.Success),
             Failure = Estimate.Exact(metrics.Failure),
             Abort = Estimate.Exact(metrics.Abort),
@@ -93,6 +96,14 @@ internal sealed class Tally
             Failures = [.. _failures.MostProbable(kept, FailuresTold)],
         };
     }
+
+    /// <summary>Round-off beyond the ends of a probability is cut off; anything further out stays to be seen.</summary>
+    internal static double Clip(double probability) => probability switch
+    {
+        > 1 and < 1 + RoundOff => 1,
+        < 0 and > -RoundOff => 0,
+        _ => probability,
+    };
 
     /// <summary>A fraction of nothing is undefined; it shows as such instead of as 0.</summary>
     internal static double Ratio(double part, double whole) => FigureSum.Ratio(part, whole);

@@ -11,7 +11,10 @@ namespace ResourceCheck.Engines.Dense;
 /// <summary>Follows every branch of a plan to its end and hands looks and ends to the tally.</summary>
 internal sealed class Walker(Plan plan, LocalModels models, Tally tally, CancellationToken cancellation)
 {
-    /// <summary>Branches less probable than this are round-off of impossible outcomes, whose sign is random.</summary>
+    /// <summary>
+    /// Outcomes less probable than this beside the likeliest one of the same measurement are round-off of impossible ones, whose sign is
+    /// random. It must be relative: with a weak detector every outcome is improbable, and all of them are real.
+    /// </summary>
     private const double Negligible = 1e-15;
 
     public void Walk(Branch start) => Go(new Cursor(plan.Steps, 0, null), start);
@@ -87,7 +90,10 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
         switch (step)
         {
             case KeepPlanStep keep:
-                return Holds(keep.Condition, branch) ? branch : null;
+                if (Holds(keep.Condition, branch))
+                    return branch;
+                tally.Dropped(branch.Weight(models.Basis.Trace));
+                return null;
             case PickPlanStep pick:
                 foreach (BoundExpression option in pick.Options)
                     Go(cursor, branch.With(pick.Slot, Value(option, branch)).Scaled(1.0 / pick.Options.Count));
@@ -111,16 +117,20 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
             return;
         }
 
-        double[][] effects = models.Effects(basis, step.Model);
-        for (int k = 0; k < effects.Length; k++)
+        Branch[] outcomes = [.. models.Effects(basis, step.Model).Select(e => branch.Reading(step.Party, e))];
+        double[] weights = [.. outcomes.Select(o => o.Weight(models.Basis.Trace))];
+        Follow(outcomes[..^1], weights[..^1], step.Slot, cursor);
+        if (plan.Protocol.HandlesNone && weights[^1] > Negligible * weights.Max())
+            Go(cursor, outcomes[^1].With(step.Slot, Scripts.Binding.Value.None));
+    }
+
+    private void Follow(Branch[] outcomes, double[] weights, int slot, Cursor cursor)
+    {
+        double least = Negligible * weights.Max();
+        for (int k = 0; k < outcomes.Length; k++)
         {
-            Branch next = branch.Reading(step.Party, effects[k]);
-            bool unseen = k == effects.Length - 1;
-            double weight = next.Weight(models.Basis.Trace);
-            if (unseen && !plan.Protocol.HandlesNone)
-                tally.Unseen(weight);
-            else if (weight > Negligible)
-                Go(cursor, next.With(step.Slot, unseen ? Scripts.Binding.Value.None : Scripts.Binding.Value.Of(k)));
+            if (weights[k] > least)
+                Go(cursor, outcomes[k].With(slot, Scripts.Binding.Value.Of(k)));
         }
     }
 
@@ -132,13 +142,8 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
             return;
         }
 
-        SiteMap[] projections = models.Projections(basis);
-        for (int k = 0; k < projections.Length; k++)
-        {
-            Branch next = branch.Acting(step.Victim, projections[k]);
-            if (next.Weight(models.Basis.Trace) > Negligible)
-                Go(cursor, next.With(step.Slot, Scripts.Binding.Value.Of(k)));
-        }
+        Branch[] outcomes = [.. models.Projections(basis).Select(p => branch.Acting(step.Victim, p))];
+        Follow(outcomes, [.. outcomes.Select(o => o.Weight(models.Basis.Trace))], step.Slot, cursor);
     }
 
     private Value Value(BoundExpression expression, Branch branch) => ValueEvaluator.Evaluate(expression, branch.Slots, models.Basis.Levels);

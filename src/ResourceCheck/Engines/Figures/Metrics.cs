@@ -12,7 +12,7 @@ internal sealed record Metrics(double Success, double Failure, double Abort, dou
         MetricKind.Failure => Failure,
         MetricKind.Abort => Abort,
         MetricKind.Yield => Yield,
-        MetricKind.Checkpoint => Checkpoints.First(c => c.Label == metric.Label).Fidelity.Value,
+        MetricKind.Checkpoint => Checkpoints.FirstOrDefault(c => c.Label == metric.Label)?.Fidelity.Value ?? double.NaN, // none when no copy got there
         _ => throw new InvalidOperationException($"{metric} is no metric of the honest case."),
     };
 }
