@@ -68,19 +68,13 @@ internal sealed class LiteralRun
 
     private void Store(int party, int slot, BoundExpression expression)
     {
-        bool gone = (_aborted & (1UL << party)) != 0;
-        _sets[slot] = null;
-        _single[slot] = Value.None;
-        if (IsSet(expression))
-        {
+        bool gone = (_aborted & (1UL << party)) != 0, isSet = IsSet(expression);
+        bool[]? set = isSet ? Set(expression) : null;
+        Value single = isSet ? Value.None : Single(expression);
+        if (isSet)
             _setSlots.Add(slot);
-            bool[]? set = Set(expression);
-            _sets[slot] = gone ? null : set;
-        }
-        else if (!gone)
-        {
-            _single[slot] = Single(expression);
-        }
+        _sets[slot] = gone ? null : set;
+        _single[slot] = gone ? Value.None : single;
     }
 
     private bool IsSet(BoundExpression expression) => expression switch
