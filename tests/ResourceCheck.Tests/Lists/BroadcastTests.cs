@@ -1,4 +1,5 @@
 using System.Diagnostics;
+using System.Numerics;
 using ResourceCheck.Engines.Lists;
 using Xunit;
 
@@ -44,6 +45,48 @@ public sealed class BroadcastTests
         int least = ((3 * copies) + 39) / 40;
         double best = Enumerable.Range(least, 12).Max(size => Evaluated(Broadcast.Forger(copies, Copies.Depolarised(p, p, p), size)).Harm.Value);
         Near(harm, best);
+    }
+
+    [Theory]
+    [InlineData(150, .10465065169)]
+    [InlineData(300, .012880324054)]
+    public void A_forger_without_noise_does_the_reference_harm(int copies, double harm) =>
+        Near(harm, Enumerable.Range(((3 * copies) + 39) / 40, 8).Max(size => Evaluated(Broadcast.Forger(copies, Copies.Depolarised(.02, 0, .02), size)).Harm.Value));
+
+    [Theory]
+    [InlineData(150, .13614460434, 38, 7)]
+    [InlineData(300, .077472849508, 84, 15)]
+    public void A_splitter_without_noise_does_the_reference_harm(int copies, double harm, int n, int k2) =>
+        Near(harm, Enumerable.Range(0, 12).Max(o => Evaluated(Broadcast.Splitter(copies, Copies.Depolarised(0, .02, .02), true, n, 0, k2, o, copies * 42 / 100)).Harm.Value));
+
+    [Fact]
+    public void Failure_without_noise_falls_exponentially_with_the_number_of_copies()
+    {
+        double[] failure = [.. ((int[])[300, 600, 1200]).Select(copies => Evaluated(Broadcast.Honest(copies, Copies.Depolarised(0, 0, 0))).Failure.Value)];
+        double first = -Math.Log(failure[1] / failure[0]) / 300, second = -Math.Log(failure[2] / failure[1]) / 600;
+        Assert.InRange(second / first, 0.9, 1.1);
+        Assert.InRange(failure[2], 1e-13, 1e-8);
+    }
+
+    // The failure is that of a binomial count leaving its window; both sums are made exactly.
+    [Fact]
+    public void Failure_without_noise_is_twelve_digits_of_the_exact_fraction()
+    {
+        foreach (int copies in (int[])[150, 600, 1200])
+            Assert.Equal(1, Evaluated(Broadcast.Honest(copies, Copies.Depolarised(0, 0, 0))).Failure.Value / ExactFailure(copies), 12);
+    }
+
+    private static double ExactFailure(int copies)
+    {
+        BigInteger outside = 0, term = BigInteger.Pow(2, copies), whole = BigInteger.Pow(3, copies);
+        for (int n = 0; n <= copies; n++)
+        {
+            if (4 * n < copies || 100 * n > 42 * copies)
+                outside += term;
+            term = term * (copies - n) / (2 * (n + 1));
+        }
+
+        return (double)((outside << 300) / whole) * Math.ScaleB(1, -300);
     }
 
     private static ListEvaluation Evaluated(ListTask task)

@@ -25,8 +25,11 @@ internal sealed record Verdicts(double Success, double Failure, double Abort, do
             }
         }
 
-        return new Verdicts(success.Value, failure.Value, abort.Value, harm.Value);
+        return new Verdicts(Rounded(success), Rounded(failure), Rounded(abort), Rounded(harm));
     }
+
+    /// <summary>Round-off may carry a sure event a little above 1.</summary>
+    private static double Rounded(CompensatedSum sum) => Math.Min(1, sum.Value);
 
     public static bool Holds(ListStructure structure, int slot) => structure.Single[slot] is TruthValue { Truth: true };
 
