@@ -17,16 +17,16 @@ public sealed class WorstCaseTests
         Stopwatch watch = Stopwatch.StartNew();
         AttackOutcome found = WorstCase.Find(Broadcast.Splitter(copies, Copies.Depolarised(p, p, p), true, 0, 0, 0, 0, 0), new SearchOptions(), null, TestContext.Current.CancellationToken);
         Assert.True(found.Refusal is null, found.Refusal);
-        TestContext.Current.SendDiagnosticMessage($"{watch.ElapsedMilliseconds} ms: {found.Evaluation!.Harm.Value:R} at {string.Join(", ", found.Choices!)}; {found.Search.Check}");
-        Assert.True(found.Evaluation!.Harm.Value >= harm * (1 - 1e-9), $"{found.Evaluation.Harm.Value:R} at {string.Join(", ", found.Choices!)}; {found.Search.Check}");
+        TestContext.Current.SendDiagnosticMessage($"{watch.ElapsedMilliseconds} ms: {found.Evaluation!.Harm.Value:R} at {string.Join(", ", found.Choices!)}; {found.Search!.Check}");
+        Assert.True(found.Evaluation!.Harm.Value >= harm * (1 - 1e-9), $"{found.Evaluation.Harm.Value:R} at {string.Join(", ", found.Choices!)}; {found.Search!.Check}");
     }
 
     [Fact]
     public void One_number_is_searched_exhaustively()
     {
         AttackOutcome found = WorstCase.Find(Broadcast.Forger(150, Copies.Depolarised(.02, .02, .02), 0), new SearchOptions(), null, TestContext.Current.CancellationToken);
-        Assert.True(found.Search.Exhaustive);
-        Assert.Equal(151, found.Search.Evaluations);
+        Assert.True(found.Search!.Exhaustive);
+        Assert.Equal(151, found.Search!.Evaluations);
         Assert.Equal(1.0174065210e-1, found.Evaluation!.Harm.Value, 10);
     }
 

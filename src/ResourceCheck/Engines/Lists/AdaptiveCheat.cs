@@ -18,12 +18,13 @@ public static class AdaptiveCheat
     {
         try
         {
+            ListProgram program = ListProgram.Of(task with { HoldsEnough = false });
             Dictionary<string, double> best = [];
             double[] fixedHarms = new double[listed.Count];
             double[] work = new double[listed.Count];
             for (int i = 0; i < listed.Count; i++)
             {
-                OwnCounts own = new(task with { Choices = listed[i], HoldsEnough = false }, neglected, cancellation);
+                OwnCounts own = new(program, listed[i], task.Limits, neglected, cancellation);
                 Dictionary<string, double> harms = own.Harms();
                 fixedHarms[i] = Sum(harms.Values);
                 work[i] = own.Work;

@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using System.Numerics;
 using ResourceCheck.Numerics.Counting;
 
@@ -11,7 +12,7 @@ namespace ResourceCheck.Engines.Lists;
 /// <param name="Rest">Probability of the types of the atoms after it.</param>
 internal sealed record Atom(BigInteger Types, int[] Sums, int Target, double Weight, double Rest)
 {
-    private readonly Dictionary<int, BinomialRow> _rows = [];
+    private readonly ConcurrentDictionary<int, BinomialRow> _rows = [];
 
     /// <summary>Law of its number among positions that are in it or in the atoms after it.</summary>
     public BinomialRow Row(int positions)

@@ -4,8 +4,9 @@ using ResourceCheck.Numerics.Randomness;
 namespace ResourceCheck.Engines.Lists;
 
 /// <summary>
-/// Largest value of a function of whole numbers: all points where they are few, else a grid, then climbs from its best points and from
-/// random ones with steps that halve. Thresholds on counts make the functions saw-toothed, so a climb also tries two numbers at once.
+/// Largest value of a function of whole numbers: all points where they are few, else a grid, climbs from its best points and from
+/// random ones with steps that halve, and sweeps. Thresholds on counts make the functions saw-toothed: a climb therefore also changes two
+/// numbers at once, and a sweep walks one number through its range while the others follow, which crosses the teeth.
 /// </summary>
 public sealed class AttackSearch
 {
@@ -49,13 +50,45 @@ public sealed class AttackSearch
         int points = Math.Max(2, (int)Math.Pow(_options.GridPoints, 1.0 / _ranges.Count));
         _memory.EvaluateAll(Grid([.. _ranges.Select(r => Math.Min(points, r.To - r.From + 1))]));
         int[][] starts = [.. _memory.Top(_options.Climbs), .. Enumerable.Range(0, _options.RandomClimbs).Select(Random)];
-        int[][] ends = new int[starts.Length][];
-        Parallel.For(0, starts.Length, _memory.Parallel, i => ends[i] = Climb(starts[i], points));
+        Parallel.ForEach(starts, _memory.Parallel, start => Climb(start, points));
+        int sweeps = 0;
+        double before;
+        do
+        {
+            before = _memory.Best().Value;
+            Sweep(_memory.Best().Point);
+            sweeps++;
+        }
+        while (_memory.Best().Value > before && sweeps < _options.Sweeps);
         (int[] best, double value) = _memory.Best();
-        int agreeing = ends.Count(e => _memory.Value(e) >= value * (1 - 1e-12));
+        string ending = value > before ? "of which the last still found a larger value" : "of which the last found nothing larger";
         return new SearchResult(best, value, _memory.Count, false, string.Create(
             CultureInfo.InvariantCulture,
-            $"a grid of {points} values for each choice, then {starts.Length} climbs, of which {agreeing} ended at the value shown; {_memory.Count} choices were evaluated in all"));
+            $"a grid of {points} values for each choice, {starts.Length} climbs, then {sweeps} sweeps of each choice through its range, {ending}; {_memory.Count} choices were evaluated in all"));
+    }
+
+    /// <summary>Walks each number up and down from a point while the others climb.</summary>
+    private void Sweep(int[] from) => Parallel.For(0, 2 * from.Length, _memory.Parallel, way => Walk(from, way / 2, way % 2 == 0 ? 1 : -1));
+
+    private void Walk(int[] from, int index, int direction)
+    {
+        int[] at = from;
+        double least = _memory.Value(from) * _options.Hopeless;
+        while (Moved(at, index, direction) is { } next)
+        {
+            at = next;
+            while (Improved(at, index) is { } better)
+                at = better;
+            if (_memory.Value(at) <= least)
+                return;
+        }
+    }
+
+    /// <summary>The first better neighbour, changes of one number first; null when there is none.</summary>
+    private int[]? Improved(int[] at, int held)
+    {
+        double value = _memory.Value(at);
+        return Neighbours(at, 1, held).FirstOrDefault(next => _memory.Value(next) > value);
     }
 
     private int[] Climb(int[] start, int points)
@@ -86,25 +119,15 @@ public sealed class AttackSearch
         return best;
     }
 
-    private IEnumerable<int[]> Neighbours(int[] at, int step)
+    /// <summary>Points that differ by a step in one number, then those that differ in two; one number may be held.</summary>
+    private IEnumerable<int[]> Neighbours(int[] at, int step, int held = -1)
     {
-        for (int i = 0; i < at.Length; i++)
-        {
-            foreach (int move in (int[])[-step, step])
-            {
-                if (Moved(at, i, move) is not { } one)
-                    continue;
-                yield return one;
-                for (int k = 0; k < i; k++)
-                {
-                    foreach (int other in (int[])[-step, step])
-                    {
-                        if (Moved(one, k, other) is { } two)
-                            yield return two;
-                    }
-                }
-            }
-        }
+        int[] free = [.. Enumerable.Range(0, at.Length).Where(i => i != held)];
+        int[] moves = [-step, step];
+        IEnumerable<int[]?> one = free.SelectMany(i => moves.Select(move => Moved(at, i, move)));
+        IEnumerable<int[]?> two = free.SelectMany(i => free.Where(k => k < i).SelectMany(k =>
+            moves.SelectMany(move => moves.Select(other => Moved(at, i, move) is { } moved ? Moved(moved, k, other) : null))));
+        return one.Concat(two).OfType<int[]>();
     }
 
     private int[]? Moved(int[] at, int index, int move)

@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using System.Numerics;
 using ResourceCheck.Scripts.Binding;
 
@@ -10,6 +11,10 @@ internal sealed class CountedSets
     private readonly Reading _reading;
     private readonly ListStructure _structure;
     private readonly List<BigInteger[]> _sets = [];
+    private readonly bool _readsChoices;
+
+    // Values by sums, kept for other runs; only where the sums fit one number and nothing else enters.
+    private readonly ConcurrentDictionary<ulong, Value> _values = [];
 
     // For each statistic the set that it counts, or its value where that does not depend on counts.
     private readonly List<(int Set, Value? Fixed)> _sources = [];
@@ -19,13 +24,14 @@ internal sealed class CountedSets
         _context = context;
         _reading = reading;
         _structure = structure;
+        _readsChoices = Reads.Slots(reading.Residual).Any(context.IsOutside);
     }
 
     public IReadOnlyList<BigInteger[]> Sets => _sets;
 
     public static CountedSets Of(ListContext context, Reading reading, ListStructure structure)
     {
-        Reading needed = Simplification.Of(reading, _ => true, e => context.Evaluate(e, structure.Single));
+        Reading needed = Simplification.Of(reading, s => !context.IsOutside(s), e => context.Evaluate(e, structure.Single));
         CountedSets counted = new(context, needed, structure);
         foreach (Statistic statistic in needed.Statistics)
             counted._sources.Add(counted.Source(statistic));
@@ -40,7 +46,7 @@ internal sealed class CountedSets
     }
 
     /// <summary>Tables over cells and tags, by the value that the sums give.</summary>
-    public IEnumerable<(Value Value, CountTable Table)> Sorted(CountTable table)
+    public IEnumerable<(Value Value, CountTable Table)> Sorted(CountTable table, IReadOnlyList<Value> choices)
     {
         int sums = _sets.Count;
         CountTable seen = new(sums);
@@ -51,7 +57,7 @@ internal sealed class CountedSets
             ReadOnlySpan<ushort> key = table.Key(entry);
             int index = seen.Add(key[..sums], 1);
             if (index == homes.Count)
-                homes.Add(Home(parts, Value(key[..sums]), table.Width - sums));
+                homes.Add(Home(parts, Value(key[..sums], choices), table.Width - sums));
             homes[index].Add(key[sums..], table.Weight(entry));
         }
 
@@ -65,9 +71,21 @@ internal sealed class CountedSets
         return table;
     }
 
-    private Value Value(ReadOnlySpan<ushort> sums)
+    private Value Value(ReadOnlySpan<ushort> sums, IReadOnlyList<Value> choices)
     {
-        Value[] slots = [.. _structure.Single];
+        if (_readsChoices || sums.Length > sizeof(ulong) / sizeof(ushort))
+            return Computed(sums, choices);
+        ulong packed = 0;
+        foreach (ushort sum in sums)
+            packed = (packed << 16) | sum;
+        if (!_values.TryGetValue(packed, out Value? value))
+            _values[packed] = value = Computed(sums, choices);
+        return value;
+    }
+
+    private Value Computed(ReadOnlySpan<ushort> sums, IReadOnlyList<Value> choices)
+    {
+        Value[] slots = _readsChoices ? _context.WithChoices(_structure.Single, choices) : [.. _structure.Single];
         for (int i = 0; i < _sources.Count; i++)
             slots[_reading.Statistics[i].Temporary] = _sources[i].Fixed ?? Scripts.Binding.Value.Of(sums[_sources[i].Set]);
         return _context.Evaluate(_reading.Residual, slots);

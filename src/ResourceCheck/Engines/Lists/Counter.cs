@@ -1,5 +1,4 @@
 using System.Numerics;
-using ResourceCheck.Numerics.Counting;
 using ResourceCheck.Scripts.Binding;
 
 namespace ResourceCheck.Engines.Lists;
@@ -9,10 +8,10 @@ namespace ResourceCheck.Engines.Lists;
 /// independent. An operation that counts splits cells binomially, a draw splits them by the hypergeometric law, and tables of
 /// structures that later operations cannot tell apart are added up.
 /// </summary>
-internal sealed class Counter(ListContext context, Meter meter, int tags)
+internal sealed class Counter(ListProgram program, IReadOnlyList<Value> choices, Meter meter, int tags)
 {
     private readonly SortedDictionary<int, Dictionary<string, (ListStructure Structure, CountTable Table)>> _pending = [];
-    private readonly Dictionary<(int, string), (Refinement Refinement, int[] Order, ListStructure Structure)> _reductions = [];
+    private readonly ListContext _context = program.Context;
 
     /// <summary>All states that wait at operations not run yet.</summary>
     public IEnumerable<(int At, ListStructure Structure, CountTable Table)> Waiting =>
@@ -21,10 +20,8 @@ internal sealed class Counter(ListContext context, Meter meter, int tags)
     /// <summary>Takes in states that wait at an operation.</summary>
     public void Deposit(int at, ListStructure structure, CountTable table)
     {
-        if (!_reductions.TryGetValue((at, structure.Key), out (Refinement Refinement, int[] Order, ListStructure Structure) plan))
-            _reductions[(at, structure.Key)] = plan = Reduce(at, structure);
-        CountTable split = Splitter.Split(plan.Refinement, table, tags, meter);
-        Add(at, plan.Structure, split, plan.Order);
+        ReductionPlan plan = program.Plans.Reduction(at, structure);
+        Add(at, plan, Splitter.Split(plan.Refinement, table, tags, meter));
     }
 
     /// <summary>Runs all operations before one.</summary>
@@ -38,54 +35,47 @@ internal sealed class Counter(ListContext context, Meter meter, int tags)
         }
     }
 
-    private (Refinement Refinement, int[] Order, ListStructure Structure) Reduce(int at, ListStructure structure)
-    {
-        ListStructure forgotten = Reduction.Forget(context, structure, at);
-        Refinement refinement = Refinement.Of(context, forgotten, [], Foresight.Classes(context, forgotten, at));
-        int[] order = Reduction.Order(refinement.After);
-        return (refinement, order, Reduction.Ordered(refinement.After, order));
-    }
-
-    private void Add(int at, ListStructure structure, CountTable table, int[] order)
+    private void Add(int at, ReductionPlan plan, CountTable table)
     {
         if (!_pending.TryGetValue(at, out Dictionary<string, (ListStructure, CountTable)>? groups))
             _pending[at] = groups = [];
-        if (!groups.TryGetValue(structure.Key, out (ListStructure Structure, CountTable Table) group))
-            groups[structure.Key] = group = (structure, new CountTable(order.Length + tags));
+        int cells = plan.Order.Length;
+        if (!groups.TryGetValue(plan.Structure.Key, out (ListStructure Structure, CountTable Table) group))
+            groups[plan.Structure.Key] = group = (plan.Structure, new CountTable(cells + tags));
         ushort[] key = new ushort[group.Table.Width];
         for (int entry = 0; entry < table.Count; entry++)
         {
             ReadOnlySpan<ushort> from = table.Key(entry);
-            for (int cell = 0; cell < order.Length; cell++)
-                key[cell] = from[order[cell]];
-            from[order.Length..].CopyTo(key.AsSpan(order.Length));
+            for (int cell = 0; cell < cells; cell++)
+                key[cell] = from[plan.Order[cell]];
+            from[cells..].CopyTo(key.AsSpan(cells));
             group.Table.Add(key, table.Weight(entry));
         }
     }
 
     private void Run(int at, ListStructure structure, CountTable table)
     {
-        switch (context.Code.Operations[at])
+        switch (_context.Code.Operations[at])
         {
             case AssignOperation assign when structure.HasAborted(assign.Party):
                 Deposit(at + 1, structure.With(assign.Slot, Value.None), table);
                 break;
             case AssignOperation assign:
-                foreach ((Value value, ListStructure next, CountTable counts) in Read(assign.Value, structure, table, Foresight.Classes(context, structure, at + 1, open: assign.Slot)))
+                foreach ((Value value, ListStructure next, CountTable counts) in Read(at, assign.Value, structure, table, () => Foresight.Classes(_context, structure, at + 1, open: assign.Slot)))
                     Deposit(at + 1, next.With(assign.Slot, value), counts);
                 break;
             case AssignSetOperation assign:
-                Deposit(at + 1, structure.With(assign.Slot, structure.HasAborted(assign.Party) ? null : context.Set(assign.Set, structure)), table);
+                Deposit(at + 1, structure.With(assign.Slot, structure.HasAborted(assign.Party) ? null : _context.Set(assign.Set, structure)), table);
                 break;
             case DrawOperation draw:
                 Draw(at, draw, structure, table);
                 break;
             case AbortOperation abort:
-                foreach ((Value value, ListStructure next, CountTable counts) in Read(abort.Condition, structure, table, Foresight.Classes(context, structure, at + 1, abortOpen: abort.Party)))
+                foreach ((Value value, ListStructure next, CountTable counts) in Read(at, abort.Condition, structure, table, () => Foresight.Classes(_context, structure, at + 1, abortOpen: abort.Party)))
                     Deposit(at + 1, value is TruthValue { Truth: true } ? next.WithAborted(abort.Party) : next, counts);
                 break;
             case BranchOperation branch:
-                foreach ((Value value, ListStructure next, CountTable counts) in Read(branch.Condition, structure, table, Foresight.Classes(context, structure, at + 1, branch.Otherwise)))
+                foreach ((Value value, ListStructure next, CountTable counts) in Read(at, branch.Condition, structure, table, () => Foresight.Classes(_context, structure, at + 1, branch.Otherwise)))
                     Deposit(value is TruthValue { Truth: true } ? at + 1 : branch.Otherwise, next, counts);
                 break;
             case JumpOperation jump:
@@ -95,18 +85,16 @@ internal sealed class Counter(ListContext context, Meter meter, int tags)
     }
 
     /// <summary>Values of an expression with the states in which it has them.</summary>
-    private IEnumerable<(Value Value, ListStructure Structure, CountTable Table)> Read(Reading reading, ListStructure structure, CountTable table, int[][] classes)
+    private IEnumerable<(Value Value, ListStructure Structure, CountTable Table)> Read(int at, Reading reading, ListStructure structure, CountTable table, Func<int[][]> classes)
     {
-        CountedSets counted = CountedSets.Of(context, reading, structure);
-        Refinement refinement = Refinement.Of(context, structure, counted.Sets, classes);
-        CountTable split = Splitter.Split(refinement, table, tags, meter);
-        foreach ((Value value, CountTable part) in counted.Sorted(split))
-            yield return (value, refinement.After, part);
+        ReadingPlan plan = program.Plans.Reading(at, structure, reading, null, classes);
+        CountTable split = Splitter.Split(plan.Refinement, table, tags, meter);
+        return plan.Counted.Sorted(split, choices).Select(p => (p.Value, plan.Refinement.After, p.Table));
     }
 
     private void Draw(int at, DrawOperation draw, ListStructure structure, CountTable table)
     {
-        BigInteger[]? source = context.Set(draw.Set, structure);
+        BigInteger[]? source = _context.Set(draw.Set, structure);
         if (source is null || structure.HasAborted(draw.Party))
         {
             Deposit(at + 1, structure.With(draw.Slot, (BigInteger[]?)null), table);
@@ -114,17 +102,13 @@ internal sealed class Counter(ListContext context, Meter meter, int tags)
         }
 
         bool pooled = draw.AlwaysFull && structure.Cells.Where((c, i) => c.IsPool && !source[i].IsZero).Any();
-        CountedSets counted = CountedSets.Of(context, draw.Count, structure);
-        if (!pooled)
-            counted = counted.With(source);
-        Refinement refinement = Refinement.Of(context, structure, counted.Sets, Foresight.Classes(context, structure, at));
-        CountTable split = Splitter.Split(refinement, table, tags, meter);
-        foreach ((Value value, CountTable part) in counted.Sorted(split))
+        ReadingPlan plan = program.Plans.Reading(at, structure, draw.Count, pooled ? null : source, () => Foresight.Classes(_context, structure, at));
+        ListStructure next = plan.Refinement.After;
+        foreach ((Value value, CountTable part) in plan.Counted.Sorted(Splitter.Split(plan.Refinement, table, tags, meter), choices))
         {
-            ListStructure next = refinement.After;
             (ListStructure Structure, CountTable Table) drawn = value is not NumberValue number
                 ? (next.With(draw.Slot, (BigInteger[]?)null), part)
-                : Drawing.Draw(next, part, context.Set(draw.Set, next)!, draw.Slot, Positions(number), pooled, meter);
+                : Drawing.Draw(next, part, _context.Set(draw.Set, next)!, draw.Slot, Positions(number), pooled, meter);
             Deposit(at + 1, drawn.Structure, drawn.Table);
         }
     }

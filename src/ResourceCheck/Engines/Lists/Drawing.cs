@@ -68,7 +68,7 @@ internal sealed class Drawing
         for (int found = HypergeometricLaw.Least(drawn, marked, whole); found <= Math.Min(drawn, marked); found++)
         {
             double next = weight * HypergeometricLaw.Probability(found, drawn, marked, whole);
-            if (next < BinomialRow.Negligible)
+            if (next < _meter.Negligible)
                 continue;
             Move(source, index, found);
             Draw(index + 1, whole - marked, drawn - found, next);

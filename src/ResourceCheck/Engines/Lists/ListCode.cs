@@ -12,6 +12,12 @@ namespace ResourceCheck.Engines.Lists;
 internal sealed record ListCode(
     IReadOnlyList<ListOperation> Operations, int Slots, IReadOnlyList<bool> IsSet, int SuccessSlot, int HarmSlot, int LastCheatOperation)
 {
+    /// <summary>Slot of the cheat's first number; the others follow.</summary>
+    public required int FirstChoice { get; init; }
+
+    /// <summary>Whether the cheat's numbers say only how many positions are drawn.</summary>
+    public required bool ChoicesOnlySizeDraws { get; init; }
+
     /// <summary>Slots read at or after each operation before they are written again.</summary>
     public required IReadOnlyList<bool[]> Live { get; init; }
 }

@@ -12,6 +12,7 @@ internal sealed class ListCompiler
     private readonly ListTask _task;
     private readonly SetKinds _kinds;
     private readonly List<ListOperation> _operations = [];
+    private readonly int _choices;
     private int _slots;
     private int _party;
     private int _lastCheat;
@@ -20,7 +21,8 @@ internal sealed class ListCompiler
     {
         _task = task;
         _kinds = new SetKinds(task.Steps);
-        _slots = task.Protocol.Slots.Count;
+        _choices = task.Protocol.Slots.Count;
+        _slots = _choices + (task.Case?.Choices.Count ?? 0);
     }
 
     /// <summary>The flat form of a task's discussions.</summary>
@@ -35,9 +37,16 @@ internal sealed class ListCompiler
         bool[] isSet = [.. Enumerable.Range(0, compiler._slots).Select(compiler._kinds.IsSet)];
         return new ListCode(compiler._operations, compiler._slots, isSet, success, harm, compiler._lastCheat)
         {
+            FirstChoice = compiler._choices,
+            ChoicesOnlySizeDraws = compiler.ChoicesOnlySizeDraws(),
             Live = Liveness.Of(compiler._operations, compiler._slots, success, harm),
         };
     }
+
+    /// <summary>Whether the cheat's numbers say only how many positions are drawn, so that they change no set's definition.</summary>
+    private bool ChoicesOnlySizeDraws() => !_operations
+        .SelectMany(o => o is DrawOperation draw ? Reads.Slots(draw.Set).Concat(draw.Count.Statistics.SelectMany(s => Reads.Slots(new Reading([s], s.Set)))) : Reads.Slots(o))
+        .Any(slot => slot >= _choices && slot < _choices + (_task.Case?.Choices.Count ?? 0));
 
     private void Add(IReadOnlyList<Step> steps)
     {
@@ -112,7 +121,7 @@ internal sealed class ListCompiler
         switch (expression)
         {
             case BoundChoice choice:
-                return new BoundLiteral(choice.Span, _task.Choices[choice.Choice]);
+                return new BoundSlot(choice.Span, _choices + choice.Choice);
             case BoundSize size:
                 return Count(new Statistic(StatisticKind.Size, Set(size.Set), null, _slots++), statistics);
             case BoundTally tally:

@@ -46,13 +46,25 @@ internal sealed class ListContext
     public static bool Has(BigInteger types, int type) => !((types >> type) & 1).IsZero;
 
     /// <summary>Single values at the start: private inputs.</summary>
-    public Value[] Start()
+    public Value[] Start(IReadOnlyList<Value> choices)
     {
         Value[] single = new Value[Code.Slots];
         Array.Fill(single, Value.None);
         for (int i = 0; i < Task.Inputs.Count; i++)
             single[Task.Protocol.Inputs[i].Slot] = Task.Inputs[i];
-        return single;
+        return Code.ChoicesOnlySizeDraws ? single : WithChoices(single, choices);
+    }
+
+    /// <summary>Whether a slot's content is not part of a structure: a number of the cheat that only sizes draws.</summary>
+    public bool IsOutside(int slot) => Code.ChoicesOnlySizeDraws && slot >= Code.FirstChoice && slot < Code.FirstChoice + (Task.Case?.Choices.Count ?? 0);
+
+    /// <summary>Slots with the cheat's numbers put in.</summary>
+    public Value[] WithChoices(Value[] single, IReadOnlyList<Value> choices)
+    {
+        Value[] all = [.. single];
+        for (int i = 0; i < choices.Count; i++)
+            all[Code.FirstChoice + i] = choices[i];
+        return all;
     }
 
     public Value Evaluate(BoundExpression expression, Value[] slots) => ValueEvaluator.Evaluate(expression, slots, _levels);

@@ -1,3 +1,4 @@
+using ResourceCheck.Numerics.Counting;
 using ResourceCheck.Scripts.Binding;
 
 namespace ResourceCheck.Engines.Lists;
@@ -41,4 +42,5 @@ public sealed record ListTask
 /// <summary>Limits of an evaluation by counting.</summary>
 /// <param name="States">Most states of counts held at once; each takes about 100 bytes.</param>
 /// <param name="Operations">Most transitions between states.</param>
-public sealed record ListLimits(int States = 20_000_000, double Operations = 5e9);
+/// <param name="Negligible">Paths less probable than this are left out; all of them together do not show at 1e-27, which is 1e-12 of 1e-15.</param>
+public sealed record ListLimits(int States = 20_000_000, double Operations = 5e9, double Negligible = BinomialRow.Negligible);

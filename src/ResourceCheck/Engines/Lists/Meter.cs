@@ -11,6 +11,9 @@ internal sealed class Meter(ListLimits limits, CancellationToken cancellation)
 
     public long Transitions { get; private set; }
 
+    /// <summary>Paths less probable than this are left out.</summary>
+    public double Negligible => limits.Negligible;
+
     public void Count(int transitions, CountTable table)
     {
         Transitions += transitions;

@@ -10,19 +10,22 @@ namespace ResourceCheck.Engines.Lists;
 /// </summary>
 internal sealed class OwnCounts
 {
+    private readonly ListProgram _program;
     private readonly ListContext _context;
+    private readonly IReadOnlyList<Value> _choices;
     private readonly ListLimits _limits;
     private readonly Meter _meter;
     private readonly double _neglected;
     private readonly CancellationToken _cancellation;
     private long _work;
 
-    public OwnCounts(ListTask task, double neglected, CancellationToken cancellation)
+    public OwnCounts(ListProgram program, IReadOnlyList<Value> choices, ListLimits limits, double neglected, CancellationToken cancellation)
     {
-        CountingEngine.RequireCopies(task.Lists.Copies);
-        _context = new ListContext(task, ListCompiler.Compile(task));
-        _limits = task.Limits;
-        _meter = new Meter(task.Limits, cancellation);
+        _program = program;
+        _context = program.Context;
+        _choices = choices;
+        _limits = limits;
+        _meter = new Meter(limits, cancellation);
         _neglected = neglected;
         _cancellation = cancellation;
     }
@@ -35,8 +38,8 @@ internal sealed class OwnCounts
     {
         BigInteger[] parts = [.. Parts()];
         int tags = parts.Length - 1;
-        Counter counter = new(_context, _meter, tags);
-        counter.Deposit(0, CountingEngine.Start(_context, [.. parts.Select(p => new Cell(p, false, BigInteger.Zero))]), Counts(parts));
+        Counter counter = new(_program, _choices, _meter, tags);
+        counter.Deposit(0, _program.Start(_choices, [.. parts.Select(p => new Cell(p, false, BigInteger.Zero))]), Counts(parts));
         counter.RunTo(_context.Code.LastCheatOperation);
         List<Drawn> drawn = [.. counter.Waiting.SelectMany(w => Split(w.At, w.Structure, w.Table, tags))];
         Dictionary<string, double> harms = [];
@@ -64,7 +67,7 @@ internal sealed class OwnCounts
     {
         CountTable whole = new(1);
         whole.Add([(ushort)_context.Task.Lists.Copies], 1);
-        ListStructure structure = CountingEngine.Start(_context, [new Cell(_context.All, false, BigInteger.Zero)]);
+        ListStructure structure = _program.Start(_choices, new Cell(_context.All, false, BigInteger.Zero));
         int[][] allDiffer = [[.. Enumerable.Range(1, _context.Types)]];
         Refinement refinement = Refinement.Of(_context, structure, [.. parts[..^1].Select(p => new[] { p })], allDiffer);
         CountTable split = Splitter.Split(refinement, whole, 0, _meter);
@@ -112,7 +115,7 @@ internal sealed class OwnCounts
     private double Harm(Drawn state)
     {
         Meter meter = new(_limits, _cancellation);
-        Counter counter = new(_context, meter, 0);
+        Counter counter = new(_program, _choices, meter, 0);
         CountTable start = new(state.Counts.Length);
         start.Add(state.Counts, 1);
         counter.Deposit(state.At, state.Structure, start);

@@ -30,8 +30,8 @@ internal sealed class Prospect
                 prospect.Sets[slot] = [.. masks.Select(m => Members(m, context.Types))];
         }
 
-        if (open >= 0)
-            prospect._open[open] = true;
+        for (int slot = 0; slot < prospect._open.Length; slot++)
+            prospect._open[slot] = slot == open || context.IsOutside(slot);
         if (abortOpen >= 0)
             prospect.Abort(abortOpen);
         return prospect;

@@ -5,8 +5,10 @@ namespace ResourceCheck.Engines.Lists;
 /// <param name="GridPoints">Most points of the grid.</param>
 /// <param name="Climbs">Climbs from the grid's best points.</param>
 /// <param name="RandomClimbs">Climbs from random points.</param>
+/// <param name="Sweeps">Most sweeps of every number through its range.</param>
+/// <param name="Hopeless">A sweep ends where the value falls below this part of the best one.</param>
 /// <param name="Seed">Fixes the random points.</param>
-public sealed record SearchOptions(int ExhaustiveUpTo = 1000, int GridPoints = 1100, int Climbs = 12, int RandomClimbs = 4, ulong Seed = 1);
+public sealed record SearchOptions(int ExhaustiveUpTo = 1000, int GridPoints = 1100, int Climbs = 6, int RandomClimbs = 4, int Sweeps = 6, double Hopeless = 0.02, ulong Seed = 1);
 
 /// <summary>State of a search.</summary>
 /// <param name="Evaluations">Points evaluated so far.</param>

@@ -96,7 +96,7 @@ internal sealed class Splitter
         for (int i = 0; i < row.Probabilities.Length; i++)
         {
             double next = weight * row.Probabilities[i];
-            if (next < BinomialRow.Negligible)
+            if (next < _meter.Negligible)
                 continue;
             Move(_key, atom, row.First + i);
             Split(atoms, index + 1, positions - row.First - i, next);

@@ -10,6 +10,9 @@ public static class WorstCase
     /// <summary>Values of a choice that need not be whole, over its range.</summary>
     private const int RealSteps = 240;
 
+    /// <summary>Paths left out while points are compared; the value shown is found with the task's own limit.</summary>
+    private const double NegligibleInSearch = 1e-20;
+
     /// <summary>
     /// Searches the choices for the largest harm. With <see cref="ListTask.HoldsEnough"/> each harm is conditional on holding enough
     /// positions, without it each is the average over the cheat's list.
@@ -22,36 +25,30 @@ public static class WorstCase
     {
         DishonestCase cheat = task.Case ?? throw new ArgumentException("There is no cheat in this task.", nameof(task));
         ChoiceRange[] ranges = [.. cheat.Choices.Select(c => ChoiceRange.Of(c, task.Lists.Copies, task.Protocol.Levels))];
-        ConcurrentRefusal refusal = new();
-        SearchResult found = AttackSearch.Maximise(
-            [.. ranges.Select(r => (r.First, r.Last))],
-            point => refusal.Value(CountingEngine.Evaluate(task with { Choices = Values(ranges, point) }, cancellation)),
-            options,
-            progress,
-            cancellation);
-        if (refusal.Message is { } message)
-            return new AttackOutcome(null, null, found, message);
-        Value[] choices = Values(ranges, found.Choices);
-        ListOutcome outcome = CountingEngine.Evaluate(task with { Choices = choices }, cancellation);
-        return new AttackOutcome(choices, outcome.Evaluation, found, outcome.Refusal);
+        try
+        {
+            ListProgram program = ListProgram.Of(task);
+            ListLimits coarse = task.Limits with { Negligible = Math.Max(task.Limits.Negligible, NegligibleInSearch) };
+            SearchResult found = AttackSearch.Maximise(
+                [.. ranges.Select(r => (r.First, r.Last))],
+                point => program.Evaluate(Values(ranges, point), coarse, cancellation).Harm.Value,
+                options,
+                progress,
+                cancellation);
+            Value[] choices = Values(ranges, found.Choices);
+            return new AttackOutcome(choices, program.Evaluate(choices, task.Limits, cancellation), found, null);
+        }
+        catch (ListRefusalException refusal)
+        {
+            return new AttackOutcome(null, null, null, refusal.Message);
+        }
+        catch (AggregateException several) when (several.InnerExceptions.OfType<ListRefusalException>().FirstOrDefault() is { } refusal)
+        {
+            return new AttackOutcome(null, null, null, refusal.Message);
+        }
     }
 
     private static Value[] Values(ChoiceRange[] ranges, IReadOnlyList<int> point) => [.. ranges.Zip(point, (r, i) => r.At(i))];
-
-    /// <summary>Remembers that an evaluation was refused; the value then counts as least.</summary>
-    private sealed class ConcurrentRefusal
-    {
-        private string? _message;
-
-        public string? Message => _message;
-
-        public double Value(ListOutcome outcome)
-        {
-            if (outcome.Refusal is { } refusal)
-                Interlocked.CompareExchange(ref _message, refusal, null);
-            return outcome.Evaluation?.Harm.Value ?? double.NegativeInfinity;
-        }
-    }
 
     /// <summary>Whole numbers that stand for the values of a choice.</summary>
     private sealed record ChoiceRange(int First, int Last, Rational From, Rational Step, bool Whole)
