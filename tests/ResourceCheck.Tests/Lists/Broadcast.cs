@@ -34,6 +34,17 @@ internal static class Broadcast
     public static ListTask Splitter(int copies, IReadOnlyList<CopyType> law, bool enough, params int[] choices) => Cheating(
         Honest(copies, law), 0, [.. Splitting, .. Receivers(copies, HonestForwarding)], Differ(Slot(Out0), Slot(Out1)), enough, choices);
 
+    /// <summary>The splitter where receivers accept sets of any size.</summary>
+    public static ListTask SplitterWithoutCap(int copies, IReadOnlyList<CopyType> law, params int[] choices) => Cheating(
+        Honest(copies, law), 0, [.. Splitting, .. Receivers(copies, HonestForwarding, "1000")], Differ(Slot(Out0), Slot(Out1)), true, choices);
+
+    /// <summary>R0 shows positions of S's own set as evidence for the other bit; R1 removes its set from the evidence or not.</summary>
+    public static ListTask ForgerFromTheSet(int copies, IReadOnlyList<CopyType> law, bool removes)
+    {
+        Step[] forging = [Send(1, Sent0, Minus(One, Slot(X))), Send(1, Evidence, And(Slot(Set0), Where(R0, Minus(One, Slot(X)))))];
+        return Cheating(Honest(copies, law), 1, [.. HonestSender, .. Receivers(copies, forging, removes: removes)], Differ(Slot(Out1), Slot(X)), false);
+    }
+
     private static ListTask Cheating(ListTask honest, int by, IReadOnlyList<Step> steps, BoundExpression harm, bool enough, params int[] choices) => honest with
     {
         Case = new DishonestCase("cheat", [by], [.. choices.Select((_, i) => new Choice($"c{i}", Of(0), Of(honest.Protocol.Lists!.Copies), true))], [], steps, harm),
@@ -62,23 +73,23 @@ internal static class Broadcast
     private static Step[] Forging =>
         [Send(1, Sent0, Minus(One, Slot(X))), Send(1, Evidence, Some(Choice(0), Without(Where(R0, Slot(X)), Slot(Set0))))];
 
-    private static Step[] Receivers(int copies, Step[] forwarding) =>
+    private static Step[] Receivers(int copies, Step[] forwarding, string cap = "0.42", bool removes = true) =>
     [
-        Set(1, Kept0, If(Accepted(copies, R0, Bit0, Set0), Slot(Bit0), None)),
+        Set(1, Kept0, If(Accepted(copies, R0, Bit0, Set0, cap), Slot(Bit0), None)),
         .. forwarding,
-        Set(2, Kept1, If(Accepted(copies, R1, Bit1, Set1), Slot(Bit1), None)),
+        Set(2, Kept1, If(Accepted(copies, R1, Bit1, Set1, cap), Slot(Bit1), None)),
         Send(2, Sent1, Slot(Kept1)),
         Abort(1, And(Same(Slot(Kept0), None), Same(Slot(Sent1), None))),
         Abort(2, And(Same(Slot(Sent0), None), Same(Slot(Kept1), None))),
         Set(1, Out0, If(Same(Slot(Kept0), None), Slot(Sent1), Slot(Kept0))),
-        Set(2, Clean, Without(Slot(Evidence), Slot(Set1))),
+        Set(2, Clean, removes ? Without(Slot(Evidence), Slot(Set1)) : Slot(Evidence)),
         Set(2, Out1, If(Same(Slot(Kept1), None), Slot(Sent0), If(
             And(Differ(Slot(Sent0), None), Differ(Slot(Sent0), Slot(Kept1)), Believed(copies)), Slot(Sent0), Slot(Kept1)))),
     ];
 
-    private static BoundExpression Accepted(int copies, int own, int bit, int set) => And(
+    private static BoundExpression Accepted(int copies, int own, int bit, int set, string cap) => And(
         AtLeast(Size(Slot(set)), Times("0.25", copies)),
-        AtMost(Size(Slot(set)), Times("0.42", copies)),
+        AtMost(Size(Slot(set)), Times(cap, copies)),
         AtMost(Share(Same(Slot(own), Slot(bit)), Slot(set)), Of("0.06")));
 
     private static BoundExpression Believed(int copies) => And(

@@ -1,6 +1,6 @@
-using System.Diagnostics;
 using System.Numerics;
 using ResourceCheck.Engines.Lists;
+using ResourceCheck.Scripts.Binding;
 using Xunit;
 
 namespace ResourceCheck.Tests.Lists;
@@ -28,9 +28,7 @@ public sealed class BroadcastTests
     [InlineData(.05, 300, 3.6640237254e-2, 84, 0, 13, 1)]
     public void A_splitting_sender_that_holds_enough_does_the_reference_harm(double p, int copies, double harm, int n, int k1, int k2, int o)
     {
-        Stopwatch watch = Stopwatch.StartNew();
         ListEvaluation evaluation = Evaluated(Broadcast.Splitter(copies, Copies.Depolarised(p, p, p), true, n, k1, k2, o, copies * 42 / 100));
-        TestContext.Current.SendDiagnosticMessage($"{watch.ElapsedMilliseconds} ms, {evaluation.Work} transitions");
         Near(harm, evaluation.Harm.Value);
     }
 
@@ -87,6 +85,40 @@ public sealed class BroadcastTests
         }
 
         return (double)((outside << 300) / whole) * Math.ScaleB(1, -300);
+    }
+
+    [Fact]
+    public void Without_the_cap_on_sizes_a_sender_splits_the_receivers()
+    {
+        IReadOnlyList<CopyType> ideal = Copies.Depolarised(0, 0, 0);
+        Assert.InRange(Evaluated(Broadcast.Splitter(300, ideal, true, 75, 0, 0, 36, 300)).Harm.Value, 0, 1e-12);
+        Assert.InRange(Evaluated(Broadcast.SplitterWithoutCap(300, ideal, 75, 0, 0, 36, 300)).Harm.Value, 0.3, 1);
+    }
+
+    [Fact]
+    public void Without_the_removal_of_its_own_set_a_receiver_believes_any_forger()
+    {
+        IReadOnlyList<CopyType> ideal = Copies.Depolarised(0, 0, 0);
+        Assert.InRange(Evaluated(Broadcast.ForgerFromTheSet(300, ideal, true)).Harm.Value, 0, 2e-3);
+        Assert.InRange(Evaluated(Broadcast.ForgerFromTheSet(300, ideal, false)).Harm.Value, 0.99, 1);
+    }
+
+    [Fact]
+    public void Too_much_work_is_refused_with_its_figures()
+    {
+        ListTask task = Broadcast.Splitter(300, Copies.Depolarised(.02, .02, .02), true, 84, 0, 15, 7, 126) with { Limits = new ListLimits(Operations: 1e5) };
+        ListOutcome outcome = CountingEngine.Evaluate(task, TestContext.Current.CancellationToken);
+        Assert.Null(outcome.Evaluation);
+        Assert.Equal("Too much work: counting needs more than 1e5 transitions between states of counts.", outcome.Refusal);
+    }
+
+    [Fact]
+    public void Conditional_values_that_are_not_defined_are_refused()
+    {
+        ListTask task = Broadcast.Forger(60, Copies.Depolarised(0, 0, 0), 5);
+        DishonestCase cheat = task.Case! with { Harm = Terms.AtLeast(Terms.Size(Terms.Where(1, Terms.Of(0))), Terms.Of(3)), ListSteps = [.. task.Case.ListSteps!, Terms.Set(2, 10, Terms.Slot(10))] };
+        ListOutcome outcome = CountingEngine.Evaluate(task with { Case = cheat }, TestContext.Current.CancellationToken);
+        Assert.Equal("A set is counted from which the cheat was taken to hold enough positions: the conditional value is not defined here.", outcome.Refusal);
     }
 
     private static ListEvaluation Evaluated(ListTask task)

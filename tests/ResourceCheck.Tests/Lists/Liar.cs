@@ -27,7 +27,7 @@ internal static class Liar
 
     private static ListTask Cheating(ListTask honest, int by, IReadOnlyList<Step> steps, BoundExpression harm, int[] choices) => honest with
     {
-        Case = new DishonestCase("cheat", [by], [], [], steps, harm),
+        Case = new DishonestCase("cheat", [by], [.. choices.Select((_, i) => new Choice($"c{i}", Of(0), Of(honest.Protocol.Lists!.Copies), true))], [], steps, harm),
         Choices = [.. choices.Select(Value.Of)],
         HoldsEnough = true,
     };

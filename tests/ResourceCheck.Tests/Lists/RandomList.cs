@@ -10,6 +10,7 @@ internal sealed class RandomList(int seed)
 {
     private readonly Random _random = new(seed);
     private readonly HashSet<int> _made = [];
+    private readonly bool _choicesEverywhere = seed % 2 == 0;
 
     public ListTask Task()
     {
@@ -21,7 +22,7 @@ internal sealed class RandomList(int seed)
             Protocol = protocol,
             Copies = [.. Enumerable.Range(0, types).Select(_ => new CopyType([.. Enumerable.Range(0, 3).Select(_ => Level())], _random.Next(1, 9) / 16.0))],
             Inputs = [Value.Of(_random.Next(2))],
-            Case = new DishonestCase("cheat", [0], [], [], steps, Verdict(copies)),
+            Case = new DishonestCase("cheat", [0], [new Choice("c0", Of(0), Of(4), true), new Choice("c1", Of(0), Of(4), true)], [], steps, Verdict(copies)),
             Choices = [Value.Of(_random.Next(4)), Value.Of(_random.Next(3))],
         };
     }
@@ -80,6 +81,7 @@ internal sealed class RandomList(int seed)
     {
         0 => Slot(3),
         1 => Slot(_random.Next(8, 12)),
+        2 when _choicesEverywhere => Choice(_random.Next(2)),
         _ => Of(_random.Next(3)),
     };
 

@@ -1,4 +1,3 @@
-using System.Diagnostics;
 using ResourceCheck.Engines.Lists;
 using ResourceCheck.Scripts.Binding;
 using Xunit;
@@ -10,14 +9,11 @@ public sealed class WorstCaseTests
 {
     [Theory]
     [InlineData(0, 150, 1.5533298243e-1)]
-    [InlineData(.02, 150, 1.1264667916e-1)]
     [InlineData(0, 300, 9.0227455662e-2)]
     public void The_search_finds_at_least_the_reference_attack(double p, int copies, double harm)
     {
-        Stopwatch watch = Stopwatch.StartNew();
         AttackOutcome found = WorstCase.Find(Broadcast.Splitter(copies, Copies.Depolarised(p, p, p), true, 0, 0, 0, 0, 0), new SearchOptions(), null, TestContext.Current.CancellationToken);
         Assert.True(found.Refusal is null, found.Refusal);
-        TestContext.Current.SendDiagnosticMessage($"{watch.ElapsedMilliseconds} ms: {found.Evaluation!.Harm.Value:R} at {string.Join(", ", found.Choices!)}; {found.Search!.Check}");
         Assert.True(found.Evaluation!.Harm.Value >= harm * (1 - 1e-9), $"{found.Evaluation.Harm.Value:R} at {string.Join(", ", found.Choices!)}; {found.Search!.Check}");
     }
 
@@ -55,15 +51,11 @@ public sealed class WorstCaseTests
     [Fact]
     public void The_average_harm_of_the_reference_attack_is_below_its_conditional_value()
     {
-        Stopwatch watch = Stopwatch.StartNew();
-        ListTask task = Broadcast.Splitter(300, Copies.Depolarised(.02, .02, .02), false, 84, 0, 15, 7, 126);
+        ListTask task = Broadcast.Splitter(150, Copies.Depolarised(.02, .02, .02), false, 38, 0, 7, 2, 63);
         AdaptiveOutcome adaptive = AdaptiveCheat.Average(task, [task.Choices], 1e-9, default);
-        TestContext.Current.SendDiagnosticMessage($"average {adaptive.Harm!.Value:R} with {adaptive.Work} transitions in {watch.ElapsedMilliseconds} ms");
-        watch.Restart();
         double plain = CountingEngine.Evaluate(task, default).Evaluation!.Harm.Value;
-        TestContext.Current.SendDiagnosticMessage($"plain {plain:R} in {watch.ElapsedMilliseconds} ms");
         Assert.InRange(adaptive.Harm.Value, plain - 1e-9, plain);
-        Assert.InRange(plain, 0.01, 5.8103589605e-2);
+        Assert.InRange(plain, 0.01, 1.1264667916e-1);
     }
 
     private static Value[] Numbers(params int[] numbers) => [.. numbers.Select(Value.Of)];

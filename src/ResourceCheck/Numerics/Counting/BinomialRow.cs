@@ -6,7 +6,7 @@ namespace ResourceCheck.Numerics.Counting;
 internal sealed record BinomialRow(int First, double[] Probabilities)
 {
     /// <summary>Probabilities below this are left out: a sum over any number of states that fits in memory does not see them at 1e-27, which is 1e-12 of 1e-15.</summary>
-    public const double Negligible = 1e-42;
+    public const double Negligible = 1e-36;
 
     /// <summary>The row of a law, found outwards from its peak.</summary>
     public static BinomialRow Of(int trials, double p, double q)
