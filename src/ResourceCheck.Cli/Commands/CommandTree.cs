@@ -22,6 +22,7 @@ internal static class CommandTree
         Add("verify", "SCRIPT", "Prove or refute what the protocol claims, exactly, under ideal conditions.", VerifyCommand.Execute, [o.Parameter, o.Memory, .. writing, .. computing]);
         Add("inspect", "SCRIPT", "Compute nothing: show who knows what, the timeline, the engine and its cost, and every mistake.", InspectCommand.Execute, [.. judging, .. writing, .. computing]);
         Add("state", "FILE", "Tell what a prepared state is: validity, fidelity, purity, negativity, populations.", StateCommand.Execute, [o.Mend, .. writing]);
+        Add("storage", "CONDITIONS", "Tell how long emitters side by side keep the antisymmetric state, beside its symmetric counterpart and independent decay.", StorageCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, .. writing]);
         Add("format", "SCRIPT", "Print a script in its one shape.", FormatCommand.Execute, [o.Check, o.Write, o.Out, o.Quiet]);
         Add("explain", "[CODE]", "Tell cause and cure of a message; without a code, list all.", ExplainCommand.Execute, [o.PageFormat, o.Out]);
         Add("schema", "NAME", "Print the JSON schema of a file kind.", SchemaCommand.Execute, [o.Out]);
@@ -37,8 +38,11 @@ internal static class CommandTree
                 command.Options.Add(option);
             command.SetAction((parsed, token) => parsed.GetValue(Options.Help)
                 ? Task.FromResult(session.Terminal.Write(HelpPage.Of(command), ExitCodes.Done))
-                : execute(new Invocation(parsed, session), o, token));
+                : Interruptible(() => execute(new Invocation(parsed, session), o, token), token));
             root.Subcommands.Add(command);
         }
     }
+
+    // A read from a terminal or a pipe cannot be cancelled: it is left behind instead, and ends with the process.
+    private static Task<int> Interruptible(Func<Task<int>> execute, CancellationToken token) => Task.Run(execute, token).WaitAsync(token);
 }

@@ -34,13 +34,16 @@ internal static class Findings
         new("U006", Severity.Error, $"{command} needs {needs}.", $"add it behind {command}; resourcecheck {command} --help shows how.", Place.Of("the command line"));
 
     public static Diagnostic UnknownChoice(Words words, string option, string value, IReadOnlyList<string> choices) => new(
-        "U007", Severity.Error, $"`{value}` is no choice of {option}: {OneOf(choices)} fit here.", Suggest(Nearest.To(value, choices), $"choose {OneOf(choices)}."), words.PlaceOf(value, option));
+        "U007", Severity.Error, $"`{value}` is no choice of {option}: {OneOf(choices)} {(choices.Count == 1 ? "fits" : "fit")} here.", Suggest(Nearest.To(value, choices), $"choose {OneOf(choices)}."), words.PlaceOf(value, option));
 
     public static Diagnostic NoPair(Words words, string option, string value, string example) => new(
         "U008", Severity.Error, $"`{value}` behind {option} is not of the form name=value.", $"write {option} {example}.", words.PlaceOf(value, option));
 
     public static Diagnostic NoWholeNumber(Words words, string option, string value, string range) => new(
         "U009", Severity.Error, $"`{value}` is no value for {option}: a whole number {range} fits here.", "write it in decimal digits, without point, unit or separators.", words.PlaceOf(value, option));
+
+    public static Diagnostic NoTime(Words words, string option, string value) => new(
+        "U014", Severity.Error, $"`{value}` is no time for {option}: a number above 0 with its unit fits here.", $"write for example {option} \"5 ns\".", words.PlaceOf(value, option));
 
     public static Diagnostic NoMemorySize(Words words, string value) => new(
         "U010", Severity.Error, $"`{value}` is no memory size: a number above 0 with B, kB, MB, GB, TB, KiB, MiB, GiB or TiB fits here.", "write for example \"4 GB\".", words.PlaceOf(value, "--memory"));

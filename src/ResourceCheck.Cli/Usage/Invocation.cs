@@ -4,6 +4,7 @@ using System.Globalization;
 using ResourceCheck.Cli.Files;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Judgement;
+using ResourceCheck.Quantities;
 
 namespace ResourceCheck.Cli.Usage;
 
@@ -75,6 +76,17 @@ internal sealed class Invocation
         if (size is null)
             Findings.Add(Usage.Findings.NoMemorySize(_words, text));
         return size;
+    }
+
+    /// <summary>An option's time in seconds, or null when it is not given.</summary>
+    public double? Time(Option<string[]> option)
+    {
+        if (Text(option) is not { } text)
+            return null;
+        if (Durations.TryParse(text, out double seconds))
+            return seconds;
+        Findings.Add(Usage.Findings.NoTime(_words, option.Name, text));
+        return null;
     }
 
     /// <summary>An option's pairs of name and value, in the order given.</summary>

@@ -12,7 +12,7 @@ internal sealed class Options
     public static readonly string[] PageFormats = ["text", "markdown"];
 
     /// <summary>Choices of <c>--engine</c>.</summary>
-    public static readonly string[] Engines = ["dense", "product", "sampled"];
+    public static readonly string[] Engines = ["dense"];
 
     public static Option<bool> Help { get; } = new("--help", "-h") { Description = "Show how a command is used.", Recursive = true };
 
@@ -24,7 +24,7 @@ internal sealed class Options
 
     public Option<string[]> Parameter { get; } = Value("--parameter", "NAME=VALUE", "Set a parameter: a number, a fraction, a list 3,4, a range 3..8, or all. May be repeated.");
 
-    public Option<string[]> Engine { get; } = Value("--engine", "NAME", "Evaluate with dense, product or sampled instead of letting the program choose.", Engines);
+    public Option<string[]> Engine { get; } = Value("--engine", "NAME", "Evaluate with this engine (dense) instead of letting the program choose.", Engines);
 
     public Option<string[]> Memory { get; } = Value("--memory", "SIZE", "Most memory an engine may take, such as \"4 GB\".");
 
@@ -37,6 +37,12 @@ internal sealed class Options
     public Option<string[]> Seed { get; } = Value("--seed", "NUMBER", "Seed of sampled figures; the same seed gives the same figures. Default 1.");
 
     public Option<string[]> Threads { get; } = Value("--threads", "NUMBER", "Threads to use; 0, the default, uses all cores.");
+
+    public Option<string[]> Parties { get; } = Value("--parties", "NUMBER", "Number of emitters, one per party. Default 3.");
+
+    public Option<string[]> Until { get; } = Value("--until", "TIME", "Last storage time, such as \"5 ns\"; without it the duration in the conditions.");
+
+    public Option<string[]> Points { get; } = Value("--points", "NUMBER", "Number of times from 0 on. Default 41.");
 
     public Option<bool> Quiet { get; } = new("--quiet") { Description = "Show no warnings on standard error; documents still hold them." };
 

@@ -150,12 +150,6 @@ internal static class ConditionsCatalogue
             "Write the key like the one shown.",
             "{ \"levels\": { \"coherence\": { \"0:1\": \"5 ms\" } } }"),
         new(
-            "C025",
-            "Not in this version",
-            "The key belongs to a later version.",
-            "Take it out.",
-            "{ \"storage\": { } }"),
-        new(
             "C026",
             "Keys beside party names",
             "A section mixes keys for everybody with party names.",
@@ -311,6 +305,36 @@ internal static class ConditionsCatalogue
             "Family in place of a party",
             "The name is that of a family.",
             "Name its members: P[3] or P[1..4]."),
+        new(
+            "C061",
+            "Wrong number of entries",
+            "A list has one entry per emitter or per transition, and this one has more or fewer.",
+            "Give one entry for each; N emitters have N levels and N-1 transitions."),
+        new(
+            "C062",
+            "Spacing missing",
+            "A pair, ring or chain is laid out from the distance of neighbours.",
+            "Give `spacing` in wavelengths or metres."),
+        new(
+            "C063",
+            "Pair of more than two",
+            "The shape `pair` has two emitters, the protocol another number.",
+            "Choose ring, chain, point or explicit positions."),
+        new(
+            "C064",
+            "Wavelength missing",
+            "A length in metres means nothing to collective decay unless the wavelength is known.",
+            "Give `wavelength`, or lengths in wavelengths."),
+        new(
+            "C065",
+            "Unfit geometry",
+            "Emitters coincide outside the shape `point`, a dipole has no direction, or transitions of one wavelength with dipoles that are not orthogonal would couple to each other.",
+            "Move the emitters apart, give a direction, or tell the wavelengths as they differ."),
+        new(
+            "C066",
+            "No storage",
+            "`resourcecheck storage` follows what the `storage` section of the conditions describes.",
+            "Add a `storage` section."),
         new(
             "C070",
             "Malformed path",

@@ -47,6 +47,16 @@ public static class ConditionsFile
         return Outcome<World>.From(world, findings.InOrder(document.Name));
     }
 
+    /// <summary>The storage section for a number of emitters; a finding when there is none.</summary>
+    public static Outcome<CollectiveModel> Storage(ConditionsDocument document, int emitters)
+    {
+        Findings findings = new();
+        if (document.Root.Find("storage") is not GroupSetting storage)
+            return Outcome<CollectiveModel>.Failed([ConditionsMessages.NoStorage(document.Name)]);
+        CollectiveModel? model = new CollectiveBuilder(emitters, findings).Build(storage, "duration");
+        return model is null || findings.HasErrors ? Outcome<CollectiveModel>.Failed(findings.InOrder(document.Name)) : Outcome<CollectiveModel>.Of(model);
+    }
+
     /// <summary>The JSON schema of conditions files, as published.</summary>
     public static string Schema => SchemaWriter.Write(KeyTable.Root);
 

@@ -166,10 +166,30 @@ internal static class ConditionsMessages
         },
         $"write it like \"{shape.KeyExample}\"");
 
-    public static Diagnostic NotInThisVersion(Spot at, string path) =>
-        Error("C025", at,
-            $"`{path}` is not available in this version.",
-            "take it out");
+    public static Diagnostic WrongCount(Spot at, string path, int found, int wanted, string what) =>
+        Error("C061", at,
+            $"`{path}` has {found} entries, but the protocol has {wanted} {what}.",
+            "give one entry for each");
+
+    public static Diagnostic ShapeNeedsSpacing(Spot at, string path, string shape) =>
+        Error("C062", at,
+            $"A {shape} needs the distance of its neighbours, but `{path}.spacing` is missing.",
+            "write for example \"spacing\": \"0.1 wavelengths\"");
+
+    public static Diagnostic PairOfTwo(Spot at, int parties) =>
+        Error("C063", at,
+            $"A pair has two emitters, but the protocol has {parties}: ring, chain, point or `positions` fit here.",
+            "choose another shape");
+
+    public static Diagnostic WavelengthNeeded(Spot at, string path) =>
+        Error("C064", at,
+            $"`{path}` is in metres, and no `wavelength` says how long that is for the light.",
+            "give `wavelength`, or the length in wavelengths");
+
+    public static Diagnostic NoStorage(string file) =>
+        new("C066", Severity.Error, "These conditions have no `storage` section, so there is nothing to follow.", "add one, such as {\"shape\": \"ring\", \"spacing\": \"0.1 wavelengths\", \"linewidth\": \"6.07 MHz\", \"duration\": \"5 ns\"}", Place.Of(file));
+
+    public static Diagnostic BadGeometry(Spot at, string what, string cure) => Error("C065", at, what, cure);
 
     public static Diagnostic KeyBesideParties(Spot at, string path, string name) =>
         Error("C026", at,

@@ -28,6 +28,17 @@ public sealed record IdealPreparation : StatePreparation;
 /// <param name="Mend">Whether the nearest density matrix is used when the file's is not one.</param>
 public sealed record FilePreparation(string File, bool Mend) : StatePreparation;
 
+/// <summary>What collective decay leaves of a start.</summary>
+/// <param name="Start">Where relaxation starts.</param>
+/// <param name="Decay">How the emitters decay, and for how long.</param>
+public sealed record RelaxedPreparation(RelaxedStart Start, CollectiveModel Decay) : StatePreparation;
+
+/// <summary>Start of relaxation; exactly one of its parts is set.</summary>
+/// <param name="Levels">Level of each emitter.</param>
+/// <param name="Bystanders">The first two emitters share (|01⟩-|10⟩)/√2, the others are in these levels.</param>
+/// <param name="File">A prepared state's file.</param>
+public sealed record RelaxedStart(IReadOnlyList<int>? Levels, IReadOnlyList<int>? Bystanders, string? File);
+
 /// <summary>Built by exchange pulses (page 4), one step per further party, with errors in the last step or in each.</summary>
 /// <param name="Steps">One entry per step 1→2, 2→3, …; entry s prepares s+2 parties.</param>
 public sealed record ExchangePreparation(IReadOnlyList<ExchangeStep> Steps) : StatePreparation;

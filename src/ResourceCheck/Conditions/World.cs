@@ -17,6 +17,9 @@ public sealed record World
     /// <summary>How the shared state starts.</summary>
     public ResourceModel Resource { get; init; } = ResourceModel.Ideal;
 
+    /// <summary>Collective decay before the particles part; null when there is no storage.</summary>
+    public CollectiveModel? Storage { get; init; }
+
     /// <summary>Preparation rate; null when the conditions do not give it.</summary>
     public PreparationModel? Preparation { get; init; }
 

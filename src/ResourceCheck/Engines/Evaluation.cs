@@ -41,6 +41,9 @@ public sealed record Evaluation
     /// <summary>The sides of the script's claims in order: left, right.</summary>
     public required IReadOnlyList<(Estimate Left, Estimate Right)> Claims { get; init; }
 
+    /// <summary>Estimated error of integrating collective decay, in probabilities; 0 when there was none.</summary>
+    public double IntegrationError { get; init; }
+
     /// <summary>Outcomes of whole runs, most probable first, at most a handful.</summary>
     public required IReadOnlyList<BranchEvaluation> Ends { get; init; }
 

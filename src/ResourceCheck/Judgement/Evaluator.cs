@@ -18,6 +18,8 @@ internal static class Evaluator
     {
         if (request.Engine is not (null or "dense"))
             return Outcome<EngineChoice>.Failed([JudgementMessages.UnknownEngine(request.Engine)]);
+        if (setting.World.Storage is not null && setting.Protocol.Levels > RelaxedPrepared.MostParties)
+            return Outcome<EngineChoice>.Failed([JudgementMessages.CollectiveTooLarge(setting.Protocol.Levels, RelaxedPrepared.MostParties)]);
         EngineChoice choice = DenseEngine.Estimate(setting.Plan, Reason(setting, request));
         double limit = Math.Min(request.MemoryLimit ?? (GC.GetGCMemoryInfo().TotalAvailableMemoryBytes * UsableMemory), DenseEngine.LargestMemory);
         return choice.MemoryBytes > limit ? Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit)]) : Outcome<EngineChoice>.Of(choice);

@@ -19,6 +19,9 @@ public static class Judge
         { Findings: var findings } => Outcome<VerifyResult>.Failed(findings),
     };
 
+    /// <summary>Follows storage side by side against time.</summary>
+    public static Outcome<StorageResult> Storage(StorageRequest request) => StorageJudgement.Of(request);
+
     /// <summary>Tells what would be computed, without computing it.</summary>
     public static Outcome<InspectResult> Inspect(RunRequest request) => Setup.From(request) switch
     {

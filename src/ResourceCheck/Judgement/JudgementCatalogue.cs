@@ -12,6 +12,8 @@ internal static class JudgementCatalogue
         new("E002", "unknown engine", "The engine named with --engine does not exist.", "Leave --engine out; the program chooses and says why.", "--engine fast"),
         new("E003", "nothing kept", "No copy survives: a `keep` that never holds, a transmission of 0 on a heralded flight, or detectors that never click.", "Look at the keeps of the script and at transmission, efficiency and dark counts of the conditions."),
         new("E004", "undefined figure", "A figure divides by zero or is asked for copies that never occur, such as probability(A given B) with B impossible, or a Bell value at a checkpoint where a party holds no qudit.", "Change the condition behind `given`, or give the figure a case in which it is defined."),
+        new("E006", "too many emitters", "Without a photon the state of N emitters stays among N! arrangements of levels, which are laid out up to nine emitters.", "Ask for fewer emitters."),
+        new("E007", "storage too large", "What is left after a photon is followed with the density operator of all emitters.", "Lower the number of parties, or use `resourcecheck storage`, which follows copies without a photon."),
         new("P001", "unknown parameter", "--parameter names something that the script does not declare.", "Use a declared name; `inspect` lists them.", "--parameter m=3"),
         new("P002", "unreadable value", "The value of --parameter is no number, fraction, list, range or `all`.", "Write a number, 1/3, 3,4 or 3..8.", "--parameter n=three"),
         new("P003", "outside the domain", "The script limits the values of this parameter.", "Choose a value inside, or widen the domain in the script.", "--parameter n=40"),
@@ -22,5 +24,7 @@ internal static class JudgementCatalogue
         new("P011", "no claims", "`verify` proves what a script claims, and this one claims nothing.", "State what the protocol promises, such as `claim success = 1`."),
         new("P012", "matrix size", "A matrix file named by the script does not have as many rows as each qudit has levels.", "Give a matrix of that size."),
         new("P013", "not unitary", "The columns of a matrix file named by the script are not orthonormal to 1e-9.", "Give every entry with all its digits."),
+        new("P020", "no exchange shifts at one point", "At no distance the exchange shifts between emitters have no bound; the shape `point` is the limit in which they are left out.", "Give a shape with a spacing to see what they do."),
+        new("P021", "dark is not stable", "The antisymmetric state hardly emits, but exchange shifts that differ from pair to pair turn it into other dark states: the no-photon probability stays high while the fidelity falls.", "Make all pairs equivalent, stand further apart, or store for a shorter time."),
     ];
 }

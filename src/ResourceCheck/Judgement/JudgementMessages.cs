@@ -69,6 +69,22 @@ internal static class JudgementMessages
         "look at the condition behind `given`, or at the divisor",
         Place.Of("result"));
 
+    public static Diagnostic TooManyEmitters(int emitters, int most) => new(
+        "E006", Severity.Error, $"Storage of {emitters} emitters without a photon takes {emitters}! amplitudes: up to {most} emitters fit here.", "ask for fewer emitters", Place.Of("--parties"));
+
+    public static Diagnostic CollectiveTooLarge(int parties, int most) => new(
+        "E007", Severity.Error, $"Storage with photons evolves the density operator of all emitters, which {parties} of them do not fit in: up to {most} fit here.", "lower the number of parties, or look at storage alone with `resourcecheck storage`", Place.Of("storage"));
+
+    public static Diagnostic WithoutShifts() => new(
+        "P020", Severity.Note, "The emitters stand at one point: exchange shifts, which have no bound there, are left out.", "give a shape with a spacing to see what the shifts do", Place.Of("storage.shape"));
+
+    public static Diagnostic DarkNotStable(double time, double noPhoton, double fidelity, int first, int second) => new(
+        "P021",
+        Severity.Warning,
+        $"Dark is not stable here: after {FigureText.Time(time)} the state has emitted nothing with probability {FigureText.Number(noPhoton)}, yet its fidelity is {FigureText.Number(fidelity)} (both exact). Exchange shifts move it, most of all the one between emitters {first} and {second}.",
+        "make all pairs equivalent (a pair, an equilateral triangle), stand further apart, or store for a shorter time",
+        Place.Of("storage"));
+
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
 

@@ -45,6 +45,7 @@ internal static class RunJudgement
             Conditions = Provenance.Conditions(setup),
             Overrides = setup.Request.Overrides,
             Engine = all.MaxBy(e => e.Actual.Engine.MemoryBytes)!.Actual.Engine,
+            IntegrationError = all.Max(e => e.Actual.IntegrationError),
             Seed = null,
             Parameters = Provenance.Parameters(setup),
             Cases = [new CaseResult("honest", [], MetricGathering.Metrics(all))],
@@ -57,7 +58,7 @@ internal static class RunJudgement
             VerdictText = GoalJudgement.Sentence(goals, all),
             Hint = Limits.Hint(goals, all, setup.Request),
             Timeline = Provenance.Schedule(longest),
-            Warnings = [.. setup.Notes, .. Notes(all)],
+            Warnings = [.. setup.Notes, .. Notes(all), .. longest.World.Storage is { } storage ? StorageAdvice.Of(storage, storage.Time.Seconds) : []],
         };
     }
 

@@ -25,6 +25,9 @@ public sealed record RunResult
     /// <summary>Which engine and why.</summary>
     public required EngineChoice Engine { get; init; }
 
+    /// <summary>Estimated error of the probabilities from integrating collective decay; 0 when there was none.</summary>
+    public double IntegrationError { get; init; }
+
     /// <summary>Seed of sampled figures; null when nothing was sampled.</summary>
     public required long? Seed { get; init; }
 

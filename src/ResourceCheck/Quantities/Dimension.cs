@@ -12,6 +12,9 @@ internal enum Dimension
     /// <summary>Length, held in m.</summary>
     Length,
 
+    /// <summary>Length in wavelengths of the first transition.</summary>
+    Wavelengths,
+
     /// <summary>Cycles per second, held in Hz.</summary>
     Frequency,
 

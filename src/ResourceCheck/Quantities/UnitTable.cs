@@ -23,6 +23,8 @@ internal static class UnitTable
         new("\u00b5m", Dimension.Length, -6),
         new("\u03bcm", Dimension.Length, -6),
         new("nm", Dimension.Length, -9),
+        new("wavelengths", Dimension.Wavelengths, 0),
+        new("wavelength", Dimension.Wavelengths, 0),
         new("Hz", Dimension.Frequency, 0),
         new("mHz", Dimension.Frequency, -3),
         new("kHz", Dimension.Frequency, 3),
@@ -75,6 +77,7 @@ internal static class UnitTable
     {
         Dimension.Time => "a time",
         Dimension.Length => "a length",
+        Dimension.Wavelengths => "a length in wavelengths",
         Dimension.Frequency => "a frequency",
         Dimension.Rate => "a rate",
         Dimension.Speed => "a speed",

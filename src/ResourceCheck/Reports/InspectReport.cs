@@ -30,6 +30,7 @@ internal static class InspectReport
     /// <summary>A kind's name in every format.</summary>
     public static string Name(TimelineKind kind) => kind switch
     {
+        TimelineKind.Storage => "storage",
         TimelineKind.Flight => "flight",
         TimelineKind.Waiting => "waiting",
         TimelineKind.Operation => "operation",

@@ -26,6 +26,10 @@ public static class ReportWriter
     public static void Write(StateDescription result, string version, ReportFormat format, TextWriter writer, bool colour = false) =>
         Write(format, writer, colour, () => StateReport.From(result, version), () => StateDocument.Write(result, version, writer));
 
+    /// <summary>Writes the result of <c>storage</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(StorageResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => StorageReport.From(result), () => StorageDocument.Write(result, writer));
+
     private static void Write(ReportFormat format, TextWriter writer, bool colour, Func<Report> build, Action writeDocument)
     {
         switch (format)

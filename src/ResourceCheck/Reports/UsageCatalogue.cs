@@ -20,6 +20,7 @@ public static class UsageCatalogue
         new("U010", "not a memory size", "--memory takes a number and a unit of bytes.", "Write 4 GB or 512 MiB.", "resourcecheck run removal.protocol --memory 4"),
         new("U011", "options that exclude each other", "Two options ask for different things.", "Leave out one of the two.", "resourcecheck format removal.protocol --check --write"),
         new("U012", "name given twice", "The same parameter or path was set twice on the command line.", "Keep one of them; a list such as n=3,4 asks for several values.", "resourcecheck run removal.protocol --parameter n=3 --parameter n=4"),
+        new("U014", "no time", "The option takes a time with its unit.", "Write for example \"5 ns\" or \"2 us\".", "resourcecheck storage winter.conditions.json --until 5"),
         new("U020", "no such file", "The file does not exist, or a folder on its way does not.", "Check the spelling; names are relative to the folder you are in.", "resourcecheck run remval.protocol"),
         new("U021", "a folder where a file is needed", "The name is that of a folder.", "Name a file in it.", "resourcecheck run protocols"),
         new("U022", "file cannot be read", "The system refused to read the file.", "Check its permissions and the disk."),

@@ -22,6 +22,15 @@ internal static class LevelOrdering
         return state with { Density = density };
     }
 
+    /// <summary>The order that undoes another one.</summary>
+    public static int[] Inverse(IReadOnlyList<int> physical)
+    {
+        int[] inverse = new int[physical.Count];
+        for (int value = 0; value < physical.Count; value++)
+            inverse[physical[value]] = value;
+        return inverse;
+    }
+
     private static int[] SourceIndices(PreparedState state, IReadOnlyList<int> physical)
     {
         int[] source = [0];

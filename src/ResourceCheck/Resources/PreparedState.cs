@@ -17,6 +17,9 @@ public sealed record PreparedState
     /// <summary>State vector of d^N amplitudes, norm 1; null for a mixed state.</summary>
     public Complex[]? Ket { get; init; }
 
+    /// <summary>Probability that the preparation succeeded where it was heralded; the state itself has trace 1.</summary>
+    public double Probability { get; init; } = 1;
+
     /// <summary>Density matrix, d^N × d^N, row after row, trace 1; null for a pure state.</summary>
     public Complex[]? Density { get; init; }
 }

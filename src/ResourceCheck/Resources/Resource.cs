@@ -18,6 +18,7 @@ public static class Resource
         {
             IdealPreparation => Ideal(parties),
             ExchangePreparation exchange => ExchangePrepared.From(exchange, parties),
+            RelaxedPreparation relaxed => RelaxedPrepared.From(relaxed, parties),
             FilePreparation file => Fit(StateFile.Read(file.File, file.Mend), file.File, parties),
             _ => throw new NotSupportedException($"No way to prepare {model.Preparation.GetType().Name} is known."),
         };
@@ -31,7 +32,7 @@ public static class Resource
             ? Outcome<PreparedState>.Of(new() { Parties = parties, Levels = parties, Ket = AntisymmetricState.Ket(parties) })
             : Outcome<PreparedState>.Failed([StateMessages.TooManyParties(parties)]);
 
-    private static Outcome<PreparedState> Fit(Outcome<PreparedState> read, string file, int parties) =>
+    internal static Outcome<PreparedState> Fit(Outcome<PreparedState> read, string file, int parties) =>
         read.Value is { } state && (state.Parties != parties || state.Levels != parties)
             ? Outcome<PreparedState>.Failed([.. read.Findings, StateMessages.OtherSize(file, state, parties)])
             : read;

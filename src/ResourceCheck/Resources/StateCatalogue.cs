@@ -49,5 +49,7 @@ internal static class StateCatalogue
         new("D042", "Number of exchange steps", "N parties are built in N - 1 steps.", "Give one entry per step."),
         new("D043", "Exchange step malformed", "A step's errors or couplings are missing, not symmetric, or not finite.", "Give one coupling for every pair."),
         new("D044", "State of another size", "The file's parties or levels are not those of the protocol.", "Take another state or another number of parties."),
+        new("D045", "Relaxation of too many", "Relaxation follows the density operator of all emitters.", "Lower the number of parties, or give the relaxed state as a file."),
+        new("D046", "Nothing without a photon", "Heralding on no photon keeps nothing of this start.", "Leave `heralded` out, relax for a shorter time, or take another start."),
     ];
 }

@@ -270,6 +270,20 @@ internal static class StateMessages
         "take a state of that size, or set the protocol's number of parties to the state's",
         Place.Of(file));
 
+    public static Diagnostic RelaxedTooManyParties(int parties, int most) => new(
+        "D045",
+        Severity.Error,
+        $"Relaxation was asked for {parties} parties; density operators are evolved for up to {most}.",
+        "lower the number of parties, or give the relaxed state as a file",
+        Place.Of("resource.relaxed"));
+
+    public static Diagnostic NothingWithoutPhoton() => new(
+        "D046",
+        Severity.Error,
+        "No copy relaxes without a photon from this start, so heralding on none keeps nothing.",
+        "leave `heralded` out, relax for a shorter time, or take another start",
+        Place.Of("resource.relaxed"));
+
     private static Diagnostic Error(string code, string message, string cure, Place place) => new(code, Severity.Error, message, cure, place);
 
     private static string CureFor(double deviation) => deviation <= StateTolerances.Mendable ? MendCure : TooFarCure;

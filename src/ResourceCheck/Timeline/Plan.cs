@@ -38,6 +38,9 @@ public sealed record TimelineEntry(Duration Start, Duration End, int Party, Time
 /// <summary>Kinds of lines of the schedule.</summary>
 public enum TimelineKind
 {
+    /// <summary>The emitters stand side by side.</summary>
+    Storage,
+
     /// <summary>A qudit travels.</summary>
     Flight,
 

@@ -12,6 +12,9 @@ public abstract record PlanStep;
 /// <param name="Source">What a budget books it under.</param>
 public sealed record NoisePlanStep(int Party, SiteNoise Noise, Source Source) : PlanStep;
 
+/// <summary>Collective decay of all qudits before they part. Levels are physical ones.</summary>
+public sealed record StoragePlanStep(CollectiveModel Model) : PlanStep;
+
 /// <summary>The copy is dropped when the party's qudit did not arrive.</summary>
 public sealed record HeraldPlanStep(int Party) : PlanStep;
 

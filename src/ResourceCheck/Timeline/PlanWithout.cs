@@ -18,6 +18,7 @@ internal static class PlanWithout
     private static PlanStep? Step(PlanStep step, Source source, int? party, int levels) => step switch
     {
         NoisePlanStep noise => Hit(noise, source, party) ? null : noise,
+        StoragePlanStep when source == Source.Storage => null,
         ApplyPlanStep apply when source == Source.Operations && Hit(apply.Party, party) => apply with { Model = OperationModel.Ideal },
         MeasurePlanStep measure when source == Source.Detection && Hit(measure.Party, party) => measure with { Model = DetectionModel.Ideal(levels) },
         CheckpointPlanStep look => look with { Waits = [.. look.Waits.Where(w => !Hit(w, source, party))] },

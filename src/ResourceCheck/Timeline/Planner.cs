@@ -32,9 +32,11 @@ public sealed class Planner
     private Plan Lay()
     {
         Clock clock = new(_protocol.Parties.Count);
-        List<PlanStep> steps = [Look("prepared", 0, []), Look("stored", 0, [])];
-        AddInFlight(steps, clock);
-        AddFlights(steps, clock);
+        List<PlanStep> steps = [Look("prepared", 0, [])];
+        double parted = AddStorage(steps);
+        steps.Add(Look("stored", parted, []));
+        AddInFlight(steps, clock, parted);
+        AddFlights(steps, clock, parted);
         double arrived = clock.Latest(_protocol.Holders);
         steps.Add(Look("arrived", arrived, Waits(_protocol.Holders, clock, arrived)));
         Add(_protocol.Steps.Where(s => !IsInFlight(s)), [], steps, clock);
@@ -62,15 +64,25 @@ public sealed class Planner
 
     private bool IsInsidersSlot(int slot) => !_protocol.Outsiders.Contains(_protocol.Slots[slot].Party);
 
+    /// <summary>Preparation ends at time 0; storage, if there is any, lies between that and the flights. Returns when the particles part.</summary>
+    private double AddStorage(List<PlanStep> steps)
+    {
+        if (_world.Storage is not { } storage)
+            return 0;
+        steps.Add(new StoragePlanStep(storage));
+        Record(0, storage.Time.Seconds, -1, TimelineKind.Storage, "emitters stand side by side");
+        return storage.Time.Seconds;
+    }
+
     /// <summary>Interceptions act before the noise of the way and take no time.</summary>
-    private void AddInFlight(List<PlanStep> steps, Clock clock)
+    private void AddInFlight(List<PlanStep> steps, Clock clock, double parted)
     {
         foreach (Step step in _protocol.Steps.Where(IsInFlight))
         {
             if (step is InterceptStep intercept)
             {
                 steps.Add(new InterceptPlanStep(intercept.Victim, intercept.Basis, intercept.Slot));
-                Record(0, 0, intercept.Outsider, TimelineKind.Interception, _words.Of(intercept));
+                Record(parted, parted, intercept.Outsider, TimelineKind.Interception, _words.Of(intercept));
             }
             else
             {
@@ -79,14 +91,15 @@ public sealed class Planner
         }
     }
 
-    private void AddFlights(List<PlanStep> steps, Clock clock)
+    private void AddFlights(List<PlanStep> steps, Clock clock, double parted)
     {
         foreach (int party in _protocol.Holders)
         {
             PartyWorld world = _world.Parties[party];
             steps.AddRange(PartyNoise.Flight(party, world));
-            clock.Receive(party, world.Flight.Time.Seconds);
-            Record(0, world.Flight.Time.Seconds, party, TimelineKind.Flight, "qudit arrives");
+            double arrives = parted + world.Flight.Time.Seconds;
+            clock.Receive(party, arrives);
+            Record(parted, arrives, party, TimelineKind.Flight, "qudit arrives");
         }
     }
 

@@ -80,21 +80,26 @@ public sealed class ExitCodeTests : IDisposable
         Assert.Equal(3, (await _tool.Say("run", _tool.Script)).Code);
     }
 
-    [Fact]
-    public async Task An_interruption_ends_a_long_computation_at_once()
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public async Task An_interruption_ends_a_long_computation_or_a_waiting_read_at_once(bool reading)
     {
         using CancellationTokenSource source = new();
         using ManualResetEventSlim forever = new();
-        _tool.BeforeRun = () =>
+        void Wait()
         {
-            source.Cancel();
+            source.CancelAfter(TimeSpan.FromMilliseconds(50));
             forever.Wait(TimeSpan.FromSeconds(30));
-        };
+        }
+
+        _tool.BeforeRun = reading ? () => { } : Wait;
+        _tool.BeforeInput = reading ? Wait : () => { };
         System.Diagnostics.Stopwatch watch = System.Diagnostics.Stopwatch.StartNew();
-        Said said = await _tool.Say(source.Token, "run", _tool.Script);
+        Said said = await _tool.Say(source.Token, "run", reading ? "-" : _tool.Script);
+        Assert.True(watch.Elapsed < TimeSpan.FromSeconds(10));
         forever.Set();
         Assert.Equal((130, "", "Interrupted; nothing was written.\n"), (said.Code, said.Output, said.Error));
-        Assert.True(watch.Elapsed < TimeSpan.FromSeconds(10));
     }
 
     [Theory]

@@ -38,6 +38,8 @@ internal sealed class Tool : IDisposable
 
     public string Input { get; set; } = "";
 
+    public Action BeforeInput { get; set; } = () => { };
+
     public bool OutputIsTerminal { get; set; }
 
     public bool Trace { get; set; }
@@ -57,12 +59,18 @@ internal sealed class Tool : IDisposable
     public async Task<Said> Say(CancellationToken token, params string[] args)
     {
         using StringWriter output = new(), error = new();
-        ToolHost host = new(Output ?? output, error, () => new MemoryStream(Encoding.UTF8.GetBytes(Input)), OutputIsTerminal, OutputIsTerminal, Trace);
+        ToolHost host = new(Output ?? output, error, OpenInput, OutputIsTerminal, OutputIsTerminal, Trace);
         int code = await CommandLineTool.RunAsync(args, host, Steps(), token);
         return new Said(code, output.ToString(), error.ToString());
     }
 
     public void Dispose() => Directory.Delete(Folder, recursive: true);
+
+    private MemoryStream OpenInput()
+    {
+        BeforeInput();
+        return new MemoryStream(Encoding.UTF8.GetBytes(Input));
+    }
 
     private Library Steps() => new()
     {

@@ -18,7 +18,7 @@ internal static class KeyTableMarkdown
             if (!written.Add(next.Group.Name))
                 continue;
             lines.AddRange(["", $"### {next.Title}", "", "| key | value | when absent | meaning |", "| --- | --- | --- | --- |"]);
-            foreach (Key key in next.Group.Keys.Where(k => k.Shape is not LaterShape))
+            foreach (Key key in next.Group.Keys)
             {
                 lines.Add($"| `{key.Name}` | {Cell(ValueOf(key.Shape))} | {Cell(key.Required ? "must be given" : key.Default)} | {Cell(key.Meaning)} |");
                 foreach (GroupShape group in GroupsIn(key.Shape))

@@ -34,7 +34,7 @@ internal static class RandomConditions
     /// <summary>Each key with even odds, required ones always; of alternatives one is chosen.</summary>
     private static Gen<JToken> Group(GroupShape group, bool complete)
     {
-        Key[] keys = [.. group.Keys.Where(k => k.Shape is not LaterShape)];
+        Key[] keys = [.. group.Keys];
         return Gen.Elements(true, false).ListOf(keys.Length).SelectMany(coins => Gen.Choose(0, 5).SelectMany(pick =>
         {
             HashSet<string> chosen = [.. keys.Where((k, i) => coins[i] || (complete && k.Required)).Select(k => k.Name)];

@@ -32,7 +32,7 @@ internal sealed class ScalarChecker(Findings findings)
         else if (found != Dimension.None && !shape.Fits.Contains(found))
             findings.Add(ConditionsMessages.WrongDimension(node.Spot, path, parsed, shape));
         else
-            return Bounded(node, parsed, shape.Bounds, shape, path, shape.Fits[0]);
+            return Bounded(node, parsed, shape.Bounds, shape, path, found == Dimension.None ? shape.Fits[0] : found);
         return null;
     }
 

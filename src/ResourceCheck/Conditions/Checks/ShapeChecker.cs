@@ -13,8 +13,6 @@ internal sealed class ShapeChecker(Findings findings)
 
     private Setting? Check(Node node, Shape shape, string path)
     {
-        if (shape is LaterShape)
-            return Refuse(ConditionsMessages.NotInThisVersion(node.Spot, path));
         if (node is NullNode)
             return Refuse(ConditionsMessages.Null(node.Spot, path, shape));
         if (!shape.Judges(node))

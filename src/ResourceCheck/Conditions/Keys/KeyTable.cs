@@ -81,6 +81,49 @@ internal static class KeyTable
         [.. ExchangeStep.Keys, new("steps", new ListShape(ExchangeStep, 1, 3, "a list with one object per step"), "last step only", "errors of each step 1→2, 2→3, 3→4 in place of the last alone")],
         [new(["steps", "timeError"], false), new(["steps", "phaseError"], false), new(["steps", "couplings"], false)]);
 
+    private static readonly Shape Spacing = new QuantityShape([Dimension.Wavelengths, Dimension.Length], Bounds.Any, "0.1 wavelengths");
+
+    private static readonly Shape Linewidth = new QuantityShape([Dimension.Frequency], Bounds.Positive, "6.07 MHz");
+
+    private static readonly Shape Wavelength = new QuantityShape([Dimension.Length], Bounds.Positive, "780 nm");
+
+    private static readonly IReadOnlyList<Key> Geometry =
+    [
+        new("shape", new WordShape(["point", "pair", "ring", "chain"]), "", "how the emitters stand; `point` is the limit of no distance, without exchange shifts"),
+        new("positions", new ListShape(new ListShape(Spacing, 3, 3, "three coordinates such as [\"0 wavelengths\", \"0.1 wavelengths\", \"0 wavelengths\"]"), 2, 16, "a list with one place per emitter"), "", "where each emitter stands, in the order of the parties"),
+        new("spacing", new QuantityShape([Dimension.Wavelengths, Dimension.Length], Bounds.Positive, "0.1 wavelengths"), "", "distance of neighbours in a pair, ring or chain, in wavelengths of the first transition or in metres"),
+        new("dipoles", new ChoiceShape([new WordShape(["normal"]), new ListShape(new ListShape(new NumberShape(Bounds.Any, "1"), 3, 3, "three components such as [0, 0, 1]"), 1, 16, "a list with one vector per transition")]), "normal", "directions of the transition dipoles; `normal` stands on the plane of a ring and on the line of a chain"),
+        new("linewidth", new ChoiceShape([Linewidth, new ListShape(Linewidth, 1, 16, "a list with one linewidth per transition")]), "", "Γ/2π of the decay of level 0 into level j, the same for all or one per transition", true),
+        new("wavelength", new ChoiceShape([Wavelength, new ListShape(Wavelength, 1, 16, "a list with one wavelength per transition")]), "nearly the same for all", "wavelength of each transition; needed where lengths are in metres"),
+        new("heralded", new FlagShape(), "false", "whether copies that emitted a photon meanwhile are dropped"),
+        new("tolerance", new NumberShape(Bounds.Positive, "1e-12"), "1e-12", "truncation error allowed per step of the integration"),
+    ];
+
+    private static readonly IReadOnlyList<Alternative> GeometryAlternatives = [new(["shape", "positions"], true)];
+
+    private static readonly GroupShape Storage = new(
+        "storage",
+        [.. Geometry, new("duration", Shapes.Duration("5 ns"), "", "how long the emitters stay side by side", true)],
+        GeometryAlternatives);
+
+    private static readonly GroupShape RelaxedStart = new(
+        "relaxedStart",
+        [
+            new("levels", Shapes.PerLevel(Shapes.Level, "[0, 0, 0]"), "", "level of each emitter"),
+            new("bystanders", new ListShape(Shapes.Level, 0, 16, "a list of levels such as [2]"), "", "the first two emitters share (|01⟩-|10⟩)/√2, the others are in these levels"),
+            new("file", Shapes.File, "", "a prepared state"),
+        ],
+        [new(["levels", "bystanders", "file"], true)]);
+
+    private static readonly GroupShape Relaxed = new(
+        "relaxed",
+        [
+            .. Geometry,
+            new("start", new ChoiceShape([new WordShape(["excited"]), RelaxedStart]), "", "where relaxation starts: `\"excited\"` (all in level 0), levels, a pair with bystanders, or a file", true),
+            new("time", Shapes.Duration("50 ns"), "", "how long the emitters relax", true),
+        ],
+        GeometryAlternatives);
+
     private static readonly GroupShape Resource = new(
         "resource",
         [
@@ -88,7 +131,7 @@ internal static class KeyTable
             new("file", Shapes.File, "the ideal state", "prepared state to start from"),
             new("mend", new FlagShape(), "false", "whether the nearest density matrix replaces a file's matrix that slightly is none"),
             new("exchange", Exchange, "the ideal state", "building by exchange pulses, up to four parties"),
-            new("relaxed", new LaterShape(), "", "start by collective decay"),
+            new("relaxed", Relaxed, "the ideal state", "what collective decay leaves of a start"),
             new("levels", Shapes.PerLevel(Shapes.Level, "[2, 0, 1]"), "[0, 1, 2, …]", "physical level that plays each value of the script"),
         ],
         [new(["file", "exchange", "relaxed"], false)]);
@@ -165,7 +208,7 @@ internal static class KeyTable
             new("about", new TextShape(false), "", "what these conditions are, in one line"),
             new("resource", Resource, "the ideal state", "how the shared state starts"),
             new("preparation", Preparation, "not known", "how often a copy is made; needed for wall-clock time"),
-            new("storage", new LaterShape(), "", "collective decay of emitters side by side"),
+            new("storage", Storage, "none", "collective decay while the emitters stand side by side"),
             new("levels", new PartyShape(Levels), "no decay", "decay of the levels that hold the qudit"),
             new("flight", new PartyShape(Flight), "instant, no loss", "way from the source to a party"),
             new("waiting", new PartyShape(Waiting), "`levels` go on acting", "what acts on a qudit that is held after arrival; `{}` for nothing"),

@@ -56,7 +56,7 @@ internal sealed class SchemaWriter
     {
         _json.WriteString("type", "object");
         _json.WriteStartObject("properties");
-        foreach (Key key in group.Keys.Where(k => k.Shape is not LaterShape))
+        foreach (Key key in group.Keys)
         {
             _json.WriteStartObject(key.Name);
             _json.WriteString("description", Capital(key.Meaning));
@@ -81,7 +81,7 @@ internal sealed class SchemaWriter
     private void WriteExclusions(GroupShape group)
     {
         IEnumerable<string[]> pairs = group.Alternatives.Where(a => !a.MayMeet).SelectMany(a => a.Names.SelectMany((x, i) => a.Names.Skip(i + 1).Select(y => new[] { x, y })));
-        string[][] exclusive = [.. pairs.Where(p => p.All(n => group.Find(n)!.Shape is not LaterShape))];
+        string[][] exclusive = [.. pairs];
         if (exclusive.Length == 0)
             return;
         _json.WriteStartArray("allOf");

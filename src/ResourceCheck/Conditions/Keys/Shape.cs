@@ -203,13 +203,3 @@ internal sealed record ChoiceShape(IReadOnlyList<Shape> Options) : Shape
     /// <inheritdoc/>
     public override bool Judges(Node node) => Options.Any(o => o.Judges(node));
 }
-
-/// <summary>A key that later versions will take.</summary>
-internal sealed record LaterShape : Shape
-{
-    /// <inheritdoc/>
-    public override string InWords => "nothing in this version";
-
-    /// <inheritdoc/>
-    public override bool Judges(Node node) => true;
-}

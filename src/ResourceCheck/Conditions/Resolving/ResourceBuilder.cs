@@ -23,7 +23,33 @@ internal sealed class ResourceBuilder(int parties, string folder, Findings findi
     {
         if (resource.Find("file") is TextSetting file)
             return new FilePreparation(Path.Combine(folder, file.Text), resource.Flag("mend"));
+        if (resource.Find("relaxed") is GroupSetting relaxed)
+            return Relaxed(relaxed);
         return resource.EntryOf("exchange") is { } exchange ? Exchange(exchange, (GroupSetting)exchange.Value) : new IdealPreparation();
+    }
+
+    private StatePreparation Relaxed(GroupSetting relaxed)
+    {
+        if (new CollectiveBuilder(parties, findings).Build(relaxed, "time") is not { } decay)
+            return new IdealPreparation();
+        return new RelaxedPreparation(StartOf(relaxed), decay);
+    }
+
+    private RelaxedStart StartOf(GroupSetting relaxed)
+    {
+        if (relaxed.Find("start") is not GroupSetting start)
+            return new RelaxedStart([.. Enumerable.Repeat(0, parties)], null, null);
+        if (start.Find("file") is TextSetting file)
+            return new RelaxedStart(null, null, Path.Combine(folder, file.Text));
+        bool pair = start.Find("bystanders") is not null;
+        ListSetting list = (ListSetting)(start.Find("bystanders") ?? start.Find("levels"))!;
+        int wanted = pair ? parties - 2 : parties;
+        if (list.Items.Count != wanted)
+            findings.Add(ConditionsMessages.WrongCount(list.Spot, list.Path, list.Items.Count, wanted, pair ? "emitters beside the pair" : "emitters"));
+        int[] levels = [.. list.Items.Cast<LevelSetting>().Select(l => l.Level)];
+        foreach (LevelSetting level in list.Items.Cast<LevelSetting>().Where(l => l.Level >= parties))
+            findings.Add(ConditionsMessages.NoSuchLevel(level.Spot, level.Path, level.Level, parties));
+        return pair ? new RelaxedStart(null, levels, null) : new RelaxedStart(levels, null, null);
     }
 
     private StatePreparation Exchange(Entry entry, GroupSetting exchange)

@@ -32,6 +32,7 @@ internal sealed class WorldBuilder
             About = (root.Find("about") as TextSetting)?.Text ?? "",
             Levels = _protocol.Levels,
             Resource = new ResourceBuilder(_protocol.Levels, ConditionsFile.FolderOf(_document.Name), _findings).Build(resource, order),
+            Storage = root.Find("storage") is GroupSetting storage ? new CollectiveBuilder(_protocol.Levels, _findings).Build(storage, "duration") : null,
             Preparation = PreparationOf(root.Find("preparation") as GroupSetting),
             Parties = parties,
             Messages = new MessageBuilder(_protocol, _names).Build(root.Find("messages") as GroupSetting, parties),

@@ -30,6 +30,8 @@ internal sealed class Branch
         return new Branch { Tensor = Tensor, Pending = Pending, Slots = slots, Factor = Factor, Aborted = Aborted };
     }
 
+    public Branch Holding(SiteTensor tensor) => new() { Tensor = tensor, Pending = Pending, Slots = Slots, Factor = Factor, Aborted = Aborted };
+
     public Branch Scaled(double factor) => new() { Tensor = Tensor, Pending = Pending, Slots = Slots, Factor = Factor * factor, Aborted = Aborted };
 
     public Branch WithAborted(int party) => new() { Tensor = Tensor, Pending = Pending, Slots = Slots, Factor = Factor, Aborted = Aborted | (1UL << party) };

@@ -1,5 +1,6 @@
 using System.Numerics;
 using ResourceCheck.Numerics;
+using ResourceCheck.Numerics.Collective;
 using ResourceCheck.Resources;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Timeline;
@@ -27,6 +28,8 @@ public static class DenseEngine
         double numbers = Math.Pow(site, plan.Protocol.Levels);
         int looks = plan.Steps.Count(s => s is CheckpointPlanStep);
         double memory = BytesPerNumber * numbers * StatesHeld;
+        if (plan.World.Storage is not null)
+            memory += MasterEquation.Bytes(plan.Protocol.Levels, plan.Protocol.Levels);
         return new EngineChoice("dense", reason, memory, numbers * ((looks * site) + (2 * plan.Protocol.Levels)));
     }
 
@@ -56,6 +59,7 @@ public static class DenseEngine
         return new Branch
         {
             Tensor = TensorBuilder.Build(basis, plan.Protocol.Holders, state, plan.World.Resource.White),
+            Factor = state.Probability,
             Pending = new SiteMap?[plan.Protocol.Parties.Count],
             Slots = slots,
         };

@@ -22,7 +22,7 @@ internal sealed class Tally
     private readonly BellTally _bell;
     private readonly History _failures;
     private readonly History _ends;
-    private double _success, _failure, _abort, _unseen;
+    private double _success, _failure, _abort, _unseen, _error;
 
     public Tally(Plan plan, OperatorBasis basis)
     {
@@ -36,6 +36,9 @@ internal sealed class Tally
 
     /// <summary>A measurement gave no click and the script does not handle that: the copy is dropped.</summary>
     public void Unseen(double weight) => _unseen += weight;
+
+    /// <summary>Estimated error of integrating collective decay.</summary>
+    public void IntegrationError(double error) => _error = Math.Max(_error, error);
 
     /// <summary>A look at a checkpoint in one branch.</summary>
     public void Look(CheckpointPlanStep step, Branch branch, LocalModels models)
@@ -86,6 +89,7 @@ internal sealed class Tally
             Reports = figures.Reports(),
             Claims = figures.Claims(),
             Ends = [.. _ends.MostProbable(kept, FailuresTold)],
+            IntegrationError = _error,
             Failures = [.. _failures.MostProbable(kept, FailuresTold)],
         };
     }

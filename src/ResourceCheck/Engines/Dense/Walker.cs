@@ -1,4 +1,8 @@
+using System.Numerics;
+using ResourceCheck.Conditions;
 using ResourceCheck.Numerics;
+using ResourceCheck.Numerics.Collective;
+using ResourceCheck.Resources;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Timeline;
 
@@ -42,6 +46,8 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
         {
             case NoisePlanStep noise:
                 return branch.Acting(noise.Party, models.Noise(noise.Noise));
+            case StoragePlanStep storage:
+                return Stored(storage.Model, branch);
             case HeraldPlanStep herald:
                 return branch.Acting(herald.Party, models.Basis.DropSink());
             case ApplyPlanStep apply:
@@ -59,6 +65,20 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
             default:
                 return Split(step, cursor, branch);
         }
+    }
+
+    /// <summary>Nothing has acted on single qudits yet, so no maps are pending.</summary>
+    private Branch Stored(CollectiveModel model, Branch branch)
+    {
+        IReadOnlyList<int>? physical = plan.World.Resource.PhysicalLevels;
+        int parties = branch.Tensor.Parties.Count;
+        PreparedState before = new() { Parties = parties, Levels = models.Basis.Levels, Density = TensorUnfolding.ToDensity(models.Basis, branch.Tensor) };
+        PreparedState inLevels = physical is null ? before : LevelOrdering.Of(before, LevelOrdering.Inverse(physical));
+        (Complex[] density, double error) = CollectiveDecay.Evolve(model, inLevels.Density!);
+        tally.IntegrationError(error);
+        PreparedState after = before with { Density = density };
+        after = physical is null ? after : LevelOrdering.Of(after, physical);
+        return branch.Holding(TensorBuilder.Build(models.Basis, branch.Tensor.Parties, after, 0));
     }
 
     private Branch? Split(PlanStep step, Cursor cursor, Branch branch)
