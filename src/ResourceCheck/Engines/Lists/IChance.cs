@@ -4,5 +4,5 @@ namespace ResourceCheck.Engines.Lists;
 internal interface IChance
 {
     /// <summary>One of several alternatives, with probabilities proportional to the weights.</summary>
-    int Pick(ReadOnlySpan<double> weights);
+    public int Pick(ReadOnlySpan<double> weights);
 }

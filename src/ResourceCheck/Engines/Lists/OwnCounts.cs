@@ -85,7 +85,7 @@ internal sealed class OwnCounts
         return counts;
     }
 
-    private static IEnumerable<Drawn> Split(int at, ListStructure structure, CountTable table, int tags)
+    private static Dictionary<string, Drawn>.ValueCollection Split(int at, ListStructure structure, CountTable table, int tags)
     {
         Dictionary<string, Drawn> states = [];
         for (int entry = 0; entry < table.Count; entry++)

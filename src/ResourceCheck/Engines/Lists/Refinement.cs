@@ -49,7 +49,7 @@ internal sealed class Refinement
         return [.. parts.Select((p, i) => new Atom(p.Types, p.Sums, Target(cell, p.Types), weights[i], weights[(i + 1)..].Sum()))];
     }
 
-    private IEnumerable<(BigInteger Types, int[] Sums)> Parts(int cell)
+    private List<(BigInteger Types, int[] Sums)> Parts(int cell)
     {
         List<(BigInteger Types, int[] Sums)> parts = [(_before.Cells[cell].Types, [])];
         for (int sum = 0; sum < _counted.Count; sum++)

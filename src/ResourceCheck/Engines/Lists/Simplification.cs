@@ -32,7 +32,7 @@ internal sealed class Simplification(HashSet<int> open, Func<int, bool> isKnown,
                     ? Simplify(IsTrue(literal) ? choice.Then : choice.Else)
                     : new BoundIf(choice.Span, condition, Simplify(choice.Then), Simplify(choice.Else));
             case BoundBinary { Operator: BinaryOperator.And or BinaryOperator.Or } binary:
-                return Logic(binary, Simplify(binary.Left), Simplify(binary.Right));
+                return Logic(binary with { Left = Simplify(binary.Left), Right = Simplify(binary.Right) });
             case BoundBinary binary:
                 return binary with { Left = Simplify(binary.Left), Right = Simplify(binary.Right) };
             case BoundUnary unary:
@@ -44,11 +44,11 @@ internal sealed class Simplification(HashSet<int> open, Func<int, bool> isKnown,
         }
     }
 
-    private static BoundExpression Logic(BoundBinary binary, BoundExpression left, BoundExpression right)
+    private static BoundExpression Logic(BoundBinary binary)
     {
         bool decides = binary.Operator == BinaryOperator.Or;
-        bool decided = (left is BoundLiteral l && IsTrue(l) == decides) || (right is BoundLiteral r && IsTrue(r) == decides);
-        return decided ? new BoundLiteral(binary.Span, Value.Of(decides)) : binary with { Left = left, Right = right };
+        bool decided = (binary.Left is BoundLiteral left && IsTrue(left) == decides) || (binary.Right is BoundLiteral right && IsTrue(right) == decides);
+        return decided ? new BoundLiteral(binary.Span, Value.Of(decides)) : binary;
     }
 
     private static bool IsTrue(BoundLiteral literal) => literal.Value is TruthValue { Truth: true };
