@@ -6,7 +6,7 @@ namespace ResourceCheck.Engines.Lists;
 
 /// <summary>
 /// One run of the protocol as it is written, on positions one by one. It shares nothing with the evaluation by counting but the
-/// meaning of single values, so that each can be held against the other.
+/// meaning of single values and the kinds of slots, so that each can be held against the other.
 /// </summary>
 internal sealed class LiteralRun
 {
@@ -15,13 +15,14 @@ internal sealed class LiteralRun
     private readonly int[] _types;
     private readonly Value[] _single;
     private readonly bool[]?[] _sets;
-    private readonly HashSet<int> _setSlots = [];
+    private readonly SetKinds _kinds;
     private ulong _aborted;
 
     private LiteralRun(ListTask task, IChance chance)
     {
         _task = task;
         _chance = chance;
+        _kinds = new SetKinds(task.Steps);
         _single = new Value[task.Protocol.Slots.Count];
         _sets = new bool[]?[task.Protocol.Slots.Count];
         Array.Fill(_single, Value.None);
@@ -68,23 +69,12 @@ internal sealed class LiteralRun
 
     private void Store(int party, int slot, BoundExpression expression)
     {
-        bool gone = (_aborted & (1UL << party)) != 0, isSet = IsSet(expression);
+        bool gone = (_aborted & (1UL << party)) != 0, isSet = _kinds.IsSet(expression);
         bool[]? set = isSet ? Set(expression) : null;
         Value single = isSet ? Value.None : Single(expression);
-        if (isSet)
-            _setSlots.Add(slot);
         _sets[slot] = gone ? null : set;
         _single[slot] = gone ? Value.None : single;
     }
-
-    private bool IsSet(BoundExpression expression) => expression switch
-    {
-        BoundWhere or BoundSome => true,
-        BoundSlot slot => _setSlots.Contains(slot.Slot),
-        BoundBinary { Operator: BinaryOperator.And or BinaryOperator.Or or BinaryOperator.Without } binary => IsSet(binary.Left) || IsSet(binary.Right),
-        BoundIf choice => IsSet(choice.Then) || IsSet(choice.Else),
-        _ => false,
-    };
 
     /// <summary>A single value: counts are put in as literals, the rest is left to the evaluator of single values.</summary>
     private Value Single(BoundExpression expression) => ValueEvaluator.Evaluate(Counted(expression), _single, _task.Protocol.Levels);
@@ -99,7 +89,7 @@ internal sealed class LiteralRun
                 return Literal(Set(size.Set) is { } sized ? Value.Of(sized.Count(m => m)) : Value.None);
             case BoundTally tally:
                 return Tally(tally);
-            case BoundBinary { Operator: BinaryOperator.Equal or BinaryOperator.Unequal } binary when IsSet(binary.Left) || IsSet(binary.Right):
+            case BoundBinary { Operator: BinaryOperator.Equal or BinaryOperator.Unequal } binary when _kinds.IsSet(binary.Left) || _kinds.IsSet(binary.Right):
                 return Literal(Value.Of(Equal(Set(binary.Left), Set(binary.Right)) == (binary.Operator == BinaryOperator.Equal)));
             case BoundBinary binary:
                 return binary with { Left = Counted(binary.Left), Right = Counted(binary.Right) };
