@@ -1,5 +1,3 @@
-using System.Numerics;
-using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Binding;
 
 namespace ResourceCheck.Engines.Lists;
@@ -7,9 +5,6 @@ namespace ResourceCheck.Engines.Lists;
 /// <summary>Worst harm of a cheating strategy over the numbers left to the cheat.</summary>
 public static class WorstCase
 {
-    /// <summary>Values of a choice that need not be whole, over its range.</summary>
-    private const int RealSteps = 240;
-
     /// <summary>Paths left out while points are compared; the value shown is found with the task's own limit.</summary>
     private const double NegligibleInSearch = 1e-20;
 
@@ -24,14 +19,14 @@ public static class WorstCase
     public static AttackOutcome Find(ListTask task, SearchOptions options, IProgress<SearchProgress>? progress, CancellationToken cancellation)
     {
         DishonestCase cheat = task.Case ?? throw new ArgumentException("There is no cheat in this task.", nameof(task));
-        ChoiceRange[] ranges = [.. cheat.Choices.Select(c => ChoiceRange.Of(c, task.Lists.Copies, task.Protocol.Levels))];
+        ChoiceRange[] ranges = [.. cheat.Choices.Select(c => new ChoiceRange(c, task.Lists.Copies, task.Protocol.Levels))];
         try
         {
             ListProgram program = ListProgram.Of(task);
             ListLimits coarse = task.Limits with { Negligible = Math.Max(task.Limits.Negligible, NegligibleInSearch) };
             SearchResult found = AttackSearch.Maximise(
                 [.. ranges.Select(r => (r.First, r.Last))],
-                point => program.Evaluate(Values(ranges, point), coarse, cancellation).Harm.Value,
+                point => Harm(program, ranges, Values(ranges, point), coarse, cancellation),
                 options,
                 progress,
                 cancellation);
@@ -48,27 +43,17 @@ public static class WorstCase
         }
     }
 
-    private static Value[] Values(ChoiceRange[] ranges, IReadOnlyList<int> point) => [.. ranges.Zip(point, (r, i) => r.At(i))];
-
-    /// <summary>Whole numbers that stand for the values of a choice.</summary>
-    private sealed record ChoiceRange(int First, int Last, Rational From, Rational Step, bool Whole)
+    /// <summary>Harm at some numbers; numbers outside a range that depends on the others are no attack and count as harmless.</summary>
+    private static double Harm(ListProgram program, ChoiceRange[] ranges, Value[] choices, ListLimits limits, CancellationToken cancellation)
     {
-        public static ChoiceRange Of(Choice choice, int copies, int levels)
+        for (int i = 0; i < ranges.Length; i++)
         {
-            // What depends on the list is at most all of it; draws take all when they ask for more.
-            Rational from = Fixed(choice.From, levels) ?? 0, to = Fixed(choice.To, levels) ?? copies;
-            if (choice.Whole)
-                return new ChoiceRange(Clamped(from.Ceiling()), Clamped(to.Floor()), 0, 1, true);
-            return new ChoiceRange(0, from < to ? RealSteps : from == to ? 0 : -1, from, (to - from) / RealSteps, false);
+            if (!ranges[i].Allows(choices[i], choices))
+                return 0;
         }
 
-        public Value At(int index) => Whole ? Value.Of(index) : new NumberValue(From + (Step * index));
-
-        private static Rational? Fixed(BoundExpression expression, int levels) =>
-            Reads.Parts(expression).Any(p => p is BoundSlot or BoundSize or BoundTally or BoundWhere or BoundSome or BoundChoice)
-                ? null
-                : ValueEvaluator.Evaluate(expression, [], levels) is NumberValue number ? number.Number : null;
-
-        private static int Clamped(BigInteger number) => (int)BigInteger.Min(BigInteger.Max(number, -CountTable.LargestCount), CountTable.LargestCount);
+        return program.Evaluate(choices, limits, cancellation).Harm.Value;
     }
+
+    private static Value[] Values(ChoiceRange[] ranges, IReadOnlyList<int> point) => [.. ranges.Zip(point, (r, i) => r.At(i))];
 }
