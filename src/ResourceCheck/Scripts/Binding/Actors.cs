@@ -59,8 +59,18 @@ internal sealed class Actors(BindContext context, PartyResolver parties, WhenBin
     private IReadOnlyList<PartyMention> Named(IReadOnlyList<PartyMention> mentions)
     {
         Name(mentions);
-        whens.NoteActors(mentions.Select(m => m.Party));
-        return mentions;
+        IReadOnlyList<PartyMention> acting = context.Cheat is { } cheat ? Under(cheat, mentions) : mentions;
+        whens.NoteActors(acting.Select(m => m.Party));
+        return acting;
+    }
+
+    private IReadOnlyList<PartyMention> Under(Cheat cheat, IReadOnlyList<PartyMention> mentions)
+    {
+        if (!cheat.Speaks)
+            return cheat.Replaces ? [.. mentions.Where(m => !cheat.By.Contains(m.Party))] : mentions;
+        foreach (PartyMention honest in mentions.Where(m => !cheat.By.Contains(m.Party)))
+            context.Findings.Report(honest.Span, BindingMessages.HonestInCheat(context.NameOf(honest.Party), cheat.Names));
+        return [.. mentions.Where(m => cheat.By.Contains(m.Party))];
     }
 
     private bool IsInsider(PartyMention mention, string verb)

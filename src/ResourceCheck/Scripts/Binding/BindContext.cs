@@ -9,8 +9,9 @@ namespace ResourceCheck.Scripts.Binding;
 internal sealed class BindContext(ScriptTree tree)
 {
     private readonly List<SlotInfo> _slots = [];
-    private readonly List<ValueKind> _kinds = [];
     private readonly HashSet<int> _heard = [];
+    private readonly HashSet<int> _perCopy = [];
+    private readonly Dictionary<(Span Span, int Party, SlotKind Kind, string Turn), int> _made = [];
 
     /// <summary>The script.</summary>
     public ScriptTree Tree { get; } = tree;
@@ -19,7 +20,19 @@ internal sealed class BindContext(ScriptTree tree)
     public BindingFindings Findings { get; } = new(tree.Source);
 
     /// <summary>Where names are made.</summary>
-    public MakerIndex Makers { get; } = new(tree);
+    public MakerIndex Makers { get; set; } = new(tree, null);
+
+    /// <summary>Whether the rounds run on many copies, so that their values are lists.</summary>
+    public bool HasCopies { get; set; }
+
+    /// <summary>Whether the current line works on whole lists: a discussion's line or a referee's.</summary>
+    public bool OnLists { get; set; }
+
+    /// <summary>The cheating strategy that is being bound; null in the honest case.</summary>
+    public Cheat? Cheat { get; set; }
+
+    /// <summary>Rounds and discussions, as written and with counters replaced.</summary>
+    public List<(string Written, string Title)> Blocks { get; } = [];
 
     /// <summary>Values of parameters.</summary>
     public Dictionary<string, Rational> Parameters { get; } = [];
@@ -43,7 +56,7 @@ internal sealed class BindContext(ScriptTree tree)
     public HashSet<int>? Named { get; set; }
 
     /// <summary>Uses of values by parties that do not know them, in the current statement.</summary>
-    public KnowledgeMisses Misses { get; } = new();
+    public KnowledgeMisses Misses { get; private set; } = new();
 
     /// <summary>Values that a keep line used although not everybody knows them; each is told once.</summary>
     public HashSet<string> ToldNotPublic { get; } = [];
@@ -68,14 +81,31 @@ internal sealed class BindContext(ScriptTree tree)
         return text[start..Math.Clamp(span.End, start, text.Length)];
     }
 
-    /// <summary>Adds a slot.</summary>
-    public int AddSlot(string name, int party, SlotKind kind, ValueKind value, Span span)
+    /// <summary>Adds a slot. A line that stays as it is under a cheating strategy keeps the slot of the honest case.</summary>
+    public int AddSlot(string name, int party, SlotKind kind, Span span)
     {
+        string turn = string.Join(';', Counters.OrderBy(c => c.Key, StringComparer.Ordinal).Select(c => $"{c.Key}={c.Value}"));
+        if (Cheat is not null && _made.TryGetValue((span, party, kind, turn), out int made))
+            return made;
+        int slot = _slots.Count;
         _slots.Add(new SlotInfo(name, party, kind, span));
-        _kinds.Add(value);
+        _made[(span, party, kind, turn)] = slot;
         if (kind == SlotKind.Message)
-            _heard.Add(_slots.Count - 1);
-        return _slots.Count - 1;
+            _heard.Add(slot);
+        if (HasCopies && !OnLists && kind != SlotKind.Input)
+            _perCopy.Add(slot);
+        return slot;
+    }
+
+    /// <summary>Whether a slot holds one value in each copy rather than one per run.</summary>
+    public bool IsPerCopy(int slot) => _perCopy.Contains(slot);
+
+    /// <summary>Forgets what was told and where the last pass stood, so that the script can be gone through again.</summary>
+    public void Restart(NameState start)
+    {
+        Misses = new KnowledgeMisses();
+        ToldNotPublic.Clear();
+        (Now, Counters, Loops, Named, OnLists) = (start, ImmutableDictionary<string, int>.Empty, [], null, false);
     }
 
     /// <summary>Notes that a slot's value depends on messages when its expression does.</summary>

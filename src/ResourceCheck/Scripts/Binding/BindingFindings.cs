@@ -16,6 +16,8 @@ internal sealed class BindingFindings(SourceText source)
     private readonly List<(int Offset, Diagnostic Finding)> _found = [];
     private readonly HashSet<string> _suspects = [];
     private int _muted;
+    private HashSet<string> _suspectsBefore = [];
+    private (Span Header, int End)? _case;
 
     /// <summary>All findings in order of place; those without a line come first.</summary>
     public IReadOnlyList<Diagnostic> All => [.. _found.OrderBy(f => f.Offset).Select(f => f.Finding)];
@@ -29,6 +31,12 @@ internal sealed class BindingFindings(SourceText source)
         // What stands in a part that these parameter values switch off may be impossible only because of them.
         if (IsMuted && BindingMessages.DependsOnParameters(message.Code))
             return;
+        if (_case is { } open && (span.Start < open.Header.Start || span.Start >= open.End))
+        {
+            ReportForCase(open.Header, span, message);
+            return;
+        }
+
         // Several lines may be missing from one script; all of these findings stand at its beginning.
         if (_seen.Add((message.Code, span, span.Length == 0 ? message.Text : null)))
             _found.Add((span.Start, From(message, source.PlaceOf(span))));
@@ -36,6 +44,33 @@ internal sealed class BindingFindings(SourceText source)
 
     /// <summary>Adds a finding about a value given from outside the script.</summary>
     public void Report(string input, Message message) => _found.Add((-1, From(message, Place.Of(input))));
+
+    /// <summary>
+    /// Enters a cheating strategy: what goes wrong outside of its own lines goes wrong because of them, and is told of the strategy.
+    /// </summary>
+    /// <param name="header">The line that opens it.</param>
+    /// <param name="end">Offset behind its last line.</param>
+    public void EnterCase(Span header, int end)
+    {
+        _suspectsBefore = [.. _suspects];
+        _case = (header, end);
+    }
+
+    /// <summary>Leaves a cheating strategy; names that are missing because of it are missing in it only.</summary>
+    public void LeaveCase()
+    {
+        _suspects.Clear();
+        _suspects.UnionWith(_suspectsBefore);
+        _case = null;
+    }
+
+    private void ReportForCase(Span header, Span span, Message message)
+    {
+        // A line that is wrong in the honest case as well was told already.
+        if (_seen.Any(s => s.Span == span) || !_seen.Add((BindingMessages.CaseCode, header, source.LineOf(span.Start).ToString(System.Globalization.CultureInfo.InvariantCulture))))
+            return;
+        _found.Add((header.Start, From(BindingMessages.WrongInCase(source.LineOf(span.Start), message), source.PlaceOf(header))));
+    }
 
     /// <summary>Whether the current part is switched off by the parameter values.</summary>
     public bool IsMuted => _muted > 0;

@@ -6,7 +6,7 @@ namespace ResourceCheck.Scripts.Binding;
 internal static class BindingMessages
 {
     // Codes of findings that may come from the parameter values alone.
-    private static readonly HashSet<string> OfParameters = ["S040", "S052", "S055", "S064"];
+    private static readonly HashSet<string> OfParameters = ["S040", "S052", "S055", "S064", "S074"];
 
     /// <summary>Whether a finding may come from the parameter values alone.</summary>
     public static bool DependsOnParameters(string code) => OfParameters.Contains(code);
@@ -244,17 +244,74 @@ internal static class BindingMessages
     public static Message MessageNeedsName(string text) =>
         new("S073", $"`{text}` travels without a name.", $"write {text} as w, with a name for the recipients");
 
-    public static Message CopiesNotAvailable() => NotAvailable("S074", "copies", "leave the line out: every figure is of one copy");
+    public static Message CopiesCount(string value) =>
+        new("S074", $"{value} copies cannot be made: a whole number from 1 fits.", "write it as in copies 300, or give a parameter");
 
-    public static Message DiscussionNotAvailable() => NotAvailable("S075", "A discussion of lists", "put decisions about one copy into a round");
+    public static Message DiscussionWithoutCopies() =>
+        new("S075", "A discussion works on lists, and a script without copies has none.", "add a line such as copies 300, or put decisions about one copy into a round");
 
-    public static Message ListsNotAvailable(string what) => NotAvailable("S076", what, "compare the values of one copy instead");
+    public static Message BelowDiscussion(int line) =>
+        new("S075", $"This line is about single copies, but the discussion on line {line} follows all copies.", $"move it above line {line}");
 
-    public static Message DishonestNotAvailable() => NotAvailable("S077", "A dishonest case", "leave the block out");
+    public static Message QuantumInDiscussion() =>
+        new("S075", "A discussion is classical, and the qudits of all copies are used up by then: set, send, announce and abort fit here.", "replace the round in which the party acts on its qudit");
 
-    public static Message ChooseNotAvailable() => NotAvailable("S078", "choose", "fix the number");
+    public static Message NothingPickedHere() =>
+        new("S075", "Nothing is picked in a discussion: chance comes from the copies and from positions drawn.", "pick in a round, or draw positions with some(k of SET)");
 
-    private static Message NotAvailable(string code, string what, string cure) => new(code, $"{what} is not available in this version.", cure);
+    public static Message ListsNotHere(string shape, bool hasCopies) =>
+        new("S076", $"{shape} looks at the lists of all copies: it fits in a discussion{(hasCopies ? " and in the referee's lines" : " of a script with copies")}.",
+            hasCopies ? "move the line into a discussion below the rounds" : "compare the values of one copy, or add a copies line and a discussion");
+
+    public static Message NothingDrawnHere() =>
+        new("S076", "Positions are drawn only where a value is set or sent, so that all who read it mean the same ones.", "set a name to some(k of SET) on a line above, and use that name");
+
+    public static Message SetsCompared(string function) =>
+        new("S076", $"{function}(…) compares single values, and a set of positions stands among these.", "compare their sizes, or two sets with =");
+
+    public static Message UnknownBlock(string title, string? near, IReadOnlyList<string> known) =>
+        new("S077", $"No round or discussion is called \"{title}\"{(known.Count == 0 ? "; the script has none" : $": {Some([.. known.Select(k => $"\"{k}\"")], "or")} would fit")}.",
+            near is null ? null : $"did you mean \"{near}\"?");
+
+    public static Message ReplacedTwice(string title) =>
+        new("S077", $"\"{title}\" is changed twice in this case: one list of lines stands in place of a block, and one before it.", "put all lines into one of the two");
+
+    public static Message NothingToReplace(string cheats, string title, int count) =>
+        new("S077", $"{cheats} {Verb(count, "does", "do")} nothing in \"{title}\" that could be replaced.", $"write before \"{title}\" to add lines");
+
+    public static Message NoReplacement(string title) =>
+        new("S077", $"The case \"{title}\" changes nothing: lines stand in instead of \"…\" or before \"…\".", "say which round or discussion the party plays differently");
+
+    public static Message HonestInCheat(string party, string cheats) =>
+        new("S077", $"{party} is honest in this case: its lines say what {cheats} {Verb(cheats.Contains(' ', StringComparison.Ordinal) ? 2 : 1, "does", "do")}.", $"leave {party} out, or name it behind by");
+
+    public static Message KeepInCheat() =>
+        new("S077", "Copies are kept by what everybody knows: no party can replace that.", "leave the line out");
+
+    public static Message HarmMissing(string title) =>
+        new("S077", $"The case \"{title}\" does not say when harm is done.", "add a line such as harm when Ben.out != Cyd.out");
+
+    public static Message ChoiceBelow(string name) =>
+        new("S078", $"{name} is chosen further down, or here itself: a range uses only choices above it.", "put the choices in the order in which they are made");
+
+    public static Message ChoiceFromList(string text) =>
+        new("S078", $"`{text}` is a list, but a choice is made in a range.", "write it as in 0..3 for whole numbers or 0 to 1 for real ones");
+
+    public static Message ChoiceUnused(string name) =>
+        new("S078", $"No line of this case uses {name}.", "take the choice out, or use it");
+
+    public static Message OnePerCopy(string label) =>
+        new("S079", $"{label} is a list with one value for each copy: one value for all copies fits here.",
+            $"ask about its positions, as in where({label} = 0), count({label} = 0 in J) or share({label} = 0 in J)");
+
+    public static Message SameInEveryCopy(string text) =>
+        new("S079", $"`{text}` holds in every copy or in none: a condition on a value of the rounds fits here.", "name a value that was made in a round; where(true) stands for all positions");
+
+    /// <summary>Code of what goes wrong in honest lines because of a cheating strategy.</summary>
+    public const string CaseCode = "S080";
+
+    public static Message WrongInCase(int line, Message message) =>
+        new(CaseCode, $"In this case line {line} cannot run as it is written: {message.Text}", "make every name again that the replaced lines make and later lines use, for the same parties");
 
     private static string? DidYouMean(string? near) => near is null ? null : $"did you mean {near}?";
 

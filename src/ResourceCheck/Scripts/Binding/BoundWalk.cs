@@ -10,6 +10,18 @@ internal static class BoundWalk
         _ => Children(expression).SelectMany(Slots),
     };
 
+    /// <summary>An expression and all within it.</summary>
+    public static IEnumerable<BoundExpression> Within(BoundExpression expression) => Children(expression).SelectMany(Within).Prepend(expression);
+
+    /// <summary>Slots that an expression reads outside of the predicates in it: those must hold one value per run where lists are worked on.</summary>
+    public static IEnumerable<int> SingleSlots(BoundExpression expression) => expression switch
+    {
+        BoundSlot slot => [slot.Slot],
+        BoundWhere => [],
+        BoundTally tally => SingleSlots(tally.Set),
+        _ => Children(expression).SelectMany(SingleSlots),
+    };
+
     /// <summary>The expression with other slots.</summary>
     public static BoundExpression Map(BoundExpression expression, Func<int, int> slots) => expression switch
     {
@@ -19,6 +31,10 @@ internal static class BoundWalk
         BoundIf e => e with { Condition = Map(e.Condition, slots), Then = Map(e.Then, slots), Else = Map(e.Else, slots) },
         BoundCall e => e with { Arguments = [.. e.Arguments.Select(a => Map(a, slots))] },
         BoundBasis { Argument: { } argument } e => e with { Argument = Map(argument, slots) },
+        BoundWhere e => e with { Predicate = Map(e.Predicate, slots) },
+        BoundSome e => e with { Count = Map(e.Count, slots), Set = Map(e.Set, slots) },
+        BoundSize e => e with { Set = Map(e.Set, slots) },
+        BoundTally e => e with { Predicate = Map(e.Predicate, slots), Set = Map(e.Set, slots) },
         _ => expression,
     };
 
@@ -39,6 +55,8 @@ internal static class BoundWalk
         (BoundBinary a, BoundBinary b) => a.Operator == b.Operator,
         (BoundCall a, BoundCall b) => a.Function == b.Function,
         (BoundBasis a, BoundBasis b) => a.Kind == b.Kind && a.File == b.File,
+        (BoundTally a, BoundTally b) => a.IsShare == b.IsShare,
+        (BoundChoice a, BoundChoice b) => a.Choice == b.Choice,
         _ => first.GetType() == second.GetType(),
     };
 
@@ -49,6 +67,10 @@ internal static class BoundWalk
         BoundIf e => [e.Condition, e.Then, e.Else],
         BoundCall e => e.Arguments,
         BoundBasis { Argument: { } argument } => [argument],
+        BoundWhere e => [e.Predicate],
+        BoundSome e => [e.Count, e.Set],
+        BoundSize e => [e.Set],
+        BoundTally e => [e.Predicate, e.Set],
         _ => [],
     };
 }

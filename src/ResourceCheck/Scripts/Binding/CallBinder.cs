@@ -16,10 +16,8 @@ internal sealed class CallBinder(ExpressionBinder values)
         ["abs"] = (ValueFunction.Absolute, ValueKind.Number, ValueKind.Number, "abs(number)"),
     };
 
-    private static readonly string[] ListFunctions = ["where", "size", "share", "some"];
-
     /// <summary>Names of all functions of classical values.</summary>
-    public static IEnumerable<string> Names => Functions.Keys;
+    public static IEnumerable<string> Names => Functions.Keys.Concat(ListCalls.Names);
 
     private BindContext Context => values.Context;
 
@@ -27,8 +25,8 @@ internal sealed class CallBinder(ExpressionBinder values)
     public Typed Bind(CallExpression call)
     {
         string name = call.Function.Text;
-        if (ListFunctions.Contains(name) || (name == "count" && call.Separator == "in"))
-            return values.Refuse(call.Function.Span, BindingMessages.ListsNotAvailable(name == "count" ? "count(… in SET)" : $"{name}(…)"));
+        if (ListCalls.Fits(call))
+            return new ListCalls(values).Bind(call);
         if (FigureBinder.Names.Contains(name))
             return values.Refuse(call.Function.Span, BindingMessages.FigureAmongValues(name));
         if (!Functions.TryGetValue(name, out (ValueFunction Function, ValueKind Argument, ValueKind Result, string Shape) shape))
@@ -65,13 +63,14 @@ internal sealed class CallBinder(ExpressionBinder values)
     }
 
     private Typed[] Over(Expression each, PartyList parties, ValueKind wanted) =>
-        [.. new PartyResolver(Context).Classical(parties).Select(p => new ExpressionBinder(Context, values.View.As(p.Party)).Expect(each, wanted))];
+        [.. new PartyResolver(Context).Classical(parties).Select(p => values.With(values.View.As(p.Party)).Expect(each, wanted))];
 
     private IEnumerable<Typed> Members(OfExpression of, ValueKind wanted)
     {
         foreach (PartyMention party in new PartyResolver(Context).Classical(of.Parties))
         {
-            Typed value = values.View.Member(party.Party, of.Member.Text, of.Member.Span);
+            Typed value = values.Single(
+                values.View.Member(party.Party, of.Member.Text, of.Member.Span), $"{Context.NameOf(party.Party)}.{of.Member.Text}", of.Member.Span);
             bool fits = ValueKinds.Fits(value.Kind, wanted);
             yield return fits ? value : values.Refuse(of.Member.Span, BindingMessages.WrongKind(of.Member.Text, value.Kind, wanted));
         }
@@ -81,6 +80,12 @@ internal sealed class CallBinder(ExpressionBinder values)
     {
         if (function is not (ValueFunction.Distinct or ValueFunction.Same))
             return true;
+        if (arguments.FirstOrDefault(a => a.Kind == ValueKind.Set).Kind == ValueKind.Set)
+        {
+            values.Refuse(call.Span, BindingMessages.SetsCompared(call.Function.Text));
+            return false;
+        }
+
         foreach (Typed argument in arguments.Skip(1))
         {
             if (ValueKinds.Together(arguments[0].Kind, argument.Kind))

@@ -13,6 +13,8 @@ internal sealed class ClassicalSteps(BindContext context, Actors actors, NameMak
     public void Pick(PickStatement statement, List<Step> steps)
     {
         NameState before = context.Now;
+        if (context.OnLists)
+            context.Findings.Report(statement.Span, BindingMessages.NothingPickedHere());
         foreach (PartyMention actor in Acting(statement.Actors, null, statement.Result))
         {
             ExpressionBinder values = Values(before, actor.Party);
@@ -33,7 +35,7 @@ internal sealed class ClassicalSteps(BindContext context, Actors actors, NameMak
         NameState before = context.Now;
         foreach (PartyMention actor in Acting(statement.Actors, null, statement.Result))
         {
-            Typed value = Values(before, actor.Party).Bind(statement.Value);
+            Typed value = Drawing(before, actor.Party).Bind(statement.Value);
             int slot = names.Make(actor.Party, statement.Result, SlotKind.Set, value.Kind);
             if (value.Bound is null)
                 continue;
@@ -73,7 +75,7 @@ internal sealed class ClassicalSteps(BindContext context, Actors actors, NameMak
 
     private void Send(SendStatement statement, int sender, MessageItem item, int[] to, NameState before, List<Step> steps)
     {
-        Typed value = Values(before, sender).Bind(item.Value);
+        Typed value = Drawing(before, sender).Bind(item.Value);
         if (NameOf(item) is not { } name)
             return;
         int slot = names.Send(sender, name, value, to);
@@ -120,6 +122,8 @@ internal sealed class ClassicalSteps(BindContext context, Actors actors, NameMak
     }
 
     private ExpressionBinder Values(NameState before, int actor) => new(context, new ActorView(context, before, actor));
+
+    private ExpressionBinder Drawing(NameState before, int actor) => new(context, new ActorView(context, before, actor)) { MayDraw = true };
 
     private ValueKind CommonKind(PickStatement statement, Typed[] options)
     {

@@ -27,6 +27,19 @@ internal sealed class DeclarationBinder(BindContext context)
             DeclareInput(input);
     }
 
+    /// <summary>The number of copies; null when the script works on a single one, 1 after a finding.</summary>
+    public int? Copies()
+    {
+        if (Single<CopiesStatement>("copies") is not { } statement)
+            return null;
+        context.HasCopies = true;
+        if (_parties.Whole(statement.Count) is not { } copies)
+            return 1;
+        if (copies < 1)
+            context.Findings.Report(statement.Count.Span, BindingMessages.CopiesCount(Words.Number(copies)));
+        return Math.Max(1, copies);
+    }
+
     /// <summary>Evaluates the script's requirements; broken ones are no findings.</summary>
     public IReadOnlyList<Requirement> Requirements() => [.. Top<RequireStatement>().Select(Require).OfType<Requirement>()];
 
@@ -144,7 +157,7 @@ internal sealed class DeclarationBinder(BindContext context)
         {
             if (context.Now.Own.TryGetValue((owner.Party, input.Name.Text), out Holding? present))
                 context.Findings.Report(input.Name.Span, BindingMessages.MadeTwice(context.NameOf(owner.Party), input.Name.Text, context.LineOf(present.Span)));
-            int slot = context.AddSlot(input.Name.Text, owner.Party, SlotKind.Input, kind, input.Name.Span);
+            int slot = context.AddSlot(input.Name.Text, owner.Party, SlotKind.Input, input.Name.Span);
             context.Now = context.Now.WithOwn(owner.Party, input.Name.Text, new Holding([slot], kind, input.Name.Span));
             context.Inputs.Add(new InputValues(input.Name.Text, owner.Party, slot, values ?? []));
         }

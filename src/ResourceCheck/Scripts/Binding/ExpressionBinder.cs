@@ -14,16 +14,31 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
     /// <summary>Whose names are meant.</summary>
     public NameView View => view;
 
+    /// <summary>Whether the expression is about one copy at a time, inside a function of lists.</summary>
+    public bool InPredicate { get; init; }
+
+    /// <summary>Whether positions may be drawn at random: in a value that is set or sent, not in a condition that several parties read.</summary>
+    public bool MayDraw { get; init; }
+
+    /// <summary>Whether the expression is an end of a range that holds for all copies, even in a round.</summary>
+    public bool IsRange { get; init; }
+
+    /// <summary>The same rules with another's names.</summary>
+    public ExpressionBinder With(NameView other) => new(context, other) { InPredicate = InPredicate, MayDraw = MayDraw, IsRange = IsRange };
+
+    /// <summary>A value of a name, which must be one per run where whole lists are worked on.</summary>
+    public Typed Single(Typed typed, string label, Span span)
+    {
+        bool lists = (context.OnLists || IsRange) && !InPredicate;
+        return lists && typed.Bound is { } bound && BoundWalk.Slots(bound).Any(context.IsPerCopy) ? Refuse(span, BindingMessages.OnePerCopy(label)) : typed;
+    }
+
     /// <summary>Resolves an expression that must be of one sort.</summary>
     public Typed Expect(Expression expression, ValueKind wanted)
     {
         if (wanted == ValueKind.Basis && expression is NameExpression name && IsNameless(name.Text))
             return Report(expression.Span, name.Text, BindingMessages.NoBasis(name.Text, Words.Near(name.Text, ["level", "fourier", "phased", "matrix"])));
-        Typed typed = Bind(expression);
-        if (ValueKinds.Fits(typed.Kind, wanted))
-            return typed;
-        context.Findings.Report(expression.Span, BindingMessages.WrongKind(context.TextOf(expression.Span), typed.Kind, wanted));
-        return Typed.Broken;
+        return Fitting(expression, Bind(expression), wanted);
     }
 
     /// <summary>Resolves an expression.</summary>
@@ -43,6 +58,14 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
         OfExpression e => Refuse(e.Span, BindingMessages.ListOutsideFunction(context.TextOf(e.Span))),
         _ => Refuse(expression.Span, BindingMessages.NoValueHere(context.TextOf(expression.Span))),
     };
+
+    private Typed Fitting(Expression expression, Typed typed, ValueKind wanted)
+    {
+        if (ValueKinds.Fits(typed.Kind, wanted))
+            return typed;
+        context.Findings.Report(expression.Span, BindingMessages.WrongKind(context.TextOf(expression.Span), typed.Kind, wanted));
+        return Typed.Broken;
+    }
 
     /// <summary>Replaces an expression by its value when nothing in it varies.</summary>
     public Typed Fold(BoundExpression expression, ValueKind kind, params Typed[] parts)
@@ -75,11 +98,13 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
             return Typed.Of(e.Span, Value.Of(counter));
         if (context.Parameters.TryGetValue(e.Text, out Rational parameter))
             return Typed.Of(e.Span, new NumberValue(parameter));
+        if (context.Cheat is { } cheat && view.SeesChoices && cheat.Chooses(e.Text))
+            return cheat.Use(e, view);
         if (context.Parties.IndexOf(e.Text) is >= 0 and int party)
             return Party(e.Span, party);
         if (context.Parties.Families.TryGetValue(e.Text, out (int Least, int Most) range))
             return Refuse(e.Span, BindingMessages.FamilyNeedsNumber(e.Text, range.Least, range.Most));
-        return context.Findings.IsSuspect(e.Text) && view.State.Makers(e.Text).Count == 0 ? Typed.Broken : view.Bare(e.Text, e.Span);
+        return context.Findings.IsSuspect(e.Text) && view.State.Makers(e.Text).Count == 0 ? Typed.Broken : Single(view.Bare(e.Text, e.Span), e.Text, e.Span);
     }
 
     private Typed Party(Span span, int party) => party < 0 ? Typed.Broken : Typed.Of(span, new PartyValue(party, context.NameOf(party)));
@@ -87,7 +112,7 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
     private Typed Member(MemberExpression e)
     {
         int party = new PartyResolver(context).Single(e.Party);
-        return party < 0 ? Typed.Broken : view.Member(party, e.Member.Text, e.Span);
+        return party < 0 ? Typed.Broken : Single(view.Member(party, e.Member.Text, e.Span), context.TextOf(e.Span), e.Span);
     }
 
     private Typed Unary(UnaryExpression e)
@@ -99,12 +124,24 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
 
     private Typed Binary(BinaryExpression e)
     {
-        if (e.Operator == BinaryOperator.Without)
-            return Refuse(e.Span, BindingMessages.ListsNotAvailable("minus between sets"));
+        if (e.Operator is BinaryOperator.Without or BinaryOperator.And or BinaryOperator.Or)
+            return Junction(e);
         (ValueKind wanted, ValueKind kind) = Sorts(e.Operator);
         Typed left = Expect(e.Left, wanted), right = Expect(e.Right, wanted);
-        if (!ValueKinds.Together(left.Kind, right.Kind))
-            return Refuse(e.Span, BindingMessages.NeverEqual(left.Kind, right.Kind));
+        return ValueKinds.Together(left.Kind, right.Kind) ? Joined(e, kind, left, right) : Refuse(e.Span, BindingMessages.NeverEqual(left.Kind, right.Kind));
+    }
+
+    // and, or and minus join sets; and and or join truth values as well. Their operands tell which.
+    private Typed Junction(BinaryExpression e)
+    {
+        Typed left = Bind(e.Left), right = Bind(e.Right);
+        bool sets = e.Operator == BinaryOperator.Without || left.Kind == ValueKind.Set || right.Kind == ValueKind.Set;
+        ValueKind kind = sets ? ValueKind.Set : ValueKind.Truth;
+        return Joined(e, kind, Fitting(e.Left, left, kind), Fitting(e.Right, right, kind));
+    }
+
+    private Typed Joined(BinaryExpression e, ValueKind kind, Typed left, Typed right)
+    {
         if (left.Bound is null || right.Bound is null)
             return new Typed(null, kind);
         Typed folded = Fold(new BoundBinary(e.Span, e.Operator, left.Bound, right.Bound), kind, left, right);
@@ -115,7 +152,6 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
 
     private static (ValueKind Operands, ValueKind Result) Sorts(BinaryOperator op) => op switch
     {
-        BinaryOperator.Or or BinaryOperator.And => (ValueKind.Truth, ValueKind.Truth),
         BinaryOperator.Equal or BinaryOperator.Unequal => (ValueKind.Unknown, ValueKind.Truth),
         BinaryOperator.Less or BinaryOperator.LessOrEqual or BinaryOperator.Greater or BinaryOperator.GreaterOrEqual => (ValueKind.Number, ValueKind.Truth),
         _ => (ValueKind.Number, ValueKind.Number),

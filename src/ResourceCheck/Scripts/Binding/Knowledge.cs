@@ -10,7 +10,7 @@ internal static class Knowledge
     public static IReadOnlyList<KnowledgeLine> Of(Protocol protocol)
     {
         List<(Span Span, List<Step> Steps)> groups = [];
-        foreach (Step step in Flat(protocol.Steps))
+        foreach (Step step in Flat(protocol.Steps).Concat(Flat(protocol.Lists?.Steps ?? [])))
         {
             if (groups.Count > 0 && groups[^1].Span == step.Span && !StartsAnew(groups[^1].Steps, step))
                 groups[^1].Steps.Add(step);

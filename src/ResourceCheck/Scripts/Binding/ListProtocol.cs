@@ -25,7 +25,11 @@ public sealed record BlockRange(string Title, int First, int Count);
 /// <param name="ListSteps">Steps of the discussions under this strategy; null for a protocol on single copies.</param>
 /// <param name="Harm">When harm is done.</param>
 public sealed record DishonestCase(
-    string Name, IReadOnlyList<int> By, IReadOnlyList<Choice> Choices, IReadOnlyList<Step> CopySteps, IReadOnlyList<Step>? ListSteps, BoundExpression Harm);
+    string Name, IReadOnlyList<int> By, IReadOnlyList<Choice> Choices, IReadOnlyList<Step> CopySteps, IReadOnlyList<Step>? ListSteps, BoundExpression Harm)
+{
+    /// <summary>Whether the cheat's own hardware is declared perfect: its figures are then those without noise at the cheat.</summary>
+    public bool PerfectHardware { get; init; }
+}
 
 /// <summary>A number left to the cheat; its range may depend on what the cheat holds when it is used.</summary>
 /// <param name="Name">Its name.</param>

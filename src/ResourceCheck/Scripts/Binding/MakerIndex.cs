@@ -13,8 +13,14 @@ internal sealed class MakerIndex
 {
     private readonly List<Maker> _makers = [];
 
-    /// <summary>Gathers the names of a script.</summary>
-    public MakerIndex(ScriptTree tree) => Gather(tree.Statements, null);
+    private readonly DishonestStatement? _case;
+
+    /// <summary>Gathers the names of a script, with those of one cheating strategy if any.</summary>
+    public MakerIndex(ScriptTree tree, DishonestStatement? strategy)
+    {
+        _case = strategy;
+        Gather(tree.Statements, null);
+    }
 
     /// <summary>All names made anywhere.</summary>
     public IEnumerable<string> Names => _makers.Select(m => m.Name);
@@ -26,7 +32,7 @@ internal sealed class MakerIndex
     {
         foreach (Statement statement in statements)
         {
-            if (statement is DiscussionStatement or DishonestStatement)
+            if (statement is DishonestStatement && statement != _case)
                 continue;
             _makers.AddRange(TreeWalk.Makes(statement).Select(name => new Maker(name.Text, name.Span, loop)));
             Gather(TreeWalk.Body(statement), statement as ForStatement ?? loop);

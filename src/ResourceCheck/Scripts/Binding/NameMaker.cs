@@ -36,7 +36,7 @@ internal sealed class NameMaker(BindContext context)
             context.Findings.Report(name.Span, BindingMessages.MadeTwice(context.NameOf(party), name.Text, context.LineOf(present.Span)));
         else if (context.Now.Sent.TryGetValue((party, name.Text), out var sent))
             context.Findings.Report(name.Span, BindingMessages.MadeTwice(context.NameOf(party), name.Text, context.LineOf(sent[0].Span)));
-        int slot = SiblingSlot(party, name, value) ?? context.AddSlot(name.Text, party, kind, value, name.Span);
+        int slot = SiblingSlot(party, name, value) ?? context.AddSlot(name.Text, party, kind, name.Span);
         context.Now = context.Now.WithOwn(party, name.Text, new Holding([slot], value, name.Span));
         return slot;
     }
@@ -44,7 +44,7 @@ internal sealed class NameMaker(BindContext context)
     /// <summary>Sends a value; the slot that holds the message.</summary>
     public int Send(int sender, Name name, Typed value, IReadOnlyList<int> recipients)
     {
-        int slot = SiblingMessage(sender, name, value.Kind, recipients) ?? context.AddSlot(name.Text, sender, SlotKind.Message, value.Kind, name.Span);
+        int slot = SiblingMessage(sender, name, value.Kind, recipients) ?? context.AddSlot(name.Text, sender, SlotKind.Message, name.Span);
         _recipients[slot] = [.. recipients];
         context.Now = context.Now with
         {
@@ -53,7 +53,9 @@ internal sealed class NameMaker(BindContext context)
                 : context.Now.Origins.Remove(slot),
         };
         Holding holding = new([slot], value.Kind, name.Span);
-        CheckUnsent(sender, name, holding);
+        // A lie is the wrong value under the right name.
+        if (context.Cheat is not { Speaks: true })
+            CheckUnsent(sender, name, holding);
         context.Now = context.Now.WithSent(sender, name.Text, holding);
         foreach (int recipient in recipients)
             Receive(recipient, sender, name, holding);

@@ -13,6 +13,9 @@ internal abstract class NameView(BindContext context, NameState state)
     /// <summary>Who holds what.</summary>
     public NameState State { get; } = state;
 
+    /// <summary>Whether numbers left to a cheat are known here.</summary>
+    public virtual bool SeesChoices => false;
+
     /// <summary>The value of a bare name.</summary>
     public abstract Typed Bare(string name, Span span);
 
@@ -53,20 +56,25 @@ internal abstract class NameView(BindContext context, NameState state)
     }
 }
 
-/// <summary>A party's own view.</summary>
+/// <summary>A party's own view. Parties that cheat together know what any of them knows.</summary>
 /// <param name="context">The binding.</param>
 /// <param name="state">Who holds what.</param>
 /// <param name="actor">The party.</param>
 internal sealed class ActorView(BindContext context, NameState state, int actor) : NameView(context, state)
 {
     /// <inheritdoc/>
+    public override bool SeesChoices => Context.Cheat is { Speaks: true };
+
+    private IEnumerable<int> Fellows => Context.Cheat is { Speaks: true } cheat ? cheat.By.Where(p => p != actor) : [];
+
+    /// <inheritdoc/>
     public override Typed Bare(string name, Span span)
     {
-        IReadOnlyList<Holding> meanings = State.Meanings(actor, name);
+        IReadOnlyList<Holding> meanings = Together(p => State.Meanings(p, name));
         if (meanings.Count == 1)
             return Read(meanings[0], span);
         if (meanings.Count > 1)
-            return Ambiguous(name, span, Context.NameOf(actor), State.Received.GetValueOrDefault((actor, name))?.Keys ?? [actor]);
+            return Ambiguous(name, span, Context.NameOf(actor), State.Received.GetValueOrDefault((actor, name))?.Keys ?? [actor, .. Fellows]);
         IReadOnlyList<(int Party, Holding Value)> makers = State.Makers(name);
         return makers.Count == 0 ? Absent(null, name, span) : Missed(name, name, makers, span);
     }
@@ -74,18 +82,30 @@ internal sealed class ActorView(BindContext context, NameState state, int actor)
     /// <inheritdoc/>
     public override Typed Member(int party, string name, Span span)
     {
-        IReadOnlyList<Holding> meanings = State.MeaningsFrom(actor, party, name);
+        bool fellow = Fellows.Contains(party);
+        IReadOnlyList<Holding> meanings = fellow ? State.Meanings(party, name) : Together(p => State.MeaningsFrom(p, party, name));
         if (meanings.Count == 1)
             return Read(meanings[0], span);
         if (meanings.Count > 1)
-            return Ambiguous(name, span, Context.NameOf(actor), State.Received.GetValueOrDefault((actor, name))?.Keys ?? [actor]);
+            return Ambiguous(name, span, Context.NameOf(actor), State.Received.GetValueOrDefault((actor, name))?.Keys ?? [actor, .. Fellows]);
         IReadOnlyList<Holding> held = State.Meanings(party, name);
         return held.Count == 0 ? Absent(party, name, span) : Missed($"{Context.NameOf(party)}.{name}", name, [(party, held[0])], span);
     }
 
     /// <inheritdoc/>
-    public override Typed Seen(int subject, string name, Holding holding, string label, Span span) =>
-        State.CopyAt(actor, name, State.Identity(holding)) is { } copy ? Read(copy, span) : Missed(label, name, [(subject, holding)], span);
+    public override Typed Seen(int subject, string name, Holding holding, string label, Span span)
+    {
+        string identity = State.Identity(holding);
+        Holding? copy = Fellows.Prepend(actor).Select(p => State.CopyAt(p, name, identity)).FirstOrDefault(c => c is not null);
+        return copy is not null ? Read(copy, span) : Missed(label, name, [(subject, holding)], span);
+    }
+
+    // What one means oneself comes before what the others know.
+    private IReadOnlyList<Holding> Together(Func<int, IReadOnlyList<Holding>> meanings)
+    {
+        IReadOnlyList<Holding> own = meanings(actor);
+        return own.Count > 0 ? own : [.. Fellows.SelectMany(meanings).DistinctBy(State.Identity)];
+    }
 
     private Typed Missed(string label, string name, IReadOnlyList<(int Party, Holding Value)> makers, Span span)
     {
@@ -104,6 +124,9 @@ internal sealed class ActorView(BindContext context, NameState state, int actor)
 /// <param name="state">Who holds what at the end.</param>
 internal sealed class RefereeView(BindContext context, NameState state) : NameView(context, state)
 {
+    /// <inheritdoc/>
+    public override bool SeesChoices => true;
+
     /// <inheritdoc/>
     public override Typed Bare(string name, Span span)
     {
@@ -182,6 +205,9 @@ internal sealed class PublicView(BindContext context, NameState state) : NameVie
 /// <param name="subject">The party whose names are meant.</param>
 internal sealed class SubjectView(BindContext context, NameView outer, int subject) : NameView(context, outer.State)
 {
+    /// <inheritdoc/>
+    public override bool SeesChoices => outer.SeesChoices;
+
     /// <inheritdoc/>
     public override Typed Bare(string name, Span span) => Through(State.Meanings(subject, name), name, null, span);
 

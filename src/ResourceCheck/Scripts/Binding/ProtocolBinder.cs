@@ -18,7 +18,9 @@ internal static partial class ProtocolBinder
         parameters.CheckNames(given);
         DeclarationBinder declarations = new(context);
         declarations.Declare();
+        int? copies = declarations.Copies();
         IReadOnlyList<Requirement> requirements = declarations.Requirements();
+        NameState start = context.Now;
         LabelBinder labels = new(context);
         StepBinder binder = new(context, labels);
         IReadOnlyList<Step> steps = binder.Bind();
@@ -26,9 +28,14 @@ internal static partial class ProtocolBinder
         referee.Bind(binder.RefereeLines);
         if (!tree.Statements.Any(s => s is SuccessStatement))
             declarations.Missing("success", "success when true");
+        IReadOnlyList<DishonestCase> dishonest = new DishonestBinder(context, start).Bind();
         if (!context.Findings.IsEmpty || referee.Success is null || TreeWalk.Statements(tree.Statements).Any(s => s is BrokenStatement))
             return Outcome<Protocol>.Failed(context.Findings.All);
-        return Outcome<Protocol>.Of(Assemble(context, given, declared, requirements, steps, referee));
+        Protocol protocol = Assemble(context, given, declared, requirements, steps, referee) with { Dishonest = dishonest };
+        if (copies is not { } count)
+            return Outcome<Protocol>.Of(protocol);
+        ListProtocol lists = new(count, 0, binder.ListSteps, binder.Discussions);
+        return Outcome<Protocol>.Of(SlotOrder.Arrange(protocol with { Lists = lists }, context.IsPerCopy));
     }
 
     private static Protocol Assemble(
@@ -50,11 +57,10 @@ internal static partial class ProtocolBinder
             Claims = referee.Claims,
             Goals = referee.Goals,
             Requirements = requirements,
-            HandlesNone = TreeWalk.Statements(context.Tree.Statements).SelectMany(TreeWalk.Expressions).SelectMany(TreeWalk.Within).Any(e => e is NoneExpression),
+            HandlesNone = AbsentClicks.AreHandled(context.Tree),
         };
 
-    // A line that could not be read was told about already; names in it, and names that a part not available would make,
-    // must not be reported as missing elsewhere.
+    // A line that could not be read was told about already; names in it must not be reported as missing elsewhere.
     private static void SuspectBrokenLines(BindContext context)
     {
         foreach (Statement statement in TreeWalk.Statements(context.Tree.Statements))
@@ -63,11 +69,6 @@ internal static partial class ProtocolBinder
             {
                 foreach (Match word in Word().Matches(LineOf(context.Tree.Source, statement.Span)))
                     context.Findings.Suspect(word.Groups[1].Success ? word.Groups[1].Value : word.Value);
-            }
-            else if (Unavailable.Of(statement) is not null)
-            {
-                foreach (Statement inner in TreeWalk.Statements([statement]))
-                    Unavailable.Suspect(context, inner);
             }
         }
     }

@@ -32,6 +32,7 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
         foreach (RefereeLine line in lines)
         {
             (context.Counters, context.Loops, context.Now) = (line.Counters, line.Loops, line.State);
+            context.OnLists = context.HasCopies;
             switch (line.Statement)
             {
                 case SuccessStatement s: Judge(s, line); break;
@@ -40,6 +41,8 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
                 case GoalStatement s: Need(s, line); break;
             }
         }
+
+        context.OnLists = false;
     }
 
     private void Judge(SuccessStatement statement, RefereeLine line)

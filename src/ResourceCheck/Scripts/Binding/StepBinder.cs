@@ -17,6 +17,7 @@ internal sealed class StepBinder
     private readonly WhenBinder _whens;
     private readonly Reachability _reach;
     private readonly LabelBinder _labels;
+    private readonly BlockBinder _blocks;
     private List<RefereeLine> _openLines = [];
     private int _turns;
     private int _steps;
@@ -34,7 +35,14 @@ internal sealed class StepBinder
         Actors actors = new(context, _parties, _whens);
         _quantum = new QuantumSteps(context, actors, _names, labels);
         _classical = new ClassicalSteps(context, actors, _names, _parties);
+        _blocks = new BlockBinder(context, labels, _parties, Block);
     }
+
+    /// <summary>Steps of the discussions.</summary>
+    public IReadOnlyList<Step> ListSteps => _blocks.ListSteps;
+
+    /// <summary>Where each discussion's steps stand among <see cref="ListSteps"/>.</summary>
+    public IReadOnlyList<BlockRange> Discussions => _blocks.Discussions;
 
     /// <summary>Lines for the referee, in the order written, with the state they are to be read in.</summary>
     public List<RefereeLine> RefereeLines { get; } = [];
@@ -69,13 +77,15 @@ internal sealed class StepBinder
         switch (statement)
         {
             case ForStatement s: For(s, steps); break;
-            case RoundStatement s: Round(s, steps); break;
+            case RoundStatement s: _blocks.Round(s, steps); break;
+            case DiscussionStatement s: _blocks.Discussion(s); break;
+            case MeasureStatement or ApplyStatement or WaitStatement or InterceptStatement when _context.OnLists: Quantum(statement); break;
             case WhenStatement s: _whens.Bind(s, steps); break;
             case MeasureStatement s: _quantum.Measure(s, steps); break;
             case ApplyStatement s: _quantum.Apply(s, steps); break;
             case WaitStatement s: _quantum.Wait(s, steps); break;
             case InterceptStatement s: _quantum.Intercept(s, steps); break;
-            case CheckpointStatement s: _quantum.Checkpoint(s, steps); break;
+            case CheckpointStatement s: _blocks.CheckBeforeDiscussions(s); _quantum.Checkpoint(s, steps); break;
             case PickStatement s: _classical.Pick(s, steps); break;
             case SetStatement s: _classical.Set(s, steps); break;
             case SendStatement s: _classical.Send(s, steps); break;
@@ -88,10 +98,7 @@ internal sealed class StepBinder
 
     private void NotAStep(Statement statement)
     {
-        Message? refusal = Unavailable.Of(statement);
-        if (refusal is { } message)
-            _context.Findings.Report(statement.Span, message);
-        else if (statement is not BrokenStatement && !_context.Tree.Statements.Contains(statement))
+        if (statement is not BrokenStatement && !_context.Tree.Statements.Contains(statement))
             _context.Findings.Report(statement.Span, BindingMessages.DeclarationInBlock(_context.TextOf(statement.Span)));
     }
 
@@ -103,7 +110,7 @@ internal sealed class StepBinder
         if (_parties.Whole(loop.From) is not { } from || _parties.Whole(loop.To) is not { } to)
         {
             foreach (Statement inner in TreeWalk.Statements(loop.Body))
-                Unavailable.Suspect(_context, inner);
+                Suspect(inner);
             return;
         }
 
@@ -133,17 +140,34 @@ internal sealed class StepBinder
         (_context.Counters, _context.Loops) = (counters, loops);
     }
 
-    private void Round(RoundStatement round, List<Step> steps)
+    // Lines that use what a skipped line would have made are not to blame.
+    private void Suspect(Statement statement)
     {
-        _labels.Write(round.Title);
-        HashSet<int>? outer = _context.Named;
-        _context.Named = [];
-        Block(round.Body, steps);
-        _context.Named = outer;
+        foreach (Name name in TreeWalk.Makes(statement))
+            _context.Findings.Suspect(name.Text);
+        if (statement is CheckpointStatement checkpoint)
+            _context.Findings.Suspect(checkpoint.Label.Text);
+    }
+
+    // In a discussion as such the parser has told it; in lines that replace one it cannot know.
+    private void Quantum(Statement statement)
+    {
+        Suspect(statement);
+        if (_context.Cheat is { Speaks: true })
+            _context.Findings.Report(statement.Span, BindingMessages.QuantumInDiscussion());
     }
 
     private void Keep(KeepStatement keep, List<Step> steps)
     {
+        if (_context.Cheat is { Speaks: true })
+        {
+            _context.Findings.Report(keep.Span, BindingMessages.KeepInCheat());
+            return;
+        }
+
+        if (_context.OnLists)
+            return;
+        _blocks.CheckBeforeDiscussions(keep);
         Typed condition = new ExpressionBinder(_context, new PublicView(_context, _context.Now)).Expect(keep.Condition, ValueKind.Truth);
         if (condition.Bound is not null)
             steps.Add(new KeepStep(keep.Span, condition.Bound));
@@ -174,7 +198,7 @@ internal sealed class StepBinder
 
     private void Limit(Statement statement, int added)
     {
-        if (statement is ForStatement or RoundStatement or WhenStatement)
+        if (statement is ForStatement or RoundStatement or DiscussionStatement or WhenStatement)
             return;
         _steps += added;
         if (_steps <= MostSteps || _full)

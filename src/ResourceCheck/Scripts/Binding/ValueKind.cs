@@ -20,6 +20,9 @@ internal enum ValueKind
 
     /// <summary>A party.</summary>
     Party,
+
+    /// <summary>A set of positions in the lists.</summary>
+    Set,
 }
 
 /// <summary>Rules of the sorts of values.</summary>
@@ -57,6 +60,7 @@ internal static class ValueKinds
         ValueKind.Truth => "a truth value",
         ValueKind.Basis => "a basis",
         ValueKind.Party => "a party",
+        ValueKind.Set => "a set of positions",
         _ => "none",
     };
 }

@@ -48,6 +48,9 @@ internal sealed class WhenBinder(BindContext context, NameMaker names, Reachabil
             false => BranchMerge.Take(second, first, firstSlot, names.Shared),
             _ => BranchMerge.Merge(first, second, firstSlot, names.Shared),
         };
+        // Only the cheat acted in it: its own lines stand elsewhere.
+        if (context.Cheat is { Replaces: true } && then.Count == 0 && otherwise.Count == 0)
+            return;
         if (taken is { } holds)
             steps.AddRange(holds ? then : otherwise);
         else if (Condition(when.Condition, before, actors, intercepts) is { } condition)

@@ -39,6 +39,13 @@ internal static class DeclarationParser
         return new ChooseStatement(span, name, Domain(cursor));
     }
 
+    public static Statement Perfect(LineCursor cursor)
+    {
+        Span span = Start(cursor);
+        cursor.ExpectWord("hardware", "`hardware`");
+        return new PerfectStatement(span);
+    }
+
     public static Statement Require(LineCursor cursor)
     {
         Span span = Start(cursor);

@@ -54,6 +54,7 @@ internal static class StatementTable
         new("goal", Turns, FigureParser.Goal),
         new("dishonest", Top, BlockHeaderParser.Dishonest, Places.Dishonest),
         new("choose", Places.Dishonest, DeclarationParser.Choose),
+        new("perfect", Places.Dishonest, DeclarationParser.Perfect),
         new("instead", Places.Dishonest, BlockHeaderParser.Instead, Places.Replacement),
         new("before", Places.Dishonest, BlockHeaderParser.Before, Places.Replacement),
         new("harm", Places.Dishonest, FigureParser.Harm),

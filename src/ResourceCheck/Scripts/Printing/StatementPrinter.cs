@@ -21,6 +21,7 @@ internal static class StatementPrinter
         OutsiderStatement s => $"outsider {s.Name.Text}",
         ResourceStatement s => $"resource antisymmetric on {PrintParties(s.Parties)}",
         CopiesStatement s => $"copies {Print(s.Count)}",
+        PerfectStatement => "perfect hardware",
         ChooseStatement s => $"choose {s.Name.Text} in {Domain(s.Domain)}",
         _ => null,
     };

@@ -118,6 +118,9 @@ public sealed record ChooseStatement(Span Span, Name Name, Domain Domain) : Stat
 /// <summary><c>instead of "block" … end</c> or <c>before "block" … end</c>.</summary>
 public sealed record ReplaceStatement(Span Span, Quoted Block, bool Before, IReadOnlyList<Statement> Body) : Statement(Span);
 
+/// <summary><c>perfect hardware</c>: the cheat's own apparatus is without noise.</summary>
+public sealed record PerfectStatement(Span Span) : Statement(Span);
+
 /// <summary><c>harm when EXPR</c>.</summary>
 public sealed record HarmStatement(Span Span, Expression Condition) : Statement(Span);
 

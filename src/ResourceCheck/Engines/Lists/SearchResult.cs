@@ -1,0 +1,24 @@
+namespace ResourceCheck.Engines.Lists;
+
+/// <summary>How much to search.</summary>
+/// <param name="ExhaustiveUpTo">All points are evaluated when there are at most this many.</param>
+/// <param name="GridPoints">Most points of the grid.</param>
+/// <param name="Climbs">Climbs from the grid's best points.</param>
+/// <param name="RandomClimbs">Climbs from random points.</param>
+/// <param name="Sweeps">Most sweeps of every number through its range.</param>
+/// <param name="Hopeless">A sweep ends where the value falls below this part of the best one.</param>
+/// <param name="Seed">Fixes the random points.</param>
+public sealed record SearchOptions(int ExhaustiveUpTo = 1000, int GridPoints = 1100, int Climbs = 6, int RandomClimbs = 4, int Sweeps = 6, double Hopeless = 0.02, ulong Seed = 1);
+
+/// <summary>State of a search.</summary>
+/// <param name="Evaluations">Points evaluated so far.</param>
+/// <param name="Best">Largest value so far.</param>
+public sealed record SearchProgress(int Evaluations, double Best);
+
+/// <summary>What a search found.</summary>
+/// <param name="Choices">The best numbers.</param>
+/// <param name="Value">Their value.</param>
+/// <param name="Evaluations">Points evaluated.</param>
+/// <param name="Exhaustive">Whether all points were evaluated, which proves the maximum.</param>
+/// <param name="Check">How the search was checked, in words.</param>
+public sealed record SearchResult(IReadOnlyList<int> Choices, double Value, int Evaluations, bool Exhaustive, string Check);
