@@ -13,7 +13,7 @@ namespace ResourceCheck.Tests.Binding;
 public sealed class RobustnessTests
 {
     private static readonly string[] Library = Directory.GetFiles(Path.Combine(Root(), "protocols"), "*.protocol");
-    private static readonly string[] Texts = [.. Library.Concat(Directory.GetFiles(Path.Combine(Root(), "tests/ResourceCheck.Tests/Binding/Cases"), "*.protocol")).Select(File.ReadAllText)];
+    private static readonly string[] Texts = [.. Library.Concat(Directory.GetFiles(Path.Combine(Root(), "tests/ResourceCheck.Tests/Binding"), "*.protocol", SearchOption.AllDirectories)).Select(File.ReadAllText)];
 
     public static TheoryData<string> LibraryScripts => [.. Library.Select(f => Path.GetFileName(f)!).Order(StringComparer.Ordinal)];
 

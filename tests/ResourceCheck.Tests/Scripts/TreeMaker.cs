@@ -49,9 +49,10 @@ internal sealed class TreeMaker(Random random)
         ? new CheckpointStatement(default, Text(), _expressions.PartyList())
         : new RoundStatement(default, Text(), Many(0, 6, () => RoundLine(2)));
 
-    private Statement DishonestLine() => random.Next(3) switch
+    private Statement DishonestLine() => random.Next(4) switch
     {
         0 => new ChooseStatement(default, NewName(), AnyDomain()),
+        3 => new PerfectStatement(default),
         1 => new HarmStatement(default, Expression()),
         _ => new ReplaceStatement(default, Text(), random.Next(2) == 0, Many(0, 3, () => RoundLine(1))),
     };

@@ -68,7 +68,7 @@ internal sealed class Actors(BindContext context, PartyResolver parties, WhenBin
     {
         if (!cheat.Speaks)
             return cheat.Replaces ? [.. mentions.Where(m => !cheat.By.Contains(m.Party))] : mentions;
-        foreach (PartyMention honest in mentions.Where(m => !cheat.By.Contains(m.Party)))
+        foreach (PartyMention honest in mentions.Where(m => cheat.By.Count > 0 && !cheat.By.Contains(m.Party)))
             context.Findings.Report(honest.Span, BindingMessages.HonestInCheat(context.NameOf(honest.Party), cheat.Names));
         return [.. mentions.Where(m => cheat.By.Contains(m.Party))];
     }

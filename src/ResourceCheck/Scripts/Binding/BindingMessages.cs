@@ -311,7 +311,7 @@ internal static class BindingMessages
     public const string CaseCode = "S080";
 
     public static Message WrongInCase(int line, Message message) =>
-        new(CaseCode, $"In this case line {line} cannot run as it is written: {message.Text}", "make every name again that the replaced lines make and later lines use, for the same parties");
+        new(CaseCode, $"In this case line {line} cannot run as it is written: {message.Text}", "make the names again that later lines use, for the same parties, and leave the qudits that they need");
 
     private static string? DidYouMean(string? near) => near is null ? null : $"did you mean {near}?";
 

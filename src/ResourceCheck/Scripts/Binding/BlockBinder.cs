@@ -22,7 +22,7 @@ internal sealed class BlockBinder(BindContext context, LabelBinder labels, Party
     /// <summary>Binds a round.</summary>
     public void Round(RoundStatement round, List<Step> steps)
     {
-        CheckBeforeDiscussions(round);
+        _ = StandsAboveDiscussions(round);
         Inside(round.Title, round.Body, steps);
     }
 
@@ -39,11 +39,13 @@ internal sealed class BlockBinder(BindContext context, LabelBinder labels, Party
         _discussions.Add(new BlockRange(title, first, _listSteps.Count - first));
     }
 
-    /// <summary>Reports a line about single copies that stands below a discussion of all of them.</summary>
-    public void CheckBeforeDiscussions(Statement statement)
+    /// <summary>Whether a line about single copies stands above every discussion of all of them; reports it when it does not.</summary>
+    public bool StandsAboveDiscussions(Statement statement)
     {
-        if (_firstDiscussion is { } first && !context.OnLists)
-            context.Findings.Report(statement.Span, BindingMessages.BelowDiscussion(context.LineOf(first)));
+        if (_firstDiscussion is not { } first || context.OnLists)
+            return true;
+        context.Findings.Report(statement.Span, BindingMessages.BelowDiscussion(context.LineOf(first)));
+        return false;
     }
 
     private string Inside(Quoted quoted, IReadOnlyList<Statement> body, List<Step> steps)
@@ -87,7 +89,7 @@ internal sealed class BlockBinder(BindContext context, LabelBinder labels, Party
             cheat.Replaces = false;
         }
 
-        if (!spoken)
+        if (!spoken && cheat.By.Count > 0)
             context.Findings.Report(instead.Span, BindingMessages.NothingToReplace(cheat.Names, instead.Block.Text, cheat.By.Count));
     }
 

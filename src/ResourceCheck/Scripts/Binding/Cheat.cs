@@ -29,14 +29,17 @@ internal sealed class Cheat(BindContext context, DishonestStatement statement, I
     public IReadOnlyList<Choice> Choices => [.. _ranges.OfType<Choice>()];
 
     /// <summary>Numbers that no line uses.</summary>
-    public IEnumerable<ChooseStatement> Unused => _choices.Where((_, i) => !_used[i]);
+    public IEnumerable<ChooseStatement> Unused => _choices.Where((c, i) => !_used[i] && IsFree(c.Name.Text));
 
     /// <summary>What stands in place of a block, or before it, or null.</summary>
     public ReplaceStatement? For(string written, string title, bool before) => statement.Body.OfType<ReplaceStatement>()
         .FirstOrDefault(r => r.Before == before && (r.Block.Text == written || r.Block.Text == title));
 
     /// <summary>Whether a name is a number left open.</summary>
-    public bool Chooses(string name) => _choices.Any(c => c.Name.Text == name);
+    public bool Chooses(string name) => _choices.Any(c => c.Name.Text == name) && IsFree(name);
+
+    /// <summary>Whether a name of a choice means nothing else in the script.</summary>
+    public bool IsFree(string name) => !context.IsNameTaken(name) && context.Makers.Of(name).Count <= 1;
 
     /// <summary>A number left open; its range is read as whoever uses it first knows it there.</summary>
     public Typed Use(NameExpression name, NameView view)

@@ -32,7 +32,7 @@ internal sealed class DishonestBinder(BindContext context, NameState start)
         context.Makers = new MakerIndex(context.Tree, statement);
         Cheat cheat = new(context, statement, Parties(statement));
         CheckLines(statement);
-        CheckChoices(statement);
+        CheckChoices(statement, cheat);
         context.Cheat = cheat;
         StepBinder binder = new(context, _labels);
         IReadOnlyList<Step> steps = binder.Bind();
@@ -78,16 +78,13 @@ internal sealed class DishonestBinder(BindContext context, NameState start)
             context.Findings.Report(statement.Span, BindingMessages.NoReplacement(statement.Title.Text));
     }
 
-    private void CheckChoices(DishonestStatement statement)
+    private void CheckChoices(DishonestStatement statement, Cheat cheat)
     {
-        HashSet<string> names = [];
         foreach (ChooseStatement choose in statement.Body.OfType<ChooseStatement>())
         {
             string name = choose.Name.Text;
-            if (context.IsNameTaken(name))
-                context.Findings.Report(choose.Name.Span, BindingMessages.NameTaken(name, context.RoleOf(name)));
-            else if (!names.Add(name) || context.Makers.Of(name).Count > 1)
-                context.Findings.Report(choose.Name.Span, BindingMessages.NameTaken(name, "another value"));
+            if (!cheat.IsFree(name))
+                context.Findings.Report(choose.Name.Span, BindingMessages.NameTaken(name, context.IsNameTaken(name) ? context.RoleOf(name) : "another value"));
         }
     }
 

@@ -71,7 +71,7 @@ internal sealed class ListCalls(ExpressionBinder values)
     private BoundExpression? Predicate(Expression condition)
     {
         BoundExpression? bound = new ExpressionBinder(Context, values.View) { InPredicate = true }.Expect(condition, ValueKind.Truth).Bound;
-        if (bound is null or BoundLiteral || BoundWalk.Slots(bound).Any(Context.IsPerCopy))
+        if (bound is null or BoundLiteral || !Context.HasCopies || BoundWalk.Slots(bound).Any(Context.IsPerCopy))
             return bound;
         Context.Findings.Report(condition.Span, BindingMessages.SameInEveryCopy(Context.TextOf(condition.Span)));
         return null;

@@ -54,7 +54,7 @@ internal sealed class NameMaker(BindContext context)
         };
         Holding holding = new([slot], value.Kind, name.Span);
         // A lie is the wrong value under the right name.
-        if (context.Cheat is not { Speaks: true })
+        if (value.Bound is not null && context.Cheat is not { Speaks: true })
             CheckUnsent(sender, name, holding);
         context.Now = context.Now.WithSent(sender, name.Text, holding);
         foreach (int recipient in recipients)

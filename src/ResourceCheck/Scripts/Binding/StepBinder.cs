@@ -85,7 +85,8 @@ internal sealed class StepBinder
             case ApplyStatement s: _quantum.Apply(s, steps); break;
             case WaitStatement s: _quantum.Wait(s, steps); break;
             case InterceptStatement s: _quantum.Intercept(s, steps); break;
-            case CheckpointStatement s: _blocks.CheckBeforeDiscussions(s); _quantum.Checkpoint(s, steps); break;
+            case CheckpointStatement s when _blocks.StandsAboveDiscussions(s): _quantum.Checkpoint(s, steps); break;
+            case CheckpointStatement: Suspect(statement); break;
             case PickStatement s: _classical.Pick(s, steps); break;
             case SetStatement s: _classical.Set(s, steps); break;
             case SendStatement s: _classical.Send(s, steps); break;
@@ -98,7 +99,7 @@ internal sealed class StepBinder
 
     private void NotAStep(Statement statement)
     {
-        if (statement is not BrokenStatement && !_context.Tree.Statements.Contains(statement))
+        if (statement is not (BrokenStatement or DishonestStatement or ReplaceStatement or ChooseStatement or PerfectStatement or HarmStatement) && !_context.Tree.Statements.Contains(statement))
             _context.Findings.Report(statement.Span, BindingMessages.DeclarationInBlock(_context.TextOf(statement.Span)));
     }
 
@@ -167,7 +168,7 @@ internal sealed class StepBinder
 
         if (_context.OnLists)
             return;
-        _blocks.CheckBeforeDiscussions(keep);
+        _ = _blocks.StandsAboveDiscussions(keep);
         Typed condition = new ExpressionBinder(_context, new PublicView(_context, _context.Now)).Expect(keep.Condition, ValueKind.Truth);
         if (condition.Bound is not null)
             steps.Add(new KeepStep(keep.Span, condition.Bound));
