@@ -85,6 +85,13 @@ internal static class JudgementMessages
         "make all pairs equivalent (a pair, an equilateral triangle), stand further apart, or store for a shorter time",
         Place.Of("storage"));
 
+    public static Diagnostic NotEvaluatedYet(Scripts.Binding.Protocol protocol) => new(
+        "P030",
+        Severity.Error,
+        $"This script is read and checked, but this version does not evaluate {(protocol.Lists is not null ? "lists of copies" : "dishonest parties")}: protocols of honest parties on single copies fit here.",
+        protocol.Lists is not null ? "`format` works on it; take out `copies` and the discussions to evaluate its rounds" : "take the dishonest cases out to evaluate the honest one",
+        Place.Of(protocol.Source.Name));
+
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
 

@@ -49,6 +49,12 @@ internal sealed record Setup(
         findings.AddRange(protocol.Findings);
         if (protocol.Value is not { } checkedProtocol)
             return;
+        if (checkedProtocol.Lists is not null || checkedProtocol.Dishonest.Count > 0)
+        {
+            findings.Add(JudgementMessages.NotEvaluatedYet(checkedProtocol));
+            return;
+        }
+
         Outcome<World>? world = document?.Value is { } read ? ConditionsFile.Bind(read, checkedProtocol) : null;
         findings.AddRange(world?.Findings ?? []);
         (IReadOnlyDictionary<string, System.Numerics.Complex[,]> matrices, IReadOnlyList<Diagnostic> matrixFindings) = ScriptMatrices.Read(checkedProtocol);
