@@ -14,7 +14,7 @@ public sealed record Evaluation
     /// <summary>Probability that all heralded qudits arrived.</summary>
     public required double Heralded { get; init; }
 
-    /// <summary>Of the heralded, those in which every measurement clicked; 1 when the script handles none itself.</summary>
+    /// <summary>Of the heralded, those not dropped for a measurement without a click; 1 when the script handles none itself. A copy that a <c>keep</c> drops is not measured further.</summary>
     public required double Seen { get; init; }
 
     /// <summary>Of those, the ones that every <c>keep</c> kept.</summary>

@@ -13,7 +13,7 @@ internal static class Breaking
     {
         MetricName[] metrics = [.. new[] { claim.Left, claim.Right }.SelectMany(FigureTally.Leaves).OfType<MetricFigure>().Select(f => f.Metric)];
         if (metrics.FirstOrDefault(m => m.Kind == MetricKind.Checkpoint) is { } look)
-            return Lowest(evaluation.Checkpoints.First(c => c.Label == look.Label), count);
+            return evaluation.Checkpoints.FirstOrDefault(c => c.Label == look.Label) is { } reached ? Lowest(reached, count) : [];
         if (metrics.Any(m => m.Kind is MetricKind.Success or MetricKind.Failure or MetricKind.Abort))
             return [.. evaluation.Failures.Take(count)];
         return [.. evaluation.Ends.Take(count)];

@@ -26,7 +26,7 @@ internal static class Evaluator
     }
 
     /// <summary>Evaluates a setting for all private inputs.</summary>
-    public static Outcome<IReadOnlyList<Evaluation>> Evaluate(Setting setting, RunRequest request)
+    public static Outcome<IReadOnlyList<Evaluation>> Evaluate(Setting setting, RunRequest request, bool mayKeepNothing = false)
     {
         Outcome<EngineChoice> choice = Choose(setting, request);
         if (choice.Value is not { } engine)
@@ -35,7 +35,7 @@ internal static class Evaluator
         if (prepared.Value is not { } state)
             return Outcome<IReadOnlyList<Evaluation>>.Failed(prepared.Findings);
         Evaluation[] evaluations = [.. setting.InputAssignments().Select(i => Evaluate(setting, setting.Plan, state, i, engine, request))];
-        return evaluations.Any(e => !(e.Yield > 0))
+        return !mayKeepNothing && evaluations.Any(e => !(e.Yield > 0))
             ? Outcome<IReadOnlyList<Evaluation>>.Failed([JudgementMessages.NothingKept(setting.Words)])
             : Outcome<IReadOnlyList<Evaluation>>.From(evaluations, prepared.Findings);
     }

@@ -8,6 +8,9 @@ namespace ResourceCheck.Judgement;
 /// <summary>Holds goals against the evaluations and puts the verdict into words.</summary>
 internal static class GoalJudgement
 {
+    /// <summary>A figure that misses its goal by less than sums of some thousand terms lose to rounding has not missed it.</summary>
+    private const double RoundOff = 1e-12;
+
     /// <summary>Each goal with the evaluation that comes off worst.</summary>
     public static IReadOnlyList<(Goal Goal, GoalResult Result)> Goals(IReadOnlyList<Evaluated> all) =>
         [.. all.SelectMany(e => e.Setting.Protocol.Goals).DistinctBy(g => g.Text).Select(goal => (goal, Judge(goal, all)))];
@@ -41,7 +44,7 @@ internal static class GoalJudgement
         bool least = goal.Comparison == BinaryOperator.GreaterOrEqual;
         double margin = least ? value.Value - goal.Threshold : goal.Threshold - value.Value;
         bool sideFits = double.IsFinite(least ? value.Low : value.High); // an upper bound proves no "at least", and the reverse
-        return new GoalResult(goal.Text, value, goal.Threshold, margin >= 0 && sideFits, margin);
+        return new GoalResult(goal.Text, value, goal.Threshold, margin >= -RoundOff && sideFits, margin);
     }
 
     private static string NoGoal(IReadOnlyList<Evaluated> all)

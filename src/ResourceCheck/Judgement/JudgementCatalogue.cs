@@ -27,5 +27,6 @@ internal static class JudgementCatalogue
         new("P020", "no exchange shifts at one point", "At no distance the exchange shifts between emitters have no bound; the shape `point` is the limit in which they are left out.", "Give a shape with a spacing to see what they do."),
         new("P021", "dark is not stable", "The antisymmetric state hardly emits, but exchange shifts that differ from pair to pair turn it into other dark states: the no-photon probability stays high while the fidelity falls.", "Make all pairs equivalent, stand further apart, or store for a shorter time."),
         new("P030", "not evaluated yet", "Lists of copies and dishonest parties are part of the language and are checked, but no figure is computed for them yet.", "Take them out to evaluate the rest."),
+        new("P031", "interception that knows too much", "An interception happens in flight, when no message has been sent yet, so a conditional block around it can use only the outsider's own values and hold only the outsider's lines.", "Condition it on the outsider's own picks."),
     ];
 }

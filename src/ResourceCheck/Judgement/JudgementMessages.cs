@@ -85,6 +85,13 @@ internal static class JudgementMessages
         "make all pairs equivalent (a pair, an equilateral triangle), stand further apart, or store for a shorter time",
         Place.Of("storage"));
 
+    public static Diagnostic InterceptTooKnowing(Place at) => new(
+        "P031",
+        Severity.Error,
+        "This interception stands in a conditional block that asks for more than the outsider knows while qudits fly: only the outsider's own values and lines fit in such a block.",
+        "let the condition use the outsider's own picks alone, and take other lines out of the block",
+        at);
+
     public static Diagnostic NotEvaluatedYet(Scripts.Binding.Protocol protocol) => new(
         "P030",
         Severity.Error,

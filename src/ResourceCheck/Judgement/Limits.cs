@@ -44,7 +44,7 @@ internal static class Limits
         Plan plan = PlanWithout.Of(worst.Setting.Plan, source, party);
         PreparedState state = Resource.Prepare(plan.World.Resource, plan.Protocol.Holders.Count).Value!; // was prepared once already
         Evaluation evaluation = Evaluator.Evaluate(worst.Setting, plan, state, worst.Actual.Inputs, worst.Actual.Engine, request);
-        double value = (worst with { Actual = evaluation }).Figure(metric)!.Value;
+        double value = (worst with { Actual = evaluation }).Figure(metric)?.Value ?? double.NaN; // a checkpoint may never be reached without the source
         return double.IsNaN(value) ? worst.Figure(metric)!.Value : value;
     }
 

@@ -31,7 +31,7 @@ internal static class MetricGathering
     private static MetricResult Worst(string name, IReadOnlyList<Evaluated> all, Func<Evaluation, Estimate> figure, bool greatest)
     {
         Evaluated worst = all.MinBy(e => (greatest ? -1 : 1) * figure(e.Actual).Value)!;
-        return new MetricResult(name, figure(worst.Actual), figure(worst.Ideal).Value, Range(all.Select(e => figure(e.Actual).Value)), WorstAt(worst, all));
+        return new MetricResult(name, figure(worst.Actual), Defined(figure(worst.Ideal).Value), Range(all.Select(e => figure(e.Actual).Value)), WorstAt(worst, all));
     }
 
     private static MetricResult Report(string label, IReadOnlyList<Evaluated> all)
@@ -39,17 +39,20 @@ internal static class MetricGathering
         MetricName name = new(MetricKind.Report, label);
         Evaluated[] having = [.. all.Where(e => e.Figure(name) is not null)];
         Evaluated least = having.MinBy(e => e.Figure(name)!.Value)!;
-        return new MetricResult(label, least.Figure(name)!, (least with { Actual = least.Ideal }).Figure(name)!.Value, Range(having.Select(e => e.Figure(name)!.Value)), null); // which end is the worse one only a goal could tell
+        return new MetricResult(label, least.Figure(name)!, Defined((least with { Actual = least.Ideal }).Figure(name)?.Value ?? double.NaN), Range(having.Select(e => e.Figure(name)!.Value)), null); // which end is the worse one only a goal could tell
     }
 
     private static CheckpointResult Checkpoint(string label, IReadOnlyList<Evaluated> all)
     {
         (Evaluated worst, CheckpointEvaluation look) = all
             .SelectMany(e => e.Actual.Checkpoints.Where(c => c.Label == label).Select(c => (e, c))).MinBy(pair => pair.c.Fidelity.Value);
-        double ideal = worst.Ideal.Checkpoints.First(c => c.Label == label).Fidelity.Value;
+        double ideal = worst.Ideal.Checkpoints.FirstOrDefault(c => c.Label == label)?.Fidelity.Value ?? double.NaN;
         bool builtIn = worst.Actual.Checkpoints.Take(BuiltIn).Any(c => c.Label == label);
         return new CheckpointResult(label, look.Fidelity, ideal, ideal - look.Fidelity.Value, look.Kept, look.At, look.Branches, builtIn);
     }
+
+    /// <summary>Under ideal conditions a figure may be undefined although it is not under these.</summary>
+    private static double? Defined(double value) => double.IsNaN(value) ? null : value;
 
     /// <summary>prepared, stored, arrived.</summary>
     private const int BuiltIn = 3;

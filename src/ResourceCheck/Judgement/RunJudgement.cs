@@ -27,7 +27,7 @@ internal static class RunJudgement
         findings.AddRange(actual.Findings);
         if (actual.Value is not { } evaluations)
             return [];
-        Outcome<IReadOnlyList<Evaluation>> ideal = setting.IsIdeal ? actual : Evaluator.Evaluate(setting.Idealised(), request);
+        Outcome<IReadOnlyList<Evaluation>> ideal = setting.IsIdeal ? actual : Evaluator.Evaluate(setting.Idealised(), request, mayKeepNothing: true);
         findings.AddRange(ideal.Succeeded ? [] : ideal.Findings);
         return ideal.Value is { } best ? evaluations.Zip(best, (a, i) => new Evaluated(setting, a, i)) : [];
     }

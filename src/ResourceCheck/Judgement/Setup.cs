@@ -55,6 +55,10 @@ internal sealed record Setup(
             return;
         }
 
+        Diagnostic[] misplaced = [.. Planner.MisplacedInterceptions(checkedProtocol).Select(s => JudgementMessages.InterceptTooKnowing(checkedProtocol.Source.PlaceOf(s.Span)))];
+        findings.AddRange(misplaced);
+        if (misplaced.Length > 0)
+            return;
         Outcome<World>? world = document?.Value is { } read ? ConditionsFile.Bind(read, checkedProtocol) : null;
         findings.AddRange(world?.Findings ?? []);
         (IReadOnlyDictionary<string, System.Numerics.Complex[,]> matrices, IReadOnlyList<Diagnostic> matrixFindings) = ScriptMatrices.Read(checkedProtocol);

@@ -28,6 +28,8 @@ internal static class LocalUnitaries
     public static Complex[,] LevelSwap(int levels, int i, int j)
     {
         Complex[,] u = MatrixMath.Identity(levels);
+        if (i == j)
+            return u;
         (u[i, i], u[j, j]) = (0, 0);
         (u[i, j], u[j, i]) = (1, 1);
         return u;

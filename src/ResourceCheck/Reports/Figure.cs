@@ -32,7 +32,7 @@ internal sealed record Figure(
 
     private static Figure OfCheckpoint(CheckpointResult checkpoint, RunResult run) => new(
         Honest, checkpoint.Name, checkpoint.Name, "fidelity", FigureText.One, checkpoint.Fidelity, checkpoint.Ideal, checkpoint.Loss,
-        Join(KeptNote(checkpoint.Kept, run.Yield.Value.Value), SeenNote(run)), !checkpoint.BuiltIn);
+        Join(KeptNote(checkpoint.Kept, run.Yield.Value.Value), checkpoint.BuiltIn ? "" : SeenNote(run)), !checkpoint.BuiltIn);
 
     private static Figure OfMetric(CaseResult of, MetricResult metric, RunResult run) => new(
         of.Case, metric.Name, of.Case == Honest ? metric.Name : $"{metric.Name} \"{of.Case}\"", of.Dishonest.Count == 0 ? "" : $"by {string.Join(", ", of.Dishonest)}",
@@ -58,7 +58,7 @@ internal sealed record Figure(
 
     private static string FactorNote(YieldResult yield) => Join(
         yield.Heralded < 1 ? $"{FigureText.Number(yield.Heralded)} arrive" : "",
-        yield.Seen < 1 ? $"{FigureText.Number(yield.Seen)} are seen by all" : "",
+        yield.Seen < 1 ? $"{FigureText.Number(yield.Seen)} not dropped for a missing click" : "",
         yield.Kept < 1 ? $"{FigureText.Number(yield.Kept)} are kept by the script" : "");
 
     private static string SeenNote(RunResult run) => run.Yield.OnlySeen ? OnlySeen : "";

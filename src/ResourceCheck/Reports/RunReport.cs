@@ -94,7 +94,7 @@ internal static class RunReport
         if (way.Length > 0)
             remarks.Add($"Fidelity on the way: {string.Join(", ", way.Select(OnTheWay))}.");
         if (run.Yield.OnlySeen)
-            remarks.Add($"Every figure is {Figure.OnlySeen}: copies in which a measurement did not click were dropped by announcement.");
+            remarks.Add($"Figures are {Figure.OnlySeen}: copies in which a measurement did not click are dropped by announcement, from that measurement on.");
         return remarks;
     }
 

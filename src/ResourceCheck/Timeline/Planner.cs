@@ -27,6 +27,16 @@ public sealed class Planner
     /// <summary>The plan of a protocol under a world.</summary>
     public static Plan Lay(Protocol protocol, World world) => new Planner(protocol, world).Lay();
 
+    /// <summary>Interceptions in conditional blocks that ask for more than an outsider knows while qudits fly; they have no place on the clock.</summary>
+    public static IEnumerable<Step> MisplacedInterceptions(Protocol protocol)
+    {
+        Planner planner = new(protocol, World.Ideal(protocol.Parties.Count, protocol.Levels));
+        return protocol.Steps.OfType<WhenStep>().Where(b => !planner.IsInFlight(b)).SelectMany(Interceptions);
+    }
+
+    private static IEnumerable<Step> Interceptions(WhenStep block) =>
+        block.Then.Concat(block.Otherwise).SelectMany(s => s is WhenStep inner ? Interceptions(inner) : s is InterceptStep ? [s] : Enumerable.Empty<Step>());
+
     private IEnumerable<int> Insiders => Enumerable.Range(0, _protocol.Parties.Count).Except(_protocol.Outsiders);
 
     private Plan Lay()
@@ -58,9 +68,14 @@ public sealed class Planner
     {
         InterceptStep => true,
         PickStep pick => _protocol.Outsiders.Contains(pick.Party),
+        WhenStep block => IsInFlight(block),
         SetStep set => _protocol.Outsiders.Contains(set.Party) && !Dependencies.Of(set.Value).Any(IsInsidersSlot),
         _ => false,
     };
+
+    /// <summary>A conditional block of an outsider is in flight as a whole when it asks for nothing but outsiders' values.</summary>
+    private bool IsInFlight(WhenStep block) =>
+        !Dependencies.Of(block.Condition).Any(IsInsidersSlot) && block.Then.Concat(block.Otherwise).All(IsInFlight);
 
     private bool IsInsidersSlot(int slot) => !_protocol.Outsiders.Contains(_protocol.Slots[slot].Party);
 
@@ -78,17 +93,32 @@ public sealed class Planner
     private void AddInFlight(List<PlanStep> steps, Clock clock, double parted)
     {
         foreach (Step step in _protocol.Steps.Where(IsInFlight))
+            AddOneInFlight(step, steps, clock, parted);
+    }
+
+    private void AddOneInFlight(Step step, List<PlanStep> steps, Clock clock, double parted)
+    {
+        switch (step)
         {
-            if (step is InterceptStep intercept)
-            {
+            case InterceptStep intercept:
                 steps.Add(new InterceptPlanStep(intercept.Victim, intercept.Basis, intercept.Slot));
                 Record(parted, parted, intercept.Outsider, TimelineKind.Interception, _words.Of(intercept));
-            }
-            else
-            {
+                break;
+            case WhenStep block:
+                steps.Add(new WhenPlanStep(block.Condition, BlockInFlight(block.Then, clock, parted), BlockInFlight(block.Otherwise, clock, parted)));
+                break;
+            default:
                 AddLocal(step, [], steps, clock);
-            }
+                break;
         }
+    }
+
+    private List<PlanStep> BlockInFlight(IEnumerable<Step> block, Clock clock, double parted)
+    {
+        List<PlanStep> steps = [];
+        foreach (Step step in block)
+            AddOneInFlight(step, steps, clock, parted);
+        return steps;
     }
 
     private void AddFlights(List<PlanStep> steps, Clock clock, double parted)
@@ -156,6 +186,8 @@ public sealed class Planner
                 Start(abort.Party, [.. ambient, .. Dependencies.Of(abort.Condition)], clock);
                 steps.Add(new AbortPlanStep(abort.Party, abort.Condition));
                 break;
+            default:
+                throw new InvalidOperationException($"The planner has no place for {step.GetType().Name} here.");
         }
     }
 

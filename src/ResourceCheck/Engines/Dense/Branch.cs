@@ -23,6 +23,9 @@ internal sealed class Branch
     /// <summary>Parties that gave up, as bits.</summary>
     public ulong Aborted { get; init; }
 
+    /// <summary>Whether a party has given up; what it makes from then on is none.</summary>
+    public bool HasAborted(int party) => (Aborted & (1UL << party)) != 0;
+
     public Branch With(int slot, Value value)
     {
         Value[] slots = [.. Slots];

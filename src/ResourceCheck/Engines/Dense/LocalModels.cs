@@ -69,12 +69,16 @@ internal sealed class LocalModels(OperatorBasis basis, IReadOnlyDictionary<strin
     {
         UnitaryKind.Shift => LocalUnitaries.Shift(Basis.Levels, key.First),
         UnitaryKind.Clock => LocalUnitaries.Clock(Basis.Levels, key.First),
+        UnitaryKind.LevelSwap when !IsLevel(key.First) || !IsLevel(key.Second) => null,
+        UnitaryKind.Fourier or UnitaryKind.InverseFourier when key.First == 0 || key.First > Basis.Levels => null,
         UnitaryKind.LevelSwap => LocalUnitaries.LevelSwap(Basis.Levels, key.First, key.Second),
         UnitaryKind.Fourier => BasisVectors.Fourier(Basis.Levels, key.First < 0 ? Basis.Levels : key.First),
         UnitaryKind.InverseFourier => MatrixMath.Adjoint(BasisVectors.Fourier(Basis.Levels, key.First < 0 ? Basis.Levels : key.First)),
         UnitaryKind.Complement => LocalUnitaries.Complement(key.Basis!, BasisVectors.Of(key.Basis!, Basis.Levels, matrices), key.First),
         _ => matrices[key.File!],
     };
+
+    private bool IsLevel(int index) => index >= 0 && index < Basis.Levels;
 
     private double[][] BuildEffects(BasisValue value, DetectionModel model)
     {

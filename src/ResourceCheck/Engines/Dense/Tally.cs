@@ -19,7 +19,7 @@ internal sealed class Tally
     private readonly Plan _plan;
     private readonly OperatorBasis _basis;
     private readonly Dictionary<string, Look> _looks = [];
-    private readonly List<Look> _lookOrder = [];
+    private readonly IReadOnlyList<string> _labels;
     private readonly Dictionary<int, SiteTensor> _targets = [];
     private readonly FigureTally _figures;
     private readonly BellTally _bell;
@@ -32,7 +32,8 @@ internal sealed class Tally
         _plan = plan;
         _basis = basis;
         _figures = new FigureTally(plan.Protocol);
-        _bell = new BellTally(plan.Protocol, basis);
+        _labels = PlanLabels.Of(plan);
+        _bell = new BellTally(plan.Protocol, basis, _labels);
         _failures = new History(plan.Protocol, false);
         _ends = new History(plan.Protocol, false);
     }
@@ -73,9 +74,9 @@ internal sealed class Tally
     public Evaluation Conclude(EngineChoice choice, IReadOnlyList<Value> inputs)
     {
         double kept = Clip(_success + _failure);
-        double heralded = Clip(_lookOrder.FirstOrDefault(l => l.Label == "arrived")?.Weight ?? 0);
+        double heralded = Clip(_looks.GetValueOrDefault("arrived")?.Weight ?? 0);
         double seen = kept + _dropped; // not what was lost subtracted: with a weak detector nearly all is lost
-        CheckpointEvaluation[] checkpoints = [.. _lookOrder.Select(l => l.Conclude())];
+        CheckpointEvaluation[] checkpoints = [.. _labels.Where(_looks.ContainsKey).Select(l => _looks[l].Conclude())];
         Metrics metrics = new(Clip(Ratio(_success, _success + _failure)), Clip(Ratio(_failure, _success + _failure)), Clip(Ratio(_abort, _success + _failure)), kept, checkpoints);
         FigureValues figures = new(_plan.Protocol, metrics, _figures, _bell);
         return new Evaluation
@@ -111,10 +112,7 @@ internal sealed class Tally
     private Look LookOf(CheckpointPlanStep step)
     {
         if (!_looks.TryGetValue(step.Label, out Look? look))
-        {
             _looks[step.Label] = look = new Look(step.Label, step.At.Seconds, new History(_plan.Protocol, true));
-            _lookOrder.Add(look);
-        }
 
         return look;
     }

@@ -56,7 +56,7 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
             case ApplyPlanStep apply:
                 return models.Unitary(apply.Unitary, apply.Model, branch.Slots) is { } map ? branch.Acting(apply.Party, map) : branch;
             case AssignPlanStep assign:
-                return branch.With(assign.Slot, Value(assign.Value, branch));
+                return branch.With(assign.Slot, Idle(assign.Slot, branch) ? Scripts.Binding.Value.None : Value(assign.Value, branch));
             case AbortPlanStep abort:
                 return Holds(abort.Condition, branch) ? branch.WithAborted(abort.Party) : branch;
             case WhenPlanStep block:
@@ -94,6 +94,8 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
                     return branch;
                 tally.Dropped(branch.Weight(models.Basis.Trace));
                 return null;
+            case PickPlanStep pick when Idle(pick.Slot, branch):
+                return branch.With(pick.Slot, Scripts.Binding.Value.None);
             case PickPlanStep pick:
                 foreach (BoundExpression option in pick.Options)
                     Go(cursor, branch.With(pick.Slot, Value(option, branch)).Scaled(1.0 / pick.Options.Count));
@@ -111,7 +113,7 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
 
     private void Measure(MeasurePlanStep step, Cursor cursor, Branch branch)
     {
-        if (Value(step.Basis, branch) is not BasisValue basis)
+        if (Idle(step.Slot, branch) || Value(step.Basis, branch) is not BasisValue basis)
         {
             Go(cursor, branch.Reading(step.Party, models.Basis.Trace).With(step.Slot, Scripts.Binding.Value.None)); // no basis, no measurement, no outcome
             return;
@@ -145,6 +147,9 @@ internal sealed class Walker(Plan plan, LocalModels models, Tally tally, Cancell
         Branch[] outcomes = [.. models.Projections(basis).Select(p => branch.Acting(step.Victim, p))];
         Follow(outcomes, [.. outcomes.Select(o => o.Weight(models.Basis.Trace))], step.Slot, cursor);
     }
+
+    /// <summary>Whether the party that makes a value has given up.</summary>
+    private bool Idle(int slot, Branch branch) => branch.Aborted != 0 && branch.HasAborted(plan.Protocol.Slots[slot].Party);
 
     private Value Value(BoundExpression expression, Branch branch) => ValueEvaluator.Evaluate(expression, branch.Slots, models.Basis.Levels);
 

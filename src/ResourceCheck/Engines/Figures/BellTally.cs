@@ -10,11 +10,13 @@ namespace ResourceCheck.Engines.Figures;
 internal sealed class BellTally
 {
     private readonly OperatorBasis _basis;
+    private readonly IReadOnlyList<string> _labels;
     private readonly double[][] _observables;
     private readonly Dictionary<BellFigure, Dictionary<string, double[]>> _states = new(ReferenceEqualityComparer.Instance as IEqualityComparer<BellFigure>);
 
-    public BellTally(Protocol protocol, OperatorBasis basis)
+    public BellTally(Protocol protocol, OperatorBasis basis, IReadOnlyList<string> labels)
     {
+        _labels = labels;
         _basis = basis;
         _observables = [.. Observables(basis)];
         IEnumerable<Figure> figures = protocol.Reports.Select(r => r.Figure).Concat(protocol.Claims.SelectMany(c => new[] { c.Left, c.Right }));
@@ -38,9 +40,9 @@ internal sealed class BellTally
     /// <summary>The CHSH value at the last checkpoint at which both held their qudits; undefined when there was none.</summary>
     public Estimate Of(BellFigure figure)
     {
-        if (_states[figure].Count == 0)
+        if (_labels.LastOrDefault(_states[figure].ContainsKey) is not { } last)
             return Estimate.Exact(double.NaN);
-        double[] sums = _states[figure].Last().Value;
+        double[] sums = _states[figure][last];
         double weight = sums[^1];
         return weight > 0 ? ChshOptimum.Of([.. sums.Select(s => s / weight)]) : Estimate.Exact(double.NaN);
     }
