@@ -22,7 +22,8 @@ internal static class Limits
         Evaluated? worst = all.Where(e => e.Figure(metric) is not null).MinBy(e => Sign(metric) * e.Figure(metric)!.Value);
         if (worst is null || worst.Setting.IsIdeal || worst.Actual.Engine.Work > MostWork || !double.IsFinite(worst.Figure(metric)!.Value))
             return null;
-        Func<Source, int?, double> without = (source, party) => Without(worst, metric, source, party, request);
+        PreparedState prepared = Prepare(worst.Setting.Plan);
+        Func<Source, int?, double> without = (source, party) => Without(worst, prepared, metric, source, party, request);
         double now = worst.Figure(metric)!.Value;
         (Source source, double best) = Enum.GetValues<Source>().Select(s => (s, without(s, null))).MaxBy(pair => Sign(metric) * pair.Item2);
         return Sign(metric) * (best - now) < Noticeable ? null : Sentence(metric, now, source, best, WorstParty(worst, source, metric, without));
@@ -39,10 +40,12 @@ internal static class Limits
     /// <summary>+1 when more is better.</summary>
     private static int Sign(MetricName metric) => metric.Kind is MetricKind.Failure or MetricKind.Abort or MetricKind.Harm ? -1 : 1;
 
-    private static double Without(Evaluated worst, MetricName metric, Source source, int? party, RunRequest request)
+    private static PreparedState Prepare(Plan plan) => Resource.Prepare(plan.World.Resource, plan.Protocol.Holders.Count).Value!; // was prepared once already
+
+    private static double Without(Evaluated worst, PreparedState prepared, MetricName metric, Source source, int? party, RunRequest request)
     {
         Plan plan = PlanWithout.Of(worst.Setting.Plan, source, party);
-        PreparedState state = Resource.Prepare(plan.World.Resource, plan.Protocol.Holders.Count).Value!; // was prepared once already
+        PreparedState state = source == Source.Preparation ? Prepare(plan) : prepared;
         Evaluation evaluation = Evaluator.Evaluate(worst.Setting, plan, state, worst.Actual.Inputs, worst.Actual.Engine, request);
         double value = (worst with { Actual = evaluation }).Figure(metric)?.Value ?? double.NaN; // a checkpoint may never be reached without the source
         return double.IsNaN(value) ? worst.Figure(metric)!.Value : value;

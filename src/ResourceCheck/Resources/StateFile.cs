@@ -10,22 +10,22 @@ public static class StateFile
     /// <param name="mend">Whether the nearest density matrix replaces one that slightly is none.</param>
     public static Outcome<PreparedState> Read(string path, bool mend)
     {
-        Outcome<CheckedState> check = ReadChecked(path, mend);
+        Outcome<CheckedState> check = ReadChecked(path, mend, figures: false);
         return new(check.Value?.Mended ?? check.Value?.Original, check.Findings);
     }
 
     /// <summary>Describes a state for the <c>state</c> command.</summary>
     public static Outcome<StateDescription> Describe(string path, bool mend)
     {
-        Outcome<CheckedState> check = ReadChecked(path, mend);
+        Outcome<CheckedState> check = ReadChecked(path, mend, figures: true);
         return check.Value is { } state
             ? new(StateDescriber.Describe(path, StateReader.Hash(path), state), check.Findings)
             : Outcome<StateDescription>.Failed(check.Findings);
     }
 
-    private static Outcome<CheckedState> ReadChecked(string path, bool mend)
+    private static Outcome<CheckedState> ReadChecked(string path, bool mend, bool figures)
     {
         Outcome<RawState> read = StateReader.Read(path);
-        return read.Value is { } raw ? StateCheck.Check(path, raw, mend) : Outcome<CheckedState>.Failed(read.Findings);
+        return read.Value is { } raw ? StateCheck.Check(path, raw, mend, figures) : Outcome<CheckedState>.Failed(read.Findings);
     }
 }
