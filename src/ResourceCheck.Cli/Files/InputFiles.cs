@@ -79,7 +79,7 @@ internal sealed class InputFiles(ToolHost host)
             string folder = Path.GetDirectoryName(name) ?? "";
             string searched = folder.Length == 0 ? "." : folder;
             IEnumerable<string> names = Directory.Exists(searched) ? Directory.EnumerateFiles(searched).Select(f => Path.GetFileName(f)!) : [];
-            return Nearest.To(Path.GetFileName(name), names) is { } near ? Path.Combine(folder, near) : null;
+            return NearWords.Find(Path.GetFileName(name), names) is { } near ? Path.Combine(folder, near) : null;
         }
         catch (Exception failure) when (failure is IOException or UnauthorizedAccessException)
         {

@@ -336,6 +336,11 @@ internal static class ConditionsCatalogue
             "`resourcecheck storage` follows what the `storage` section of the conditions describes.",
             "Add a `storage` section."),
         new(
+            "C067",
+            "Faster than light",
+            "A speed above that of light in vacuum. This is a warning: figures are computed all the same, for a world that does not exist.",
+            "Check the value and its unit."),
+        new(
             "C070",
             "Malformed path",
             "The path of `--set` cannot be taken apart.",

@@ -76,7 +76,7 @@ internal static class ConditionsMessages
         string where = path.Length == 0 ? "of a conditions file" : $"of `{path}`";
         return Error("C010", at,
             $"`{name}` is no key {where}: {Phrase.Or(names)} fit there.",
-            NearWord.Of(name, names) is { } near ? $"did you mean {near}?" : "use one of these keys");
+            NearWords.Find(name, names) is { } near ? $"did you mean {near}?" : "use one of these keys");
     }
 
     public static Diagnostic WrongKind(Node node, string path, Shape shape) =>
@@ -299,7 +299,7 @@ internal static class ConditionsMessages
         string known = parties.Count == 0 ? "the protocol has no parties" : $"{Phrase.And(parties)} take{(parties.Count == 1 ? "s" : "")} part";
         return Error("C050", at,
             $"`{section}` speaks of {name}, but there is no such party: {known}.",
-            NearWord.Of(name, parties) is { } near ? $"did you mean {near}?" : "use a name of the script");
+            NearWords.Find(name, parties) is { } near ? $"did you mean {near}?" : "use a name of the script");
     }
 
     public static Diagnostic Outsider(Spot at, string name, string section) =>
@@ -346,6 +346,9 @@ internal static class ConditionsMessages
     public static Diagnostic FamilyName(Spot at, string name, string section, string range) =>
         Error("C060", at, $"`{section}` speaks of {name}, which is a family, not a party.", $"write \"{range}\" for all of it");
 
+    public static Diagnostic FasterThanLight(Spot at, string path, double speed) =>
+        new("C067", Severity.Warning, $"`{path}` is {speed.ToString("0.####e0", System.Globalization.CultureInfo.InvariantCulture)} m/s, faster than light in vacuum, 2.998e8 m/s: nothing travels like this.", "check the value and its unit", at.ToPlace());
+
     // overrides
     public static Diagnostic MalformedPath(Spot at, string path) =>
         Error("C070", at,
@@ -378,7 +381,7 @@ internal static class ConditionsMessages
 
     /// <summary>A slip in upper and lower case is the likeliest.</summary>
     private static string? NearUnit(string unit, List<string> units) =>
-        units.FirstOrDefault(u => u.Equals(unit, StringComparison.OrdinalIgnoreCase)) ?? NearWord.Of(unit, units);
+        units.FirstOrDefault(u => u.Equals(unit, StringComparison.OrdinalIgnoreCase)) ?? NearWords.Find(unit, units);
 
     private static string UnitOf(string example) => example[(example.IndexOf(' ', StringComparison.Ordinal) + 1)..];
 

@@ -25,8 +25,17 @@ internal static class InspectJudgement
             Timeline = Provenance.Schedule(setting),
             Duration = setting.Plan.Duration.Seconds,
             Engine = engine,
+            Fits = choice.Succeeded,
+            Costs = setup.Settings.Count == 1 ? [] : [.. setup.Settings.Select(s => Cost(s, setup.Request))],
             Requirements = [.. setting.Protocol.Requirements.Select(r => new RequirementLine(r.Text, r.Reason, r.Figures, r.Holds))],
             Warnings = [.. setup.Notes, .. choice.Findings.Select(f => f with { Severity = Severity.Warning })],
         });
+    }
+
+    private static SettingCost Cost(Setting setting, RunRequest request)
+    {
+        EngineChoice? choice = Evaluator.Choose(setting, request).Value;
+        EngineChoice engine = choice ?? Engines.Dense.DenseEngine.Estimate(setting.Plan, "");
+        return new SettingCost(setting.Words, setting.Plan.Duration.Seconds, engine, choice is not null);
     }
 }

@@ -39,12 +39,25 @@ public sealed record InspectResult
     /// <summary>Which engine would run, why, and what it would cost.</summary>
     public required EngineChoice Engine { get; init; }
 
+    /// <summary>Whether that engine can take it.</summary>
+    public required bool Fits { get; init; }
+
+    /// <summary>The cost of each of several parameter assignments; empty when there is but one.</summary>
+    public required IReadOnlyList<SettingCost> Costs { get; init; }
+
     /// <summary>Conditions on parameters and whether they hold.</summary>
     public required IReadOnlyList<RequirementLine> Requirements { get; init; }
 
     /// <summary>Warnings and notes.</summary>
     public required IReadOnlyList<Diagnostic> Warnings { get; init; }
 }
+
+/// <summary>What one parameter assignment would cost.</summary>
+/// <param name="Parameters">The assignment in words, such as <c>n = 4</c>.</param>
+/// <param name="Duration">Time of one copy, s.</param>
+/// <param name="Engine">Engine, memory and work.</param>
+/// <param name="Fits">Whether it would run.</param>
+public sealed record SettingCost(string Parameters, double Duration, EngineChoice Engine, bool Fits);
 
 /// <summary>A line of the script and what becomes known by it.</summary>
 /// <param name="Line">Line of the script, from 1.</param>

@@ -1,5 +1,6 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Engines.Dense;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts;
 
@@ -45,11 +46,11 @@ internal static class JudgementMessages
     public static Diagnostic NotUnitary(Place at, string file, double defect) => new(
         "P013", Severity.Error, $"The matrix in {file} is not unitary: U†U differs from 1 by {FigureText.Number(defect)}, more than 1e-9.", "give every entry with all its digits", at);
 
-    public static Diagnostic DoesNotFit(EngineChoice choice, double limit) => new(
+    public static Diagnostic DoesNotFit(EngineChoice choice, double limit, bool asked) => new(
         "E001",
         Severity.Error,
-        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {FigureText.Bytes(limit)} may be used.",
-        "lower the number of parties, or avoid loss that is not heralded (it adds a level)",
+        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {FigureText.Bytes(limit)} may be used{(asked ? " (--memory)" : "")}.",
+        $"{(asked && choice.MemoryBytes < DenseEngine.LargestMemory ? "allow more with --memory if the machine has it, " : "")}lower the number of parties, or herald losses (one that is not adds a level)",
         Place.Of("engine"));
 
     public static Diagnostic UnknownEngine(string name) => new(

@@ -25,7 +25,7 @@ internal static class MetricGathering
     public static YieldResult Yield(IReadOnlyList<Evaluated> all)
     {
         Evaluation worst = all.MinBy(e => e.Actual.Yield)!.Actual;
-        return new YieldResult(Estimate.Exact(worst.Yield), worst.Heralded, worst.Seen, worst.Kept, worst.Seen < 1 - 1e-12);
+        return new YieldResult(Estimate.Exact(worst.Yield), worst.Heralded, worst.Seen, worst.Kept, worst.Seen < 1 - 1e-12) { Range = Range(all.Select(e => e.Actual.Yield)) };
     }
 
     private static MetricResult Worst(string name, IReadOnlyList<Evaluated> all, Func<Evaluation, Estimate> figure, bool greatest)
@@ -44,15 +44,18 @@ internal static class MetricGathering
 
     private static CheckpointResult Checkpoint(string label, IReadOnlyList<Evaluated> all)
     {
-        (Evaluated worst, CheckpointEvaluation look) = all
-            .SelectMany(e => e.Actual.Checkpoints.Where(c => c.Label == label).Select(c => (e, c))).MinBy(pair => pair.c.Fidelity.Value);
-        double ideal = worst.Ideal.Checkpoints.FirstOrDefault(c => c.Label == label)?.Fidelity.Value ?? double.NaN;
+        (Evaluated Of, CheckpointEvaluation Look)[] looks = [.. all.SelectMany(e => e.Actual.Checkpoints.Where(c => c.Label == label).Select(c => (e, c)))];
+        (Evaluated worst, CheckpointEvaluation look) = looks.MinBy(pair => pair.Look.Fidelity.Value);
+        double? ideal = Defined(worst.Ideal.Checkpoints.FirstOrDefault(c => c.Label == label)?.Fidelity.Value ?? double.NaN);
         bool builtIn = worst.Actual.Checkpoints.Take(BuiltIn).Any(c => c.Label == label);
-        return new CheckpointResult(label, look.Fidelity, ideal, ideal - look.Fidelity.Value, look.Kept, look.At, look.Branches, builtIn);
+        return new CheckpointResult(label, look.Fidelity, ideal, ideal - look.Fidelity.Value, look.Kept, look.At, look.Branches, builtIn) { Range = Range(looks.Select(l => l.Look.Fidelity.Value)) };
     }
 
     /// <summary>Under ideal conditions a figure may be undefined although it is not under these.</summary>
     private static double? Defined(double value) => double.IsNaN(value) ? null : value;
+
+    /// <summary>Values closer than this differ by the order of their sums alone.</summary>
+    private const double RoundOff = 1e-12;
 
     /// <summary>prepared, stored, arrived.</summary>
     private const int BuiltIn = 3;
@@ -60,7 +63,7 @@ internal static class MetricGathering
     private static (double Low, double High)? Range(IEnumerable<double> values)
     {
         double[] found = [.. values];
-        return found.Length < 2 ? null : (found.Min(), found.Max());
+        return found.Length < 2 || found.Max() - found.Min() < RoundOff ? null : (found.Min(), found.Max());
     }
 
     private static string? WorstAt(Evaluated worst, IReadOnlyList<Evaluated> all) => all.Count < 2 ? null : worst.At;

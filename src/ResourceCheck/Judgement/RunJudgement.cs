@@ -55,12 +55,15 @@ internal static class RunJudgement
             SecondsPerKeptCopy = SecondsPerKeptCopy(longest, yield),
             Goals = [.. goals.Select(g => g.Result)],
             Verdict = goals.Count == 0 ? Verdict.NoGoals : goals.All(g => g.Result.Met) ? Verdict.Met : Verdict.NotMet,
-            VerdictText = GoalJudgement.Sentence(goals, all),
+            VerdictText = GoalJudgement.Sentence(goals, all) + Outside(setup.Settings),
             Hint = Limits.Hint(goals, all, setup.Request),
             Timeline = Provenance.Schedule(longest),
             Warnings = [.. setup.Notes, .. Notes(all), .. longest.World.Storage is { } storage ? StorageAdvice.Of(storage, storage.Time.Seconds) : []],
         };
     }
+
+    private static string Outside(IReadOnlyList<Setting> settings) =>
+        settings.Any(s => s.Protocol.Requirements.Any(r => !r.Holds)) ? " The script requires parameters that are not met here." : "";
 
     private static IEnumerable<Diagnostic> Notes(IReadOnlyList<Evaluated> all)
     {

@@ -96,13 +96,17 @@ public sealed record MetricResult(string Name, Estimate Estimate, double? Ideal,
 /// <summary>Fidelity at a checkpoint.</summary>
 /// <param name="Name">Its label.</param>
 /// <param name="Fidelity">Fidelity of the copies kept so far; the least over inputs and listed parameter values.</param>
-/// <param name="Ideal">The same under ideal conditions.</param>
-/// <param name="Loss">Ideal minus fidelity.</param>
+/// <param name="Ideal">The same under ideal conditions; null where it is never reached then.</param>
+/// <param name="Loss">Ideal minus fidelity; null where there is no ideal.</param>
 /// <param name="Kept">Fraction of prepared copies kept so far.</param>
 /// <param name="At">Time of the look, s.</param>
 /// <param name="Branches">Fidelity by outcomes.</param>
 /// <param name="BuiltIn">Whether it is <c>prepared</c>, <c>stored</c> or <c>arrived</c>.</param>
-public sealed record CheckpointResult(string Name, Estimate Fidelity, double Ideal, double Loss, double Kept, double At, IReadOnlyList<BranchEvaluation> Branches, bool BuiltIn);
+public sealed record CheckpointResult(string Name, Estimate Fidelity, double? Ideal, double? Loss, double Kept, double At, IReadOnlyList<BranchEvaluation> Branches, bool BuiltIn)
+{
+    /// <summary>Least and greatest fidelity over inputs and listed parameter values; null when there is but one.</summary>
+    public (double Low, double High)? Range { get; init; }
+}
 
 /// <summary>Kept fraction and its factors; all exact for exact engines.</summary>
 /// <param name="Value">Heralded · seen · kept.</param>
@@ -110,7 +114,11 @@ public sealed record CheckpointResult(string Name, Estimate Fidelity, double Ide
 /// <param name="Seen">Of these, every measurement clicked.</param>
 /// <param name="Kept">Of these, kept by the script.</param>
 /// <param name="OnlySeen">Whether figures are "of the copies that all saw": some copies were dropped for a missing click.</param>
-public sealed record YieldResult(Estimate Value, double Heralded, double Seen, double Kept, bool OnlySeen);
+public sealed record YieldResult(Estimate Value, double Heralded, double Seen, double Kept, bool OnlySeen)
+{
+    /// <summary>Least and greatest over inputs and listed parameter values; null when there is but one.</summary>
+    public (double Low, double High)? Range { get; init; }
+}
 
 /// <summary>A goal and whether it is met.</summary>
 /// <param name="Text">The goal as written.</param>

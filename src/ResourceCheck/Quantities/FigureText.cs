@@ -91,7 +91,7 @@ internal static class FigureText
 
     /// <summary>Words for a number that is none.</summary>
     public static string NonFinite(double value) =>
-        double.IsNaN(value) ? "not a number" : value > 0 ? "infinite" : "minus infinite";
+        double.IsNaN(value) ? "undefined" : value > 0 ? "infinite" : "minus infinite";
 
     private static string Fixed(double value, string shortest, Rounding rounding)
     {

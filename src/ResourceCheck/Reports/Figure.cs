@@ -32,7 +32,7 @@ internal sealed record Figure(
 
     private static Figure OfCheckpoint(CheckpointResult checkpoint, RunResult run) => new(
         Honest, checkpoint.Name, checkpoint.Name, "fidelity", FigureText.One, checkpoint.Fidelity, checkpoint.Ideal, checkpoint.Loss,
-        Join(KeptNote(checkpoint.Kept, run.Yield.Value.Value), checkpoint.BuiltIn ? "" : SeenNote(run)), !checkpoint.BuiltIn);
+        Join(checkpoint.Ideal is null ? "never reached under ideal conditions" : "", RangeNote(checkpoint.Range), KeptNote(checkpoint.Kept, run.Yield.Value.Value), checkpoint.BuiltIn ? "" : SeenNote(run)), !checkpoint.BuiltIn);
 
     private static Figure OfMetric(CaseResult of, MetricResult metric, RunResult run) => new(
         of.Case, metric.Name, of.Case == Honest ? metric.Name : $"{metric.Name} \"{of.Case}\"", of.Dishonest.Count == 0 ? "" : $"by {string.Join(", ", of.Dishonest)}",
@@ -49,7 +49,11 @@ internal sealed record Figure(
 
     private static string RangeNote(MetricResult metric) => Join(
         metric.WorstAt is { Length: > 0 } at ? $"worst at {at}" : "",
-        metric.Range is { } range ? $"from {FigureText.Number(range.Low)} to {FigureText.Number(range.High)}" : "");
+        RangeNote(metric.Range));
+
+    // Rounded outwards: a bound, which is rounded to its side, stays inside.
+    private static string RangeNote((double Low, double High)? range) =>
+        range is { } ends ? $"from {FigureText.Number(ends.Low, Rounding.Down)} to {FigureText.Number(ends.High, Rounding.Up)}" : "";
 
     private static string PresentNote(Estimate estimate) => estimate.Present < 1 ? $"present in {FigureText.Number(estimate.Present)} of copies" : "";
 
@@ -57,6 +61,7 @@ internal sealed record Figure(
         kept < 1 && Math.Abs(kept - yield) > 1e-12 ? $"{FigureText.Number(kept)} of copies kept so far" : "";
 
     private static string FactorNote(YieldResult yield) => Join(
+        RangeNote(yield.Range),
         yield.Heralded < 1 ? $"{FigureText.Number(yield.Heralded)} arrive" : "",
         yield.Seen < 1 ? $"{FigureText.Number(yield.Seen)} not dropped for a missing click" : "",
         yield.Kept < 1 ? $"{FigureText.Number(yield.Kept)} are kept by the script" : "");

@@ -15,6 +15,14 @@ internal static class InspectDocument
         json.WriteNumber("levels", inspection.Levels);
         JsonParts.Number(json, "duration", inspection.Duration);
         JsonParts.Engine(json, inspection.Engine);
+        json.WriteBoolean("fits", inspection.Fits);
+        JsonParts.Objects(json, "costs", inspection.Costs, c =>
+        {
+            json.WriteString("parameters", c.Parameters);
+            JsonParts.Number(json, "duration", c.Duration);
+            JsonParts.Engine(json, c.Engine);
+            json.WriteBoolean("fits", c.Fits);
+        });
         JsonParts.Objects(json, "requirements", inspection.Requirements, r =>
         {
             json.WriteString("text", r.Text);

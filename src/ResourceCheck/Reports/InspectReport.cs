@@ -21,6 +21,7 @@ internal static class InspectReport
             .. Some("Who knows what", Knowledge(inspection.Knowledge)),
             .. Some("Messages", Messages(inspection.Timeline)),
             .. Some("Timeline", Schedule(inspection.Timeline.Where(l => l.Kind != TimelineKind.Message))),
+            .. Some("Cost by parameters", Costs(inspection.Costs)),
             Section.Of(Cost(inspection.Engine)),
         ],
         Schedule(inspection.Timeline),
@@ -41,11 +42,17 @@ internal static class InspectReport
     };
 
     private static string Headline(InspectResult inspection) =>
-        $"No mistakes: \"{inspection.Title}\" takes {FigureText.Time(inspection.Duration)} per copy and would run on the {inspection.Engine.Name} engine.";
+        $"No mistakes: \"{inspection.Title}\" takes {FigureText.Time(inspection.Duration)} per copy "
+        + (inspection.Fits ? $"and would run on the {inspection.Engine.Name} engine." : "but would not run: no engine here can take it.");
 
     private static string Cost(EngineChoice engine) =>
         $"Engine {engine.Name}: {engine.Reason.TrimEnd('.')}. It would take {FigureText.Bytes(engine.MemoryBytes)} of memory and "
         + $"about {FigureText.About(engine.Work)} multiplications, some {FigureText.AboutTime(engine.Work / MultiplicationsPerSecond)} on one core.";
+
+    private static Table Costs(IReadOnlyList<SettingCost> costs) => new(
+        [new("parameters", "Parameters"), new("duration", "Time per copy", "s"), new("memory", "Memory", "B"), new("work", "Multiplications"), new("runs", "Would run")],
+        [.. costs.Select(c => (IReadOnlyList<Cell>)
+            [Cell.Of(c.Parameters), Cell.Of(c.Duration, "s"), Cell.Of(c.Engine.MemoryBytes, "B"), Cell.Of(FigureText.About(c.Engine.Work)), Cell.Of(c.Fits ? c.Engine.Name : "no")])]);
 
     private static Section[] Some(string title, Table table) => table.Rows.Count == 0 ? [] : [new Section(title, table, [])];
 

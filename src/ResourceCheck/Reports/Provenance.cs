@@ -1,6 +1,7 @@
 using System.Globalization;
 using ResourceCheck.Engines;
 using ResourceCheck.Judgement;
+using ResourceCheck.Quantities;
 
 namespace ResourceCheck.Reports;
 
@@ -12,9 +13,10 @@ internal static class Provenance
     /// <summary>Of a run.</summary>
     public static IReadOnlyList<string> Of(RunResult run) =>
     [
-        Inputs(run.Version, run.Title, run.Protocol, run.Conditions, ideal: "ideal conditions"),
+        Inputs(run.Version, run.Title, run.Protocol, run.Conditions, ideal: run.Overrides.Count == 0 ? "ideal conditions" : "ideal conditions except what is set"),
         .. run.Overrides.Select(o => $"Set: {o.Key} = {o.Value}"),
         .. Parameters(run.Parameters),
+        .. run.IntegrationError > 0 ? [$"Collective decay is integrated with an estimated error of {FigureText.Number(run.IntegrationError, Rounding.Up)} in probabilities"] : Array.Empty<string>(),
         Engine(run.Engine) + (run.Seed is { } seed ? string.Create(CultureInfo.InvariantCulture, $"; seed {seed}") : ""),
     ];
 

@@ -15,6 +15,7 @@ internal static class RunDocument
         JsonParts.Protocol(json, run.Protocol, run.Title);
         JsonParts.Conditions(json, run.Conditions, run.Overrides);
         JsonParts.Engine(json, run.Engine);
+        JsonParts.Number(json, "integrationError", run.IntegrationError);
         Seed(json, run.Seed);
         JsonParts.Parameters(json, run.Parameters);
         JsonParts.Objects(json, "cases", run.Cases, c => Case(json, c));
@@ -56,20 +57,23 @@ internal static class RunDocument
         json.WriteString("name", metric.Name);
         JsonParts.EstimateFields(json, metric.Estimate);
         JsonParts.Number(json, "ideal", metric.Ideal);
-        if (metric.Range is { } range)
-        {
-            JsonParts.Object(json, "range", () =>
-            {
-                JsonParts.Number(json, "low", range.Low);
-                JsonParts.Number(json, "high", range.High);
-            });
-        }
-        else
+        Range(json, metric.Range);
+        json.WriteString("worstAt", metric.WorstAt);
+    }
+
+    private static void Range(Utf8JsonWriter json, (double Low, double High)? range)
+    {
+        if (range is not { } ends)
         {
             json.WriteNull("range");
+            return;
         }
 
-        json.WriteString("worstAt", metric.WorstAt);
+        JsonParts.Object(json, "range", () =>
+        {
+            JsonParts.Number(json, "low", ends.Low);
+            JsonParts.Number(json, "high", ends.High);
+        });
     }
 
     private static void Checkpoint(Utf8JsonWriter json, CheckpointResult checkpoint)
@@ -77,6 +81,7 @@ internal static class RunDocument
         json.WriteString("name", checkpoint.Name);
         json.WriteBoolean("builtIn", checkpoint.BuiltIn);
         JsonParts.Object(json, "fidelity", () => JsonParts.EstimateFields(json, checkpoint.Fidelity));
+        Range(json, checkpoint.Range);
         JsonParts.Number(json, "ideal", checkpoint.Ideal);
         JsonParts.Number(json, "loss", checkpoint.Loss);
         JsonParts.Number(json, "kept", checkpoint.Kept);
@@ -87,6 +92,7 @@ internal static class RunDocument
     private static void Yield(Utf8JsonWriter json, YieldResult yield)
     {
         JsonParts.EstimateFields(json, yield.Value);
+        Range(json, yield.Range);
         JsonParts.Number(json, "heralded", yield.Heralded);
         JsonParts.Number(json, "seen", yield.Seen);
         JsonParts.Number(json, "kept", yield.Kept);

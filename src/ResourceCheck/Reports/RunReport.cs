@@ -44,7 +44,7 @@ internal static class RunReport
             Cell.Of(f.Title),
             Cell.Of(f.Kind),
             Truth.CellOf(f.Estimate, f.Unit),
-            f.Unit == "s" ? Cell.Empty : Cell.Of(Truth.Describe(f.Estimate)),
+            Cell.Of(Truth.Describe(f.Estimate)),
             Cell.Of(f.Ideal),
             f.Lost is { } lost ? Truth.LessThan(f.Estimate, lost) : Cell.Empty,
             Cell.Of(ShortNote(f.Note, run)),

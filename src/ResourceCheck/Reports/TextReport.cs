@@ -11,6 +11,9 @@ internal static class TextReport
     /// <summary>A longer text pushes the rest of its own row aside instead of widening the column for all.</summary>
     private const int WidestColumn = 48;
 
+    /// <summary>Width of paragraphs.</summary>
+    private const int LineWidth = 100;
+
     private const string Good = "\u001b[1;32m";
     private const string Bad = "\u001b[1;31m";
     private const string Plain = "\u001b[0m";
@@ -18,7 +21,7 @@ internal static class TextReport
     /// <summary>Writes the report; colours mark the verdict only where the caller knows of a terminal.</summary>
     public static void Write(Report report, TextWriter writer, bool colour)
     {
-        string headline = Visible.InLine(report.Headline);
+        string headline = Prose(report.Headline);
         writer.Write((colour, report.Standing) switch
         {
             (true, true) => $"{Good}{headline}{Plain}\n",
@@ -30,7 +33,7 @@ internal static class TextReport
         WriteWarnings(report, writer);
         writer.Write('\n');
         foreach (string line in report.Provenance.Append(Report.Caution))
-            writer.Write($"{Visible.InLine(line)}\n");
+            writer.Write($"{Prose(line)}\n");
     }
 
     private static void WriteSection(Section section, TextWriter writer)
@@ -40,7 +43,7 @@ internal static class TextReport
         if (section.Table is { Rows.Count: > 0 } table)
             WriteTable(table.WithoutEmptyColumns(), writer);
         foreach (string line in section.Lines)
-            writer.Write($"\n{Visible.InLine(line)}\n");
+            writer.Write($"\n{Prose(line)}\n");
     }
 
     private static void WriteTable(Table table, TextWriter writer)
@@ -62,7 +65,23 @@ internal static class TextReport
         if (report.Warnings.Count > 0)
             writer.Write('\n');
         foreach (Diagnostics.Diagnostic warning in report.Warnings)
-            writer.Write($"{warning.Severity}: {Visible.InLine(warning.Message)} ({warning.Code})\n");
+            writer.Write($"{Prose($"{warning.Severity}: {warning.Message} ({warning.Code})")}\n");
+    }
+
+    /// <summary>A paragraph in lines that fit a page; a word longer than a line stays whole.</summary>
+    private static string Prose(string text)
+    {
+        System.Text.StringBuilder wrapped = new();
+        int column = 0;
+        foreach (string word in Visible.InLine(text).Split(' '))
+        {
+            int width = Width(word);
+            bool breaks = column > 0 && column + 1 + width > LineWidth;
+            wrapped.Append(breaks ? "\n" : column > 0 ? " " : "").Append(word);
+            column = breaks || column == 0 ? width : column + 1 + width;
+        }
+
+        return wrapped.ToString();
     }
 
     private static string Show(Cell cell, string lead) => cell switch

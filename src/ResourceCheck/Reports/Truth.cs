@@ -27,6 +27,7 @@ internal static class Truth
     /// <summary>The label as people read it, with a bound's side or an interval.</summary>
     public static string Describe(Estimate estimate) => (estimate.Label, Side(estimate)) switch
     {
+        _ when double.IsNaN(estimate.Value) => "",
         (TruthLabel.Bound, "between") => $"bound, {Interval(estimate)}",
         (TruthLabel.Bound, { } side) => $"bound, {side}",
         (TruthLabel.Sampled, _) => $"sampled, {Interval(estimate)} ({FigureText.Number(100 * estimate.Confidence)} %)",

@@ -39,6 +39,7 @@ internal static class VerifyReport
             (1, > 0, _, _) => $"{of} is refuted{At(verification, ClaimVerdict.Refuted)}.",
             (_, > 0, _, _) => $"{refuted} {of} {(refuted == 1 ? "is" : "are")} refuted{At(verification, ClaimVerdict.Refuted)}.",
             (1, _, > 0, _) => $"{of} could not be verified{At(verification, ClaimVerdict.NotVerified)}.",
+            (int all, _, int undone, _) when undone == all => $"None of the {all} claims could be verified{At(verification, ClaimVerdict.NotVerified)}; none is refuted.",
             (_, _, > 0, _) => $"{open} {of} could not be verified{At(verification, ClaimVerdict.NotVerified)}; none is refuted.",
             (_, _, _, false) => "Nothing was verified: the script's requirements exclude every parameter value asked for.",
             (1, _, _, _) => $"{of} holds{At(verification, ClaimVerdict.Proved)}.",

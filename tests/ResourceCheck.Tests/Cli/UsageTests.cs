@@ -1,5 +1,6 @@
 using System.Text.RegularExpressions;
 using ResourceCheck.Cli.Usage;
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Reports;
 using ResourceCheck.Tests.Reports;
 using Xunit;
@@ -121,7 +122,7 @@ public sealed partial class UsageTests : IDisposable
     [InlineData("verfy", "verify")]
     [InlineData("x", null)]
     [InlineData("budget", null)]
-    public void Only_near_words_are_suggested(string word, string? near) => Assert.Equal(near, Nearest.To(word, ["run", "verify", "inspect"]));
+    public void Only_near_words_are_suggested(string word, string? near) => Assert.Equal(near, NearWords.Find(word, ["run", "verify", "inspect"]));
 
     private string Real(string word) => word switch
     {

@@ -44,7 +44,7 @@ public sealed class ProtocolLibraryTests
         Outcome<RunResult> outcome = Judge.Run(Request(script, conditions: true, parameters: false));
         Assert.True(outcome.Succeeded, Texts(outcome.Findings));
         Assert.NotEqual(Verdict.NoGoals, outcome.Value!.Verdict);
-        Assert.All(outcome.Value.Checkpoints, c => Assert.InRange(c.Loss, -1e-10, 1));
+        Assert.All(outcome.Value.Checkpoints, c => Assert.InRange(c.Loss!.Value, -1e-10, 1));
     }
 
     [Theory]

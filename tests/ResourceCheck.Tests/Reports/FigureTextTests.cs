@@ -25,7 +25,7 @@ public sealed class FigureTextTests
     [InlineData(123456, "123456")]
     [InlineData(1234567.5, "1.235e6")]
     [InlineData(-0.028733, "-0.02873")]
-    [InlineData(double.NaN, "not a number")]
+    [InlineData(double.NaN, "undefined")]
     [InlineData(double.NegativeInfinity, "minus infinite")]
     public void Numbers_show_four_digits_or_those_of_the_loss(double value, string shown) => Assert.Equal(shown, FigureText.Number(value));
 

@@ -137,6 +137,8 @@ internal static class Samples
         Timeline = Timeline,
         Duration = 6.4e-5,
         Engine = Engine,
+        Fits = true,
+        Costs = [new("n = 3", 5e-5, Engine, true), new("n = 4", 6.4e-5, Engine with { MemoryBytes = 9e10 }, false)],
         Requirements = [new("a < 1/3", "a third of the positions hold each value", "0.25 < 0.3333", true)],
         Warnings = [Warning],
     };

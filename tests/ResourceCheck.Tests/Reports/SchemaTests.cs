@@ -56,7 +56,7 @@ public sealed class SchemaTests
     {
         using JsonDocument document = JsonDocument.Parse(GoldenReportTests.Write("run-odd", ReportFormat.Json));
         JsonElement[] metrics = [.. document.RootElement.GetProperty("cases")[0].GetProperty("metrics").EnumerateArray()];
-        Assert.Equal((JsonValueKind.Null, "not a number"), (metrics[0].GetProperty("value").ValueKind, metrics[0].GetProperty("reason").GetString()));
+        Assert.Equal((JsonValueKind.Null, "undefined"), (metrics[0].GetProperty("value").ValueKind, metrics[0].GetProperty("reason").GetString()));
         Assert.Equal("infinite", metrics[1].GetProperty("reason").GetString());
     }
 }

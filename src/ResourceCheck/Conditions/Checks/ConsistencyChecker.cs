@@ -8,6 +8,9 @@ internal sealed class ConsistencyChecker(Findings findings)
     /// <summary>Fractions are typed with a few digits; 0.333333333 three times must pass, 0.33 three times must not.</summary>
     public const double SumTolerance = 1e-8;
 
+    /// <summary>Of light in vacuum, m/s: exact by the definition of the metre (SI).</summary>
+    private const double SpeedOfLight = 299_792_458;
+
     /// <summary>Checks the whole file.</summary>
     public void Check(GroupSetting root)
     {
@@ -49,6 +52,7 @@ internal sealed class ConsistencyChecker(Findings findings)
         {
             case "flight":
                 CheckFlight(group);
+                CheckSpeed(group);
                 break;
             case "levels" or "waiting":
                 CheckBranches(group);
@@ -65,6 +69,7 @@ internal sealed class ConsistencyChecker(Findings findings)
                 break;
             case "messages":
                 CheckDistances(group);
+                CheckSpeed(group);
                 break;
         }
     }
@@ -73,6 +78,12 @@ internal sealed class ConsistencyChecker(Findings findings)
     {
         if (flight.IsWhole && flight.NumberOf("length") is { } length && flight.Find("speed") is null && flight.Find("time") is null)
             findings.Add(ConditionsMessages.LengthWithoutSpeed(length.Spot, length.Path));
+    }
+
+    private void CheckSpeed(GroupSetting group)
+    {
+        if (group.NumberOf("speed") is { } speed && speed.Value > SpeedOfLight)
+            findings.Add(ConditionsMessages.FasterThanLight(speed.Spot, speed.Path, speed.Value));
     }
 
     private void CheckDistances(GroupSetting messages)

@@ -1,5 +1,6 @@
 using ResourceCheck.Conditions.Json;
 using ResourceCheck.Conditions.Keys;
+using ResourceCheck.Diagnostics;
 
 namespace ResourceCheck.Conditions.Checks;
 
@@ -13,5 +14,5 @@ internal static class PartySections
     /// <summary>An object under a name that is no key, nor close to one that holds an object.</summary>
     public static bool LooksLikeParty(GroupShape group, string name, Node value) =>
         value is ObjectNode && group.Find(name) is null
-        && NearWord.Of(name, group.Keys.Where(k => k.Shape.Judges(value)).Select(k => k.Name)) is null;
+        && NearWords.Find(name, group.Keys.Where(k => k.Shape.Judges(value)).Select(k => k.Name)) is null;
 }

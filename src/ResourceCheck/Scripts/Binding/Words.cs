@@ -1,6 +1,6 @@
 using System.Numerics;
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Quantities;
-using ResourceCheck.Scripts.Parsing;
 
 namespace ResourceCheck.Scripts.Binding;
 

@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Syntax;
 

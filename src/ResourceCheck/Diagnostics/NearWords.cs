@@ -1,18 +1,22 @@
-namespace ResourceCheck.Scripts.Parsing;
+namespace ResourceCheck.Diagnostics;
 
 /// <summary>Which known word was probably meant. Distance: insertions, deletions, replacements and swaps of neighbours
 /// (optimal string alignment; Damerau, Commun. ACM 7, 171 (1964)), letter case ignored.</summary>
-internal static class NearWords
+public static class NearWords
 {
-    // No word of the language is longer; the limit keeps the table small for garbage.
-    private const int LongestWord = 24;
+    // Few words that people type are longer; the limit keeps the table small for garbage.
+    private const int LongestWord = 64;
 
     /// <summary>The nearest candidate if it is near enough to be a slip: one change up to four letters, two up to seven, else three.</summary>
+    /// <param name="word">The word as written.</param>
+    /// <param name="candidates">The words that fit; of several as near the first is taken.</param>
+    /// <returns>The candidate, or null when none is near.</returns>
     public static string? Find(string word, IEnumerable<string> candidates)
     {
+        ArgumentNullException.ThrowIfNull(word);
         if (word.Length > LongestWord)
             return null;
-        var best = candidates.Select(c => (Word: c, Distance: Distance(word, c))).MinBy(c => c.Distance);
+        (string? Word, int Distance) best = candidates.Select(c => ((string?)c, Distance(word, c))).DefaultIfEmpty((null, int.MaxValue)).MinBy(c => c.Item2);
         return best.Word is not null && best.Distance <= Allowed(Math.Min(word.Length, best.Word.Length)) ? best.Word : null;
     }
 
@@ -24,7 +28,7 @@ internal static class NearWords
         _ => 3,
     };
 
-    internal static int Distance(string first, string second)
+    private static int Distance(string first, string second)
     {
         string a = first.ToLowerInvariant(), b = second.ToLowerInvariant();
         int[,] d = new int[a.Length + 1, b.Length + 1];
