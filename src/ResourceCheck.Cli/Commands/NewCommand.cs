@@ -22,7 +22,7 @@ internal static class NewCommand
 
     private static void Check(Invocation use, string name, bool force)
     {
-        if (Path.GetFileName(name).Length == 0)
+        if (Path.GetFileName(name).Trim('.').Length == 0)
         {
             use.Findings.Add(Findings.UnfitName(name));
             return;
@@ -43,6 +43,9 @@ internal static class NewCommand
         if (OutputFile.Write([(script, Starter.Script), (conditions, Starter.Conditions)]) is { } finding)
             return use.Session.Terminal.Fail([finding], ExitCodes.WrongInput, "nothing was written");
         return use.Session.Terminal.Write(
-            $"Wrote {script} and {conditions}.\nNext: resourcecheck run {script} --under {conditions}\n", ExitCodes.Done);
+            $"Wrote {script} and {conditions}.\nNext: resourcecheck run {Quoted(script)} --under {Quoted(conditions)}\n", ExitCodes.Done);
     }
+
+    /// <summary>As a command line takes it.</summary>
+    private static string Quoted(string file) => file.Any(char.IsWhiteSpace) ? $"\"{file}\"" : file;
 }

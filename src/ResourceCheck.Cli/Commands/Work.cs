@@ -24,7 +24,9 @@ internal static class Work
         double? memory = use.Memory(o.Memory);
         long seed = use.Whole(o.Seed, long.MinValue, long.MaxValue, otherwise: 1);
         int threads = (int)use.Whole(o.Threads, 0, MostThreads, otherwise: 0);
-        return protocol is null || use.Findings.Count > 0 ? null : new RunRequest
+        if (protocol is null)
+            return null;
+        RunRequest request = new()
         {
             Script = protocol,
             Conditions = conditions,
@@ -35,6 +37,11 @@ internal static class Work
             Seed = seed,
             Threads = threads,
         };
+        if (use.Findings.Count == 0)
+            return request;
+        if (conditions is not null || !Uses(o.Under) || use.Text(o.Under) is null)
+            use.Findings.AddRange(use.Session.Library.Inspect(request with { Engine = null }).Findings.Where(f => f.Severity == Severity.Error)); // all mistakes in one run
+        return null;
 
         bool Uses(Option option) => use.Command.Options.Contains(option);
     }

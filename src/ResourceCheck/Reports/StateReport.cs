@@ -7,15 +7,18 @@ namespace ResourceCheck.Reports;
 /// <summary>The report of <c>state</c>: what a prepared state is, and what mending changed.</summary>
 internal static class StateReport
 {
+    /// <summary>Trace distances below this are the decomposition's round-off.</summary>
+    private const double NotMended = 1e-12;
+
     /// <summary>Builds the report.</summary>
     public static Report From(StateDescription state, string version) => new(
         Headline(state),
         null,
         [
             new Section(null, Figures(state), []),
-            .. state.MendedBy is { } by ? [Section.Of($"Mended to the nearest density matrix, a trace distance of {FigureText.Number(by)} away; nothing is certified from a mended state.")] : Array.Empty<Section>(),
+            .. state.MendedBy is { } by ? [Section.Of(Mending(by))] : Array.Empty<Section>(),
             Section.Of(Validity(state)),
-            .. state.Populations.Count == 0 ? [] : new[] { new Section("Largest populations", Populations(state), []) },
+            .. state.Populations.Count == 0 ? [] : new[] { new Section(state.MendedBy is null ? "Largest populations" : "Largest populations, as read", Populations(state), []) },
         ],
         Data(state),
         [$"ResourceCheck {version}; {Provenance.File(state.File, state.Sha256)}"],
@@ -25,9 +28,14 @@ internal static class StateReport
     {
         string kind = state.IsVector ? "a state vector" : "a density matrix";
         string fidelity = state.Figures.FirstOrDefault(f => f.Name == "fidelity") is { } figure
-            ? $"; its fidelity with the antisymmetric state is {FigureText.Number(figure.Value)} ({Truth.Name(figure.Label)})" : "";
+            ? $"; its fidelity with the antisymmetric state is {FigureText.Number(figure.Mended ?? figure.Value)} ({Truth.Name(figure.Label)})"
+                + (figure.Mended is null ? "" : $" once mended, {FigureText.Number(figure.Value)} as read") : "";
         return $"{state.File} holds {kind} of {state.Parties} qudits with {state.Levels} levels each{fidelity}.";
     }
+
+    private static string Mending(double by) => by < NotMended
+        ? "Nothing needed mending: the nearest density matrix is the one read."
+        : $"Mended to the nearest density matrix, a trace distance of {FigureText.Number(by)} away; nothing is certified from a mended state.";
 
     private static string Validity(StateDescription state) => state.IsVector
         ? $"As read: the norm squared is off 1 by {FigureText.Number(state.Validity.Trace)}."

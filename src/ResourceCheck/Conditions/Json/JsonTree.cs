@@ -5,8 +5,7 @@ using ResourceCheck.Scripts;
 namespace ResourceCheck.Conditions.Json;
 
 /// <summary>
-/// Reads strict JSON (RFC 8259) into a tree with places. The reader of the base library is used because it refuses comments,
-/// trailing commas, single quotes and NaN by itself and tells where every token starts.
+/// Reads strict JSON (RFC 8259) into a tree with places. The reader of the base library is used because it refuses trailing commas, single quotes and NaN by itself and tells where every token starts.
 /// </summary>
 internal sealed class JsonTree
 {
@@ -15,6 +14,9 @@ internal sealed class JsonTree
 
     /// <summary>Deepest nesting taken; the deepest that any key needs is 7.</summary>
     public const int MaxDepth = 32;
+
+    /// <summary>Length of what opens a comment.</summary>
+    private const int CommentMark = 2;
 
     private readonly SourceText _source;
     private readonly bool _isOption;
@@ -47,13 +49,13 @@ internal sealed class JsonTree
 
     private Node? ReadAll()
     {
-        Utf8JsonReader reader = new(_bytes, new JsonReaderOptions { MaxDepth = 2 * MaxDepth });
+        Utf8JsonReader reader = new(_bytes, new JsonReaderOptions { MaxDepth = 2 * MaxDepth, CommentHandling = JsonCommentHandling.Allow });
         try
         {
-            reader.Read();
+            Next(ref reader);
             Node root = ReadValue(ref reader, 0);
             _rootRead = true;
-            reader.Read();
+            Next(ref reader);
             return _tooDeep ? null : root;
         }
         catch (JsonException exception)
@@ -62,6 +64,19 @@ internal sealed class JsonTree
                 _findings.Add(JsonMistake.Explain(_source, _isOption, OffsetOf(exception), _rootRead));
             return null;
         }
+    }
+
+    /// <summary>The next token. Comments are told and passed over, so that mistakes behind them are told as well.</summary>
+    private bool Next(ref Utf8JsonReader reader)
+    {
+        while (reader.Read())
+        {
+            if (reader.TokenType != JsonTokenType.Comment)
+                return true;
+            _findings.Add(ConditionsMessages.Comment(new Spot(_source, new Span(ToChar((int)reader.TokenStartIndex), CommentMark), _isOption)));
+        }
+
+        return false;
     }
 
     private Node ReadValue(ref Utf8JsonReader reader, int depth)
@@ -89,11 +104,11 @@ internal sealed class JsonTree
     private ObjectNode ReadObject(ref Utf8JsonReader reader, Spot start, int depth)
     {
         Dictionary<string, Member> members = new(StringComparer.Ordinal);
-        while (reader.Read() && reader.TokenType != JsonTokenType.EndObject)
+        while (Next(ref reader) && reader.TokenType != JsonTokenType.EndObject)
         {
             Spot nameSpot = SpotOf(ref reader);
             string name = TextOf(ref reader, nameSpot);
-            reader.Read();
+            Next(ref reader);
             Member member = new(name, nameSpot, ReadValue(ref reader, depth + 1));
             if (!members.TryAdd(name, member))
                 _findings.Add(ConditionsMessages.DuplicateKey(nameSpot, name, members[name].NameSpot));
@@ -105,7 +120,7 @@ internal sealed class JsonTree
     private ArrayNode ReadArray(ref Utf8JsonReader reader, Spot start, int depth)
     {
         List<Node> items = [];
-        while (reader.Read() && reader.TokenType != JsonTokenType.EndArray)
+        while (Next(ref reader) && reader.TokenType != JsonTokenType.EndArray)
             items.Add(ReadValue(ref reader, depth + 1));
         return new ArrayNode(Through(start, ref reader), items);
     }

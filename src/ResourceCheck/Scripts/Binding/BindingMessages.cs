@@ -229,8 +229,8 @@ internal static class BindingMessages
     public static Message ClaimForm() =>
         new("S069", "A claim compares two figures with =, >= or <=.", "write it as in claim success = 1");
 
-    public static Message GoalForm() =>
-        new("S069", "A goal is a metric, then >= or <=, then a number.", "write it as in goal success >= 0.9; give a longer figure a report and name its label");
+    public static Message GoalForm(string? near) =>
+        new("S069", "A goal is a metric, then >= or <=, then a number.", near is not null ? $"did you mean {near}?" : "write it as in goal success >= 0.9; give a longer figure a report and name its label");
 
     public static Message NeverReached(string because) =>
         new("S070", $"This line is never reached: {because}.", "take it out, or change the condition");

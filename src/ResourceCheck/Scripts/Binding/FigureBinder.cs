@@ -22,6 +22,14 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
 
     private readonly ExpressionBinder _values = new(context, new RefereeView(context, line.State));
 
+    private static readonly Dictionary<string, MetricKind> Metrics = new()
+    {
+        ["success"] = MetricKind.Success,
+        ["failure"] = MetricKind.Failure,
+        ["abort"] = MetricKind.Abort,
+        ["yield"] = MetricKind.Yield,
+    };
+
     /// <summary>Names of all functions that give figures.</summary>
     public static IEnumerable<string> Names => Shapes.Keys;
 
@@ -37,14 +45,11 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
     };
 
     /// <summary>The metric that an expression names, or null when it names none.</summary>
-    public static MetricKind? MetricOf(Expression expression) => expression is not NameExpression name ? null : name.Text switch
-    {
-        "success" => MetricKind.Success,
-        "failure" => MetricKind.Failure,
-        "abort" => MetricKind.Abort,
-        "yield" => MetricKind.Yield,
-        _ => null,
-    };
+    public static MetricKind? MetricOf(Expression expression) =>
+        expression is NameExpression name && Metrics.TryGetValue(name.Text, out MetricKind kind) ? kind : null;
+
+    /// <summary>Words that name a metric by themselves.</summary>
+    public static IEnumerable<string> MetricWords => Metrics.Keys;
 
     /// <summary>Whether an expression has the form of a metric: a metric's word, a label, or a harm.</summary>
     public static bool NamesMetric(Expression expression) =>

@@ -77,7 +77,7 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
         if (statement.Comparison is not BinaryExpression { Operator: BinaryOperator.LessOrEqual or BinaryOperator.GreaterOrEqual } comparison
             || !FigureBinder.NamesMetric(comparison.Left))
         {
-            context.Findings.Report(statement.Comparison.Span, BindingMessages.GoalForm());
+            context.Findings.Report(statement.Comparison.Span, BindingMessages.GoalForm(NearMetric(statement)));
             return;
         }
 
@@ -87,8 +87,11 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
         if (metric is MetricFigure { Metric: var name } && threshold is NumberFigure { Value: var value })
             _goals.Add(new Goal(Text(comparison.Span), name, comparison.Operator, value, statement.Span));
         else
-            context.Findings.Report(statement.Comparison.Span, BindingMessages.GoalForm());
+            context.Findings.Report(statement.Comparison.Span, BindingMessages.GoalForm(null));
     }
+
+    private static string? NearMetric(GoalStatement statement) =>
+        statement.Comparison is BinaryExpression { Left: NameExpression name } ? Words.Near(name.Text, FigureBinder.MetricWords) : null;
 
     private string Text(Span span) => labels.Write(context.TextOf(span), span);
 
