@@ -18,7 +18,7 @@ internal static class StorageReport
             new Section("Against storage time (all figures exact)", Curves(storage.Points, shown: true), Remarks(storage)),
         ],
         Curves(storage.Points, shown: false),
-        [$"ResourceCheck {storage.Version}; under {Provenance.File(storage.Conditions.Name, storage.Conditions.Sha256)}", $"Estimated error of the integration: {FigureText.Number(storage.ErrorEstimate)}"],
+        [$"ResourceCheck {storage.Version}; under {Provenance.File(storage.Conditions.Name, storage.Conditions.Sha256)}", .. storage.Overrides.Select(o => $"Set: {o.Key} = {o.Value}"), $"Estimated error of the integration: {FigureText.Number(storage.ErrorEstimate)}"],
         storage.Warnings);
 
     private static string Headline(StorageResult storage)

@@ -15,7 +15,7 @@ public sealed class GoldenReportTests
         [ReportFormat.Markdown] = "md",
     };
 
-    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state"];
+    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage"];
 
     public static TheoryData<string, ReportFormat> All()
     {
@@ -85,6 +85,9 @@ public sealed class GoldenReportTests
                 break;
             case "inspection":
                 ReportWriter.Write(Samples.Inspection, format, writer);
+                break;
+            case "storage":
+                ReportWriter.Write(Samples.Storage, format, writer);
                 break;
             case "state":
                 ReportWriter.Write(Samples.State, "0.1.0", format, writer);

@@ -143,6 +143,20 @@ internal static class Samples
         Warnings = [Warning],
     };
 
+    /// <summary>Storage in which dark is not stable.</summary>
+    public static StorageResult Storage { get; } = new()
+    {
+        Version = "0.1.0",
+        Conditions = new("winter.conditions.json", Hash),
+        Overrides = [new("storage.spacing", "0.05 wavelengths")],
+        Emitters = 3,
+        WithoutShifts = true,
+        InitialRates = (2.93e6, 1.479e8, 7.54e7),
+        Points = [new(0, 1, 1, 1, 1, 1), new(1e-9, 0.9911, 0.9099, 0.8902, 0.8338, 0.9415), new(2e-9, 0.98409123, 0.953187, 0.7526, 0.7239, 0.86)],
+        ErrorEstimate = 9.61e-12,
+        Warnings = [Warning],
+    };
+
     /// <summary>A state that was mended.</summary>
     public static StateDescription State { get; } = new()
     {

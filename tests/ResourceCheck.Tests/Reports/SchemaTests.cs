@@ -14,6 +14,7 @@ public sealed class SchemaTests
     [InlineData("verification", "verification")]
     [InlineData("inspection", "inspection")]
     [InlineData("state", "state")]
+    [InlineData("storage", "storage")]
     public async Task Documents_fit_their_published_schema(string name, string schema)
     {
         JsonSchema published = await JsonSchema.FromJsonAsync(Schemas.Find(schema)!, TestContext.Current.CancellationToken);
