@@ -1,3 +1,4 @@
+using ResourceCheck.Engines.Lists;
 using ResourceCheck.Scripts.Binding;
 
 namespace ResourceCheck.Engines;
@@ -31,6 +32,15 @@ public sealed record Evaluation
 
     /// <summary>Probability that a party gave up.</summary>
     public required Estimate Abort { get; init; }
+
+    /// <summary>Probability of harm under the cheating strategy at hand; null in the honest case.</summary>
+    public Estimate? Harm { get; init; }
+
+    /// <summary>Law of one kept copy, for protocols on lists: what the rounds leave in the slots, with its probability. Empty otherwise.</summary>
+    public IReadOnlyList<CopyType> Copies { get; init; } = [];
+
+    /// <summary>How verdicts on lists were found, in a sentence; null for a protocol on single copies.</summary>
+    public string? ListMethod { get; init; }
 
     /// <summary>Checkpoints in order: prepared, stored, arrived, then the script's.</summary>
     public required IReadOnlyList<CheckpointEvaluation> Checkpoints { get; init; }

@@ -6,6 +6,9 @@ namespace ResourceCheck.Judgement;
 /// <summary>One evaluation with the setting it belongs to and the same under ideal conditions.</summary>
 internal sealed record Evaluated(Setting Setting, Evaluation Actual, Evaluation Ideal)
 {
+    /// <summary>What cheating strategies do at this setting, for all inputs.</summary>
+    public IReadOnlyList<CheatEvaluation> Cheats { get; init; } = [];
+
     /// <summary>Parameter and input values in words; empty when there are none.</summary>
     public string At
     {
@@ -27,6 +30,7 @@ internal sealed record Evaluated(Setting Setting, Evaluation Actual, Evaluation 
         MetricKind.Yield => Estimate.Exact(evaluation.Yield),
         MetricKind.Checkpoint => evaluation.Checkpoints.FirstOrDefault(c => c.Label == metric.Label)?.Fidelity,
         MetricKind.Report => Report(evaluation, metric.Label),
+        MetricKind.Harm => Cheats.Where(c => c.Case.Name == metric.Label).MaxBy(c => c.Harm.Value)?.Harm,
         _ => null,
     };
 

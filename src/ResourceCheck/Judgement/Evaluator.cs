@@ -1,6 +1,7 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
 using ResourceCheck.Engines.Dense;
+using ResourceCheck.Engines.Lists;
 using ResourceCheck.Resources;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Timeline;
@@ -40,9 +41,25 @@ internal static class Evaluator
             : Outcome<IReadOnlyList<Evaluation>>.From(evaluations, prepared.Findings);
     }
 
-    /// <summary>Evaluates one plan for one assignment of the private inputs.</summary>
+    /// <summary>Evaluates one plan for one assignment of the private inputs, with the verdicts of its lists.</summary>
     public static Evaluation Evaluate(Setting setting, Plan plan, PreparedState state, IReadOnlyList<Value> inputs, EngineChoice engine, RunRequest request) =>
+        DenseEngine.Evaluate(plan, state, inputs, engine, setting.Matrices, request.Cancellation, plan.Protocol.Lists is null ? null : law => ListVerdicts.Of(
+            new ListTask { Protocol = plan.Protocol, Copies = law, Inputs = inputs }, request));
+
+    /// <summary>Evaluates the rounds alone: of a protocol on lists this is the law of one copy.</summary>
+    public static Evaluation Copies(Setting setting, Plan plan, PreparedState state, IReadOnlyList<Value> inputs, EngineChoice engine, RunRequest request) =>
         DenseEngine.Evaluate(plan, state, inputs, engine, setting.Matrices, request.Cancellation);
+
+    /// <summary>Evaluates all cheating strategies of a setting, for all private inputs.</summary>
+    public static Outcome<IReadOnlyList<CheatEvaluation>> Cheats(Setting setting, IReadOnlyList<Evaluation> honest, RunRequest request)
+    {
+        if (setting.Protocol.Dishonest.Count == 0)
+            return Outcome<IReadOnlyList<CheatEvaluation>>.Of([]);
+        PreparedState state = Resource.Prepare(setting.World.Resource, setting.Protocol.Holders.Count).Value!; // was prepared for the honest case
+        Outcome<CheatEvaluation>[] outcomes = [.. setting.Protocol.Dishonest.SelectMany(cheat =>
+            (cheat.Asks(setting.Protocol.Inputs) ? honest : honest.Take(1)).Select(h => CheatEvaluator.Evaluate(setting, cheat, state, h, request)))];
+        return Outcome<IReadOnlyList<CheatEvaluation>>.From([.. outcomes.Select(o => o.Value).OfType<CheatEvaluation>()], [.. outcomes.SelectMany(o => o.Findings)]);
+    }
 
     private static string Reason(Setting setting, RunRequest request)
     {

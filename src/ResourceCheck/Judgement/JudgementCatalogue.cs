@@ -14,6 +14,7 @@ internal static class JudgementCatalogue
         new("E004", "undefined figure", "A figure divides by zero or is asked for copies that never occur, such as probability(A given B) with B impossible, or a Bell value at a checkpoint where a party holds no qudit.", "Change the condition behind `given`, or give the figure a case in which it is defined."),
         new("E006", "too many emitters", "Without a photon the state of N emitters stays among N! arrangements of levels, which are laid out up to nine emitters.", "Ask for fewer emitters."),
         new("E007", "storage too large", "What is left after a photon is followed with the density operator of all emitters.", "Lower the number of parties, or use `resourcecheck storage`, which follows copies without a photon."),
+        new("E008", "search refused", "The worst choice of a cheat on lists is found by counting, which is too much work here or does not apply.", "Lower M, or fix some of the choices."),
         new("P001", "unknown parameter", "--parameter names something that the script does not declare.", "Use a declared name; `inspect` lists them.", "--parameter m=3"),
         new("P002", "unreadable value", "The value of --parameter is no number, fraction, list, range or `all`.", "Write a number, 1/3, 3,4 or 3..8.", "--parameter n=three"),
         new("P003", "outside the domain", "The script limits the values of this parameter.", "Choose a value inside, or widen the domain in the script.", "--parameter n=40"),
@@ -26,7 +27,8 @@ internal static class JudgementCatalogue
         new("P013", "not unitary", "The columns of a matrix file named by the script are not orthonormal to 1e-9.", "Give every entry with all its digits."),
         new("P020", "no exchange shifts at one point", "At no distance the exchange shifts between emitters have no bound; the shape `point` is the limit in which they are left out.", "Give a shape with a spacing to see what they do."),
         new("P021", "dark is not stable", "The antisymmetric state hardly emits, but exchange shifts that differ from pair to pair turn it into other dark states: the no-photon probability stays high while the fidelity falls.", "Make all pairs equivalent, stand further apart, or store for a shorter time."),
-        new("P030", "not evaluated yet", "Lists of copies and dishonest parties are part of the language and are checked, but no figure is computed for them yet.", "Take them out to evaluate the rest."),
+        new("P030", "figure of a discussion", "A report or claim of a list protocol asks for the probability of something that a discussion made once for all copies.", "Let `success` or the harm of a dishonest case ask for it."),
         new("P031", "interception that knows too much", "An interception happens in flight, when no message has been sent yet, so a conditional block around it can use only the outsider's own values and hold only the outsider's lines.", "Condition it on the outsider's own picks."),
+        new("P032", "choices out of reach", "On single copies every combination of a cheat's choices is tried; here there are none, or too many.", "Narrow the ranges, or make a case for each part."),
     ];
 }

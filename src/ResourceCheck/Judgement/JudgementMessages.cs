@@ -93,12 +93,26 @@ internal static class JudgementMessages
         "let the condition use the outsider's own picks alone, and take other lines out of the block",
         at);
 
-    public static Diagnostic NotEvaluatedYet(Scripts.Binding.Protocol protocol) => new(
+    public static Diagnostic FigureOfDiscussion(Place at) => new(
         "P030",
         Severity.Error,
-        $"This script is read and checked, but this version does not evaluate {(protocol.Lists is not null ? "lists of copies" : "dishonest parties")}: protocols of honest parties on single copies fit here.",
-        protocol.Lists is not null ? "`format` works on it; take out `copies` and the discussions to evaluate its rounds" : "take the dishonest cases out to evaluate the honest one",
-        Place.Of(protocol.Source.Name));
+        "This figure is about what a discussion made, which has no probability per copy: `success`, `failure`, `abort` and figures of the rounds fit here.",
+        "let `success` or the harm of a dishonest case ask for it",
+        at);
+
+    public static Diagnostic ChoicesOutOfReach(string name, double combinations, int most) => new(
+        "P032",
+        Severity.Error,
+        combinations < 1 ? $"The choices of \"{name}\" leave nothing: a range is empty at these parameter values." : $"The choices of \"{name}\" make {FigureText.Number(combinations)} combinations: up to {most} are all tried on single copies.",
+        combinations < 1 ? "widen the range" : "narrow the ranges, or make a case for each part",
+        Place.Of($"dishonest \"{name}\""));
+
+    public static Diagnostic SearchRefused(string name, string reason) => new(
+        "E008",
+        Severity.Error,
+        $"The worst choice of \"{name}\" could not be searched: {reason}",
+        "lower M, or fix some of the choices",
+        Place.Of($"dishonest \"{name}\""));
 
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));

@@ -58,9 +58,9 @@ internal static class MetricGathering
     private const double RoundOff = 1e-12;
 
     /// <summary>prepared, stored, arrived.</summary>
-    private const int BuiltIn = 3;
+    internal const int BuiltIn = 3;
 
-    private static (double Low, double High)? Range(IEnumerable<double> values)
+    internal static (double Low, double High)? Range(IEnumerable<double> values)
     {
         double[] found = [.. values];
         return found.Length < 2 || found.Max() - found.Min() < RoundOff ? null : (found.Min(), found.Max());

@@ -29,7 +29,10 @@ internal static class RunJudgement
             return [];
         Outcome<IReadOnlyList<Evaluation>> ideal = setting.IsIdeal ? actual : Evaluator.Evaluate(setting.Idealised(), request, mayKeepNothing: true);
         findings.AddRange(ideal.Succeeded ? [] : ideal.Findings);
-        return ideal.Value is { } best ? evaluations.Zip(best, (a, i) => new Evaluated(setting, a, i)) : [];
+        Outcome<IReadOnlyList<CheatEvaluation>> cheats = Evaluator.Cheats(setting, evaluations, request);
+        findings.AddRange(cheats.Findings);
+        return ideal.Value is { } best && cheats.Value is { } strategies
+            ? evaluations.Zip(best, (a, i) => new Evaluated(setting, a, i) { Cheats = strategies }) : [];
     }
 
     private static RunResult Conclude(Setup setup, IReadOnlyList<Evaluated> all)
@@ -48,7 +51,10 @@ internal static class RunJudgement
             IntegrationError = all.Max(e => e.Actual.IntegrationError),
             Seed = null,
             Parameters = Provenance.Parameters(setup),
-            Cases = [new CaseResult("honest", [], MetricGathering.Metrics(all))],
+            Cases = [new CaseResult("honest", [], MetricGathering.Metrics(all)), .. CaseGathering.Cases(all)],
+            Attacks = CaseGathering.Attacks(all),
+            ListMethod = all.Select(e => e.Actual.ListMethod).FirstOrDefault(m => m is not null),
+            List = ListOf(longest, yield),
             Checkpoints = MetricGathering.Checkpoints(all),
             Yield = yield,
             Duration = longest.Plan.Duration.Seconds,
@@ -76,6 +82,9 @@ internal static class RunJudgement
             }
         }
     }
+
+    private static (int Copies, double? Seconds)? ListOf(Setting setting, YieldResult yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
+        : (copies, SecondsPerKeptCopy(setting, yield) is { } each ? (copies * each) + setting.Plan.Duration.Seconds : null);
 
     /// <summary>Preparation and use of copies overlap, so the slower of the two sets the pace.</summary>
     private static double? SecondsPerKeptCopy(Setting setting, YieldResult yield)

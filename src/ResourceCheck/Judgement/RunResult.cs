@@ -37,6 +37,15 @@ public sealed record RunResult
     /// <summary>The honest case, then the dishonest ones.</summary>
     public required IReadOnlyList<CaseResult> Cases { get; init; }
 
+    /// <summary>What each cheating strategy does at its worst numbers.</summary>
+    public IReadOnlyList<AttackResult> Attacks { get; init; } = [];
+
+    /// <summary>How verdicts on lists were found, in a sentence; null for a protocol on single copies.</summary>
+    public string? ListMethod { get; init; }
+
+    /// <summary>Copies kept for one use of a list protocol, with the time until they are; null for a protocol on single copies or without a preparation rate.</summary>
+    public (int Copies, double? Seconds)? List { get; init; }
+
     /// <summary>Checkpoints in order.</summary>
     public required IReadOnlyList<CheckpointResult> Checkpoints { get; init; }
 
@@ -92,6 +101,15 @@ public sealed record CaseResult(string Case, IReadOnlyList<string> Dishonest, IR
 /// <param name="Range">Least and greatest over inputs and listed parameter values; null when there is but one.</param>
 /// <param name="WorstAt">Input and parameter values at which the shown value is taken; null when there is but one.</param>
 public sealed record MetricResult(string Name, Estimate Estimate, double? Ideal, (double Low, double High)? Range, string? WorstAt);
+
+/// <summary>A cheating strategy at the numbers that do most harm.</summary>
+/// <param name="Case">Name of the dishonest block.</param>
+/// <param name="At">Parameter and input values; null when there is but one assignment.</param>
+/// <param name="Choices">Numbers chosen by the cheat, by name.</param>
+/// <param name="Value">Harm at these numbers. On lists it is conditional on the cheat's list holding enough positions, and so a bound on what these numbers achieve.</param>
+/// <param name="Average">Average harm of a cheat that picks after it has seen its own list; null where it has no list or no choice, or where it was not evaluated.</param>
+/// <param name="Method">How numbers and harm were found.</param>
+public sealed record AttackResult(string Case, string? At, IReadOnlyList<KeyValuePair<string, string>> Choices, Estimate Value, Estimate? Average, string Method);
 
 /// <summary>Fidelity at a checkpoint.</summary>
 /// <param name="Name">Its label.</param>

@@ -37,7 +37,7 @@ internal static class ScriptMatrices
         return (matrices, findings.InOrder(protocol.Source.Name));
     }
 
-    private static IEnumerable<(string File, Span Span)> Named(Protocol protocol) => protocol.Steps.SelectMany(Of);
+    private static IEnumerable<(string File, Span Span)> Named(Protocol protocol) => protocol.Steps.Concat(protocol.Dishonest.SelectMany(d => d.CopySteps)).SelectMany(Of);
 
     private static IEnumerable<(string File, Span Span)> Of(Step step) => step switch
     {

@@ -49,13 +49,9 @@ internal sealed record Setup(
         findings.AddRange(protocol.Findings);
         if (protocol.Value is not { } checkedProtocol)
             return;
-        if (checkedProtocol.Lists is not null || checkedProtocol.Dishonest.Count > 0)
-        {
-            findings.Add(JudgementMessages.NotEvaluatedYet(checkedProtocol));
-            return;
-        }
-
-        Diagnostic[] misplaced = [.. Planner.MisplacedInterceptions(checkedProtocol).Select(s => JudgementMessages.InterceptTooKnowing(checkedProtocol.Source.PlaceOf(s.Span)))];
+        findings.AddRange(ListFigures.Unanswerable(checkedProtocol));
+        Protocol[] runs = [checkedProtocol, .. checkedProtocol.Dishonest.Select(d => checkedProtocol with { Steps = d.CopySteps })];
+        Diagnostic[] misplaced = [.. runs.SelectMany(Planner.MisplacedInterceptions).Select(s => JudgementMessages.InterceptTooKnowing(checkedProtocol.Source.PlaceOf(s.Span)))];
         findings.AddRange(misplaced);
         if (misplaced.Length > 0)
             return;

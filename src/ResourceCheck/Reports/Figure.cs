@@ -28,6 +28,7 @@ internal sealed record Figure(
         OfYield(run.Yield),
         OfTime("duration", "time per copy", run.Duration),
         .. run.SecondsPerKeptCopy is { } seconds ? [OfTime("seconds per kept copy", "time until the next kept copy", seconds)] : Array.Empty<Figure>(),
+        .. run.List is { Seconds: { } whole } list ? [OfTime("seconds per list", $"time until {list.Copies} copies are kept", whole)] : Array.Empty<Figure>(),
     ];
 
     private static Figure OfCheckpoint(CheckpointResult checkpoint, RunResult run) => new(

@@ -19,9 +19,16 @@ internal static class RunDocument
         Seed(json, run.Seed);
         JsonParts.Parameters(json, run.Parameters);
         JsonParts.Objects(json, "cases", run.Cases, c => Case(json, c));
+        JsonParts.Objects(json, "attacks", run.Attacks, a => Attack(json, a));
+        json.WriteString("listMethod", run.ListMethod);
         JsonParts.Objects(json, "checkpoints", run.Checkpoints, c => Checkpoint(json, c));
         JsonParts.Object(json, "yield", () => Yield(json, run.Yield));
-        JsonParts.Object(json, "copies", () => JsonParts.Number(json, "secondsPerKept", run.SecondsPerKeptCopy));
+        JsonParts.Object(json, "copies", () =>
+        {
+            JsonParts.Number(json, "secondsPerKept", run.SecondsPerKeptCopy);
+            JsonParts.Number(json, "list", run.List?.Copies);
+            JsonParts.Number(json, "secondsPerList", run.List?.Seconds);
+        });
         JsonParts.Number(json, "duration", run.Duration);
         JsonParts.Objects(json, "goals", run.Goals, g => Goal(json, g));
         JsonParts.Objects<object>(json, "claims", [], _ => { });
@@ -50,6 +57,23 @@ internal static class RunDocument
         json.WriteString("case", of.Case);
         JsonParts.Array(json, "dishonest", of.Dishonest, json.WriteStringValue);
         JsonParts.Objects(json, "metrics", of.Metrics, m => Metric(json, m));
+    }
+
+    private static void Attack(Utf8JsonWriter json, AttackResult attack)
+    {
+        json.WriteString("case", attack.Case);
+        json.WriteString("at", attack.At);
+        JsonParts.Objects(json, "choices", attack.Choices, c =>
+        {
+            json.WriteString("name", c.Key);
+            json.WriteString("value", c.Value);
+        });
+        JsonParts.EstimateFields(json, attack.Value);
+        if (attack.Average is { } average)
+            JsonParts.Object(json, "average", () => JsonParts.EstimateFields(json, average));
+        else
+            json.WriteNull("average");
+        json.WriteString("method", attack.Method);
     }
 
     private static void Metric(Utf8JsonWriter json, MetricResult metric)

@@ -21,6 +21,7 @@ internal static class RunReport
             [
                 new Section(null, Short(figures, run), Remarks(run)),
                 .. Goals(run),
+                .. Attacks(run),
                 .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
                 .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
             ],
@@ -93,6 +94,8 @@ internal static class RunReport
         CheckpointResult[] way = [.. run.Checkpoints.Where(c => c.BuiltIn)];
         if (way.Length > 0)
             remarks.Add($"Fidelity on the way: {string.Join(", ", way.Select(OnTheWay))}.");
+        if (run.ListMethod is { } method)
+            remarks.Add($"Verdicts on lists of {run.List!.Value.Copies} copies: {method}.");
         if (run.Yield.OnlySeen)
             remarks.Add($"Figures are {Figure.OnlySeen}: copies in which a measurement did not click are dropped by announcement, from that measurement on.");
         return remarks;
@@ -114,6 +117,35 @@ internal static class RunReport
             ])],
             Headed: false), []),
     ];
+
+    private static Section[] Attacks(RunResult run) => run.Attacks.Count == 0 ? [] :
+    [
+        new Section("Worst of the listed strategies", new Table(
+            [new("case", "Case"), new("at", "At"), new("choices", "Choices"), new("harm", "Harm"), new("label", "Label"), new("average", "On average"), new("averageLabel", "Label")],
+            [.. run.Attacks.Select(a => (IReadOnlyList<Cell>)
+            [
+                Cell.Of(a.Case),
+                Cell.Of(a.At),
+                Cell.Of(string.Join(", ", a.Choices.Select(c => $"{c.Key} = {c.Value}"))),
+                Truth.CellOf(a.Value),
+                Cell.Of(Truth.Describe(a.Value)),
+                a.Average is { } average ? Truth.CellOf(average) : Cell.Empty,
+                Cell.Of(a.Average is { } known ? Truth.Describe(known) : null),
+            ])]), [.. run.Attacks.Select(a => $"{a.Case}: {a.Method}."), .. Assumptions(run)]),
+    ];
+
+    // What the harms say and what they leave open, said wherever they are shown.
+    private static IEnumerable<string> Assumptions(RunResult run)
+    {
+        if (run.List is not null && run.Attacks.Any(a => a.Choices.Count > 0))
+        {
+            yield return "Harm at chosen numbers supposes that the cheat's own list holds enough positions for them, so it bounds what these numbers achieve; "
+                + "the average is of a cheat that looks at its own list first, so the best such cheat does at least that.";
+        }
+
+        yield return "Harms are of the strategies listed in the script, under this model: the source and its calibration are trusted, copies are independent and alike, "
+            + "messages are authenticated, and what anybody announces reaches all alike, a dishonest party's announcements included. Other strategies may do more harm.";
+    }
 
     // A margin is the figure less the threshold for >= and the reverse for <=; which of the two tells a bound's side.
     private static DifferenceCell Margin(GoalResult goal)

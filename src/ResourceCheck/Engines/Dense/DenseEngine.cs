@@ -1,4 +1,5 @@
 using System.Numerics;
+using ResourceCheck.Engines.Lists;
 using ResourceCheck.Numerics;
 using ResourceCheck.Numerics.Collective;
 using ResourceCheck.Resources;
@@ -40,14 +41,16 @@ public static class DenseEngine
     /// <param name="choice">The estimate that was made, for the record.</param>
     /// <param name="matrices">The script's matrix files, by name.</param>
     /// <param name="cancellation">Stops the evaluation.</param>
+    /// <param name="lists">Verdicts of the protocol's lists from the law of one kept copy; null for a protocol on single copies.</param>
     public static Evaluation Evaluate(
-        Plan plan, PreparedState state, IReadOnlyList<Value> inputs, EngineChoice choice, IReadOnlyDictionary<string, Complex[,]> matrices, CancellationToken cancellation)
+        Plan plan, PreparedState state, IReadOnlyList<Value> inputs, EngineChoice choice, IReadOnlyDictionary<string, Complex[,]> matrices, CancellationToken cancellation,
+        Func<IReadOnlyList<CopyType>, ListEvaluation>? lists = null)
     {
         OperatorBasis basis = new(plan.Protocol.Levels, plan.NeedsSink);
         Tally tally = new(plan, basis);
         Walker walker = new(plan, new LocalModels(basis, matrices), tally, cancellation);
         walker.Walk(Start(plan, basis, state, inputs));
-        return tally.Conclude(choice, inputs);
+        return tally.Conclude(choice, inputs, lists);
     }
 
     private static Branch Start(Plan plan, OperatorBasis basis, PreparedState state, IReadOnlyList<Value> inputs)

@@ -1,4 +1,5 @@
 using ResourceCheck.Engines.Figures;
+using ResourceCheck.Engines.Lists;
 using ResourceCheck.Numerics;
 using ResourceCheck.Numerics.States;
 using ResourceCheck.Resources;
@@ -25,7 +26,8 @@ internal sealed class Tally
     private readonly BellTally _bell;
     private readonly History _failures;
     private readonly History _ends;
-    private double _success, _failure, _abort, _dropped, _error;
+    private readonly Dictionary<string, CopyType> _copies = [];
+    private double _success, _failure, _abort, _harm, _dropped, _error;
 
     public Tally(Plan plan, OperatorBasis basis)
     {
@@ -60,24 +62,39 @@ internal sealed class Tally
     public void End(Branch branch, double weight)
     {
         bool aborted = branch.Aborted != 0;
+        if (_plan.Protocol.Lists is { } lists)
+            AddCopy([.. branch.Slots.Take(lists.CopySlots)], weight);
+        if (_plan.Protocol.Harm is { } harm && ValueEvaluator.Holds(harm, branch.Slots, _basis.Levels))
+            _harm += weight;
         bool success = !aborted && ValueEvaluator.Evaluate(_plan.Protocol.Success, branch.Slots, _basis.Levels) is TruthValue { Truth: true };
         _success += success ? weight : 0;
         _failure += success ? 0 : weight;
         _abort += aborted ? weight : 0;
-        if (!success)
+        if (!success && _plan.Protocol.Lists is null)
             _failures.Add(branch.Slots, weight, 0);
         _ends.Add(branch.Slots, weight, 0);
         _figures.Add(branch.Slots, weight, _basis.Levels);
     }
 
+    private void AddCopy(Value[] slots, double weight)
+    {
+        string key = string.Join('|', slots.AsEnumerable());
+        _copies[key] = new CopyType(slots, weight + (_copies.TryGetValue(key, out CopyType? before) ? before.Probability : 0));
+    }
+
     /// <summary>Everything added up; figures are of kept copies.</summary>
-    public Evaluation Conclude(EngineChoice choice, IReadOnlyList<Value> inputs)
+    /// <param name="choice">The engine, for the record.</param>
+    /// <param name="inputs">Values of the private inputs.</param>
+    /// <param name="lists">Verdicts of the protocol's lists from the law of one copy; null for a protocol on single copies.</param>
+    public Evaluation Conclude(EngineChoice choice, IReadOnlyList<Value> inputs, Func<IReadOnlyList<CopyType>, ListEvaluation>? lists)
     {
         double kept = Clip(_success + _failure);
         double heralded = Clip(_looks.GetValueOrDefault("arrived")?.Weight ?? 0);
         double seen = kept + _dropped; // not what was lost subtracted: with a weak detector nearly all is lost
         CheckpointEvaluation[] checkpoints = [.. _labels.Where(_looks.ContainsKey).Select(l => _looks[l].Conclude())];
-        Metrics metrics = new(Clip(Ratio(_success, _success + _failure)), Clip(Ratio(_failure, _success + _failure)), Clip(Ratio(_abort, _success + _failure)), kept, checkpoints);
+        CopyType[] copies = [.. _copies.OrderBy(c => c.Key, StringComparer.Ordinal).Select(c => c.Value with { Probability = c.Value.Probability / kept })];
+        ListEvaluation? verdicts = kept > 0 ? lists?.Invoke(copies) : null;
+        Metrics metrics = new(verdicts?.Success ?? Of(_success), verdicts?.Failure ?? Of(_failure), verdicts?.Abort ?? Of(_abort), kept, checkpoints);
         FigureValues figures = new(_plan.Protocol, metrics, _figures, _bell);
         return new Evaluation
         {
@@ -86,9 +103,12 @@ internal sealed class Tally
             Heralded = heralded,
             Seen = Clip(Ratio(seen, heralded)),
             Kept = Clip(Ratio(kept, seen)),
-            Success = Estimate.Exact(metrics.Success),
-            Failure = Estimate.Exact(metrics.Failure),
-            Abort = Estimate.Exact(metrics.Abort),
+            Success = metrics.Success,
+            Failure = metrics.Failure,
+            Abort = metrics.Abort,
+            Harm = _plan.Protocol.Harm is null ? null : verdicts?.Harm ?? Of(_harm),
+            Copies = copies,
+            ListMethod = verdicts?.Method,
             Checkpoints = checkpoints,
             Reports = figures.Reports(),
             Claims = figures.Claims(),
@@ -97,6 +117,8 @@ internal sealed class Tally
             Failures = [.. _failures.MostProbable(kept, FailuresTold)],
         };
     }
+
+    private Estimate Of(double part) => Estimate.Exact(Clip(Ratio(part, _success + _failure)));
 
     /// <summary>Round-off beyond the ends of a probability is cut off; anything further out stays to be seen.</summary>
     internal static double Clip(double probability) => probability switch

@@ -31,7 +31,7 @@ internal sealed class FigureValues(Protocol protocol, Metrics metrics, FigureTal
         EntropyFigure entropy => Combined([Of(entropy.Operand)], v => BinaryEntropy(v[0]), [null]),
         ArithmeticFigure arithmetic => Arithmetic(arithmetic),
         MetricFigure { Metric.Kind: MetricKind.Report } metric => _reports[metric.Metric.Label],
-        MetricFigure metric => Estimate.Exact(metrics.Of(metric.Metric)),
+        MetricFigure metric => metrics.Of(metric.Metric),
         BellFigure pair => bell.Of(pair),
         _ => sums.Of(figure),
     };
@@ -50,16 +50,23 @@ internal sealed class FigureValues(Protocol protocol, Metrics metrics, FigureTal
 
     /// <summary>
     /// A function of estimates. From exact numbers it is exact; one bound among exact numbers stays a bound when the function rises
-    /// (true) or falls (false) with it; anything else loses its side, and is undefined rather than mislabelled.
+    /// (true) or falls (false) with it, and so does one sampled number, whose interval goes through the function; anything else loses
+    /// its side, and is undefined rather than mislabelled.
     /// </summary>
     private static Estimate Combined(Estimate[] parts, Func<double[], double> function, bool?[] rises)
     {
         double value = function([.. parts.Select(p => p.Value)]);
-        int[] bounds = [.. Enumerable.Range(0, parts.Length).Where(i => parts[i].Label == TruthLabel.Bound)];
+        int[] bounds = [.. Enumerable.Range(0, parts.Length).Where(i => parts[i].Label != TruthLabel.Exact)];
         if (bounds.Length == 0)
             return Estimate.Exact(value);
         if (bounds.Length > 1 || rises[bounds[0]] is not { } up)
             return Estimate.Exact(double.NaN);
+        if (parts[bounds[0]].Label == TruthLabel.Sampled)
+        {
+            double[] ends = [.. new[] { parts[bounds[0]].Low, parts[bounds[0]].High }.Select(end => function([.. parts.Select((p, i) => i == bounds[0] ? end : p.Value)]))];
+            return parts[bounds[0]] with { Value = value, Low = ends.Min(), High = ends.Max() };
+        }
+
         return double.IsFinite(parts[bounds[0]].Low) == up ? Estimate.AtLeast(value) : Estimate.AtMost(value);
     }
 

@@ -10,6 +10,12 @@ namespace ResourceCheck.Engines.Lists;
 /// </summary>
 public sealed class AttackSearch
 {
+    /// <summary>Values less than this part below the best lie on its plateau: teeth of a saw are that high.</summary>
+    private const double Plateau = 0.05;
+
+    /// <summary>Exchanges up to this size need not be even: one number may move more than the other.</summary>
+    private const int Near = 6;
+
     private readonly IReadOnlyList<(int From, int To)> _ranges;
     private readonly SearchOptions _options;
     private readonly SearchMemory _memory;
@@ -57,18 +63,72 @@ public sealed class AttackSearch
         {
             before = _memory.Best().Value;
             Sweep(_memory.Best().Point);
+            foreach (int[] corner in Corners(_memory.Best().Point))
+                Exchange(corner);
             sweeps++;
         }
         while (_memory.Best().Value > before && sweeps < _options.Sweeps);
-        (int[] best, double value) = _memory.Best();
+        (int[] found, double value) = _memory.Best();
         string ending = value > before ? "of which the last still found a larger value" : "of which the last found nothing larger";
-        return new SearchResult(best, value, _memory.Count, false, string.Create(
+        return new SearchResult(found, value, _memory.Count, false, string.Create(
             CultureInfo.InvariantCulture,
-            $"a grid of {points} values for each choice, {starts.Length} climbs, then {sweeps} sweeps of each choice through its range, {ending}; {_memory.Count} choices were evaluated in all"));
+            $"a grid of {points} values for each choice, {starts.Length} climbs, then {sweeps} {(sweeps == 1 ? "round" : "rounds")} of sweeps of each choice through its range and of exchanges between two, {ending}; {_memory.Count} choices were evaluated in all"));
     }
 
     /// <summary>Walks each number up and down from a point while the others climb.</summary>
     private void Sweep(int[] from) => Parallel.For(0, 2 * from.Length, _memory.Parallel, way => Walk(from, way / 2, way % 2 == 0 ? 1 : -1));
+
+    /// <summary>
+    /// Moves two numbers at once, by every size alike and by small ones that differ, and climbs from the best of each kind of move: what one number gives up another may take
+    /// over, far away and with worse points in between.
+    /// </summary>
+    private void Exchange(int[] from)
+    {
+        int[][][] kinds = [.. Enumerable.Range(0, from.Length).SelectMany(i => Enumerable.Range(0, i).SelectMany(k =>
+            new[] { (1, 1), (1, -1), (-1, 1), (-1, -1) }.Select(s => Exchanges(from, (i, s.Item1), (k, s.Item2)).ToArray())))];
+        _memory.EvaluateAll(kinds.SelectMany(k => k));
+        int[][] starts = [.. kinds.Where(k => k.Length > 0).Select(k => k.MaxBy(_memory.Value)!).OrderByDescending(_memory.Value).Take(_options.Exchanges)];
+        Parallel.ForEach(starts, _memory.Parallel, start =>
+        {
+            int[] at = start;
+            while (Improved(at, -1) is { } better)
+                at = better;
+        });
+    }
+
+    /// <summary>A point and the corners of the plateau that it lies on: from there other hills are near that from its middle are not.</summary>
+    private IEnumerable<int[]> Corners(int[] from)
+    {
+        double level = _memory.Value(from) * (1 - Plateau);
+        IEnumerable<int[]> corners = [from];
+        for (int index = 0; index < from.Length; index++)
+        {
+            int along = index;
+            corners = [.. corners.SelectMany(at => new[] { Slid(at, along, -1, level), Slid(at, along, 1, level) })];
+        }
+
+        return corners.Prepend(from).DistinctBy(p => string.Join(',', p)).Take(_options.Corners);
+    }
+
+    private int[] Slid(int[] at, int index, int move, double level)
+    {
+        while (Moved(at, index, move) is { } next && _memory.Value(next) >= level)
+            at = next;
+        return at;
+    }
+
+    private IEnumerable<int[]> Exchanges(int[] from, (int Index, int Sign) first, (int Index, int Sign) second)
+    {
+        int most = Math.Max(_ranges[first.Index].To - _ranges[first.Index].From, _ranges[second.Index].To - _ranges[second.Index].From);
+        int stride = Math.Max(1, most / _options.ExchangeSizes);
+        IEnumerable<(int, int)> sizes = Enumerable.Range(1, most / stride).Select(k => (k * stride, k * stride))
+            .Concat(Enumerable.Range(1, Near).SelectMany(a => Enumerable.Range(1, Near).Select(b => (a, b)))).Distinct();
+        foreach ((int a, int b) in sizes)
+        {
+            if (Moved(from, first.Index, a * first.Sign) is { } moved && Moved(moved, second.Index, b * second.Sign) is { } both)
+                yield return both;
+        }
+    }
 
     private void Walk(int[] from, int index, int direction)
     {

@@ -46,18 +46,8 @@ internal sealed class ChoiceRange
     private Rational? Bound(BoundExpression expression, IReadOnlyList<Value> choices)
     {
         bool known = Reads.Parts(expression).All(p => p is not (BoundSlot or BoundSize or BoundTally or BoundWhere or BoundSome) && (p is not BoundChoice choice || choice.Choice < choices.Count));
-        return known && ValueEvaluator.Evaluate(Put(expression, choices), [], _levels) is NumberValue number ? number.Number : null;
+        return known && ValueEvaluator.Evaluate(BoundWalk.Put(expression, choices), [], _levels) is NumberValue number ? number.Number : null;
     }
-
-    private static BoundExpression Put(BoundExpression expression, IReadOnlyList<Value> choices) => expression switch
-    {
-        BoundChoice choice => new BoundLiteral(choice.Span, choices[choice.Choice]),
-        BoundUnary unary => unary with { Operand = Put(unary.Operand, choices) },
-        BoundBinary binary => binary with { Left = Put(binary.Left, choices), Right = Put(binary.Right, choices) },
-        BoundIf choice => new BoundIf(choice.Span, Put(choice.Condition, choices), Put(choice.Then, choices), Put(choice.Else, choices)),
-        BoundCall call => call with { Arguments = [.. call.Arguments.Select(a => Put(a, choices))] },
-        _ => expression,
-    };
 
     private static int Clamped(BigInteger number) => (int)BigInteger.Min(BigInteger.Max(number, -CountTable.LargestCount), CountTable.LargestCount);
 }

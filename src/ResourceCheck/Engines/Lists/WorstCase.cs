@@ -6,7 +6,7 @@ namespace ResourceCheck.Engines.Lists;
 public static class WorstCase
 {
     /// <summary>Paths left out while points are compared; the value shown is found with the task's own limit.</summary>
-    private const double NegligibleInSearch = 1e-20;
+    private const double NegligibleInSearch = 1e-9;
 
     /// <summary>
     /// Searches the choices for the largest harm. With <see cref="ListTask.HoldsEnough"/> each harm is conditional on holding enough

@@ -23,19 +23,25 @@ internal static class BoundWalk
     };
 
     /// <summary>The expression with other slots.</summary>
-    public static BoundExpression Map(BoundExpression expression, Func<int, int> slots) => expression switch
+    public static BoundExpression Map(BoundExpression expression, Func<int, int> slots) =>
+        Leaves(expression, e => e is BoundSlot slot ? slot with { Slot = slots(slot.Slot) } : e);
+
+    /// <summary>The expression with numbers in place of the cheat's choices.</summary>
+    public static BoundExpression Put(BoundExpression expression, IReadOnlyList<Value> choices) =>
+        Leaves(expression, e => e is BoundChoice choice ? new BoundLiteral(choice.Span, choices[choice.Choice]) : e);
+
+    private static BoundExpression Leaves(BoundExpression expression, Func<BoundExpression, BoundExpression> change) => expression switch
     {
-        BoundSlot e => e with { Slot = slots(e.Slot) },
-        BoundUnary e => e with { Operand = Map(e.Operand, slots) },
-        BoundBinary e => e with { Left = Map(e.Left, slots), Right = Map(e.Right, slots) },
-        BoundIf e => e with { Condition = Map(e.Condition, slots), Then = Map(e.Then, slots), Else = Map(e.Else, slots) },
-        BoundCall e => e with { Arguments = [.. e.Arguments.Select(a => Map(a, slots))] },
-        BoundBasis { Argument: { } argument } e => e with { Argument = Map(argument, slots) },
-        BoundWhere e => e with { Predicate = Map(e.Predicate, slots) },
-        BoundSome e => e with { Count = Map(e.Count, slots), Set = Map(e.Set, slots) },
-        BoundSize e => e with { Set = Map(e.Set, slots) },
-        BoundTally e => e with { Predicate = Map(e.Predicate, slots), Set = Map(e.Set, slots) },
-        _ => expression,
+        BoundUnary e => e with { Operand = Leaves(e.Operand, change) },
+        BoundBinary e => e with { Left = Leaves(e.Left, change), Right = Leaves(e.Right, change) },
+        BoundIf e => e with { Condition = Leaves(e.Condition, change), Then = Leaves(e.Then, change), Else = Leaves(e.Else, change) },
+        BoundCall e => e with { Arguments = [.. e.Arguments.Select(a => Leaves(a, change))] },
+        BoundBasis { Argument: { } argument } e => e with { Argument = Leaves(argument, change) },
+        BoundWhere e => e with { Predicate = Leaves(e.Predicate, change) },
+        BoundSome e => e with { Count = Leaves(e.Count, change), Set = Leaves(e.Set, change) },
+        BoundSize e => e with { Set = Leaves(e.Set, change) },
+        BoundTally e => e with { Predicate = Leaves(e.Predicate, change), Set = Leaves(e.Set, change) },
+        _ => change(expression),
     };
 
     /// <summary>Whether two expressions are the same apart from their places.</summary>

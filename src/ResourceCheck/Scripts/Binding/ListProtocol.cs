@@ -29,6 +29,21 @@ public sealed record DishonestCase(
 {
     /// <summary>Whether the cheat's own hardware is declared perfect: its figures are then those without noise at the cheat.</summary>
     public bool PerfectHardware { get; init; }
+
+    /// <summary>Whether anything that decides about the harm looks at a private input.</summary>
+    public bool Asks(IReadOnlyList<InputValues> inputs)
+    {
+        HashSet<int> slots = [.. inputs.Select(i => i.Slot)];
+        return CopySteps.Concat(ListSteps ?? []).SelectMany(StepWalk.Expressions).Append(Harm).Concat(Choices.SelectMany(c => new[] { c.From, c.To }))
+            .SelectMany(BoundWalk.Slots).Any(slots.Contains);
+    }
+
+    /// <summary>The protocol as it runs on one copy when the strategy is followed with the numbers given.</summary>
+    public Protocol In(Protocol honest, IReadOnlyList<Value> choices)
+    {
+        ArgumentNullException.ThrowIfNull(honest);
+        return honest with { Steps = [.. CopySteps.Select(s => StepWalk.Put(s, choices))], Harm = BoundWalk.Put(Harm, choices) };
+    }
 }
 
 /// <summary>A number left to the cheat; its range may depend on what the cheat holds when it is used.</summary>

@@ -60,6 +60,9 @@ public sealed record Protocol
     /// <summary>Cheating strategies, in the order written.</summary>
     public IReadOnlyList<DishonestCase> Dishonest { get; init; } = [];
 
+    /// <summary>When the cheat at hand does harm; null in the honest case. See <see cref="DishonestCase.In"/>.</summary>
+    public BoundExpression? Harm { get; init; }
+
     /// <summary>Whether the script mentions <c>none</c>, and so handles measurements without a click itself.</summary>
     public required bool HandlesNone { get; init; }
 }

@@ -1,0 +1,102 @@
+using System.Globalization;
+using ResourceCheck.Conditions;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Engines.Lists;
+using ResourceCheck.Resources;
+using ResourceCheck.Scripts.Binding;
+using ResourceCheck.Timeline;
+
+namespace ResourceCheck.Judgement;
+
+/// <summary>Evaluates cheating strategies: on single copies all choices, on lists the worst choices that a search finds.</summary>
+internal static class CheatEvaluator
+{
+    /// <summary>Combinations of a cheat's numbers on single copies that are all tried; each is an evaluation of its own.</summary>
+    private const int MostCombinations = 1000;
+
+    /// <summary>Lists left out of an average, all together; they count as harmless, so that the average stays a lower bound.</summary>
+    private const double NeglectedLists = 1e-4;
+
+    /// <summary>Paths left out of an average, each; they too count as harmless.</summary>
+    private const double NeglectedPaths = 1e-9;
+
+    /// <summary>Beyond this many copies the average over the cheat's own list takes minutes.</summary>
+    private const int MostAveraged = 400;
+
+    /// <summary>One strategy at one assignment of the private inputs.</summary>
+    /// <param name="setting">Protocol and world.</param>
+    /// <param name="cheat">The strategy.</param>
+    /// <param name="state">The prepared state.</param>
+    /// <param name="honest">The honest case at the same inputs.</param>
+    /// <param name="request">What was asked for.</param>
+    public static Outcome<CheatEvaluation> Evaluate(Setting setting, DishonestCase cheat, PreparedState state, Evaluation honest, RunRequest request)
+    {
+        Cheating cheating = new(setting, cheat, state, honest.Inputs, honest.Engine, cheat.Asks(setting.Protocol.Inputs) ? new Evaluated(setting, honest, honest).At : setting.Words, request);
+        return setting.Protocol.Lists is null ? OnCopies(cheating) : OnLists(cheating);
+    }
+
+    /// <summary>One strategy with all that its evaluation needs.</summary>
+    private sealed record Cheating(Setting Setting, DishonestCase Case, PreparedState State, IReadOnlyList<Value> Inputs, EngineChoice Engine, string At, RunRequest Request)
+    {
+        public Evaluation Copies(IReadOnlyList<Value> choices)
+        {
+            Plan plan = Planner.Lay(Case.In(Setting.Protocol, choices), Case.PerfectHardware ? PerfectHardware.Of(Setting.World, Case.By) : Setting.World);
+            return Evaluator.Copies(Setting, plan, State, Inputs, Engine, Request);
+        }
+
+        public KeyValuePair<string, string>[] Named(IReadOnlyList<Value> choices) => [.. Case.Choices.Zip(choices, (c, v) => KeyValuePair.Create(c.Name, Scripts.Binding.Words.Write(v)))];
+    }
+
+    private static Outcome<CheatEvaluation> OnCopies(Cheating cheating)
+    {
+        ChoiceRange[] ranges = [.. cheating.Case.Choices.Select(c => new ChoiceRange(c, 0, cheating.Setting.Protocol.Levels))];
+        double combinations = ranges.Aggregate(1.0, (product, r) => product * Math.Max(0, (double)r.Last - r.First + 1));
+        if (combinations is < 1 or > MostCombinations)
+            return Outcome<CheatEvaluation>.Failed([JudgementMessages.ChoicesOutOfReach(cheating.Case.Name, combinations, MostCombinations)]);
+        (Value[] choices, Evaluation worst) = Combinations(ranges).Select(c => (c, cheating.Copies(c)))
+            .Where(pair => pair.Item2.Yield > 0).DefaultIfEmpty(([], null!)).MaxBy(pair => pair.Item2?.Harm?.Value);
+        if (worst is null)
+            return Outcome<CheatEvaluation>.Failed([JudgementMessages.NothingKept($"case \"{cheating.Case.Name}\"")]);
+        bool proved = cheating.Case.Choices.All(c => c.Whole);
+        Estimate harm = proved ? worst.Harm! : Estimate.AtLeast(worst.Harm!.Value);
+        string method = ranges.Length == 0 ? "followed exactly" : string.Create(CultureInfo.InvariantCulture, $"{(proved ? "all" : "a grid of")} {combinations} choices tried, each followed exactly");
+        return Outcome<CheatEvaluation>.Of(new CheatEvaluation(cheating.Case, cheating.At, harm, null, worst, cheating.Named(choices), method));
+    }
+
+    private static IEnumerable<Value[]> Combinations(ChoiceRange[] ranges)
+    {
+        IEnumerable<Value[]> all = [[]];
+        foreach (ChoiceRange range in ranges)
+            all = all.SelectMany(before => Enumerable.Range(range.First, range.Last - range.First + 1).Select(i => range.At(i)).Where(v => range.Allows(v, before)).Select(v => (Value[])[.. before, v]));
+        return all;
+    }
+
+    private static Outcome<CheatEvaluation> OnLists(Cheating cheating)
+    {
+        Evaluation copies = cheating.Copies([]);
+        if (!(copies.Yield > 0))
+            return Outcome<CheatEvaluation>.Failed([JudgementMessages.NothingKept($"case \"{cheating.Case.Name}\"")]);
+        ListTask task = new() { Protocol = cheating.Setting.Protocol, Copies = copies.Copies, Inputs = cheating.Inputs, Case = cheating.Case };
+        if (cheating.Case.Choices.Count == 0)
+        {
+            ListEvaluation verdict = ListVerdicts.Of(task, cheating.Request);
+            return Outcome<CheatEvaluation>.Of(new CheatEvaluation(cheating.Case, cheating.At, verdict.Harm, null, null, [], verdict.Method));
+        }
+
+        AttackOutcome worst = WorstCase.Find(task with { HoldsEnough = true }, new SearchOptions(), null, cheating.Request.Cancellation);
+        if (worst is not { Choices: { } choices, Evaluation: { } evaluation, Search: { } search })
+            return Outcome<CheatEvaluation>.Failed([JudgementMessages.SearchRefused(cheating.Case.Name, worst.Refusal!)]);
+        return Outcome<CheatEvaluation>.Of(new CheatEvaluation(
+            cheating.Case, cheating.At, Estimate.AtMost(evaluation.Harm.Value), Average(task, choices, cheating.Request), null, cheating.Named(choices), search.Check));
+    }
+
+    /// <summary>The worst numbers and milder ones: a cheat whose list does not hold enough for the worst takes a milder one.</summary>
+    private static Estimate? Average(ListTask task, IReadOnlyList<Value> worst, RunRequest request)
+    {
+        if (task.Lists.Copies > MostAveraged)
+            return null;
+        Value[][] listed = [[.. worst]];
+        return AdaptiveCheat.Average(task with { Limits = task.Limits with { Negligible = NeglectedPaths } }, listed, NeglectedLists, request.Cancellation).Harm;
+    }
+}
