@@ -29,7 +29,8 @@ internal static class CaseGathering
             yield return new MetricResult("harm on average", average, null, null, several ? cheat.At : null);
         if (cheat.Copies is not { } copies)
             yield break;
-        yield return new MetricResult("success", copies.Success, null, null, null);
+        if (cheat.Case.Success is not null)
+            yield return new MetricResult("success", copies.Success, null, null, null);
         yield return new MetricResult("copies kept", Estimate.Exact(copies.Yield), null, null, null);
         foreach (CheckpointEvaluation look in copies.Checkpoints.Skip(MetricGathering.BuiltIn))
             yield return new MetricResult($"fidelity {look.Label}", look.Fidelity, null, null, null);

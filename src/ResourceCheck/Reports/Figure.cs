@@ -20,6 +20,9 @@ internal sealed record Figure(
 {
     private const string Honest = "honest";
 
+    /// <summary>A fraction this near to 1 is 1.</summary>
+    private const double RoundOff = 1e-12;
+
     /// <summary>All figures of a run: fidelities on the way, metrics of each case, kept copies, times.</summary>
     public static IReadOnlyList<Figure> AllOf(RunResult run) =>
     [
@@ -33,11 +36,12 @@ internal sealed record Figure(
 
     private static Figure OfCheckpoint(CheckpointResult checkpoint, RunResult run) => new(
         Honest, checkpoint.Name, checkpoint.Name, "fidelity", FigureText.One, checkpoint.Fidelity, checkpoint.Ideal, checkpoint.Loss,
-        Join(checkpoint.Ideal is null ? "never reached under ideal conditions" : "", RangeNote(checkpoint.Range), KeptNote(checkpoint.Kept, run.Yield.Value.Value), checkpoint.BuiltIn ? "" : SeenNote(run)), !checkpoint.BuiltIn);
+        Join(checkpoint.Ideal is null ? "never reached under ideal conditions" : "", RangeNote(checkpoint.Range, checkpoint.Fidelity.Label), KeptNote(checkpoint.Kept, run.Yield.Value.Value), checkpoint.BuiltIn ? "" : SeenNote(run)), !checkpoint.BuiltIn);
 
     private static Figure OfMetric(CaseResult of, MetricResult metric, RunResult run) => new(
         of.Case, metric.Name, of.Case == Honest ? metric.Name : $"{metric.Name} \"{of.Case}\"", of.Dishonest.Count == 0 ? "" : $"by {string.Join(", ", of.Dishonest)}",
-        FigureText.One, metric.Estimate, metric.Ideal, null, Join(RangeNote(metric), PresentNote(metric.Estimate), SeenNote(run)), !IsIdleAbort(metric));
+        FigureText.One, metric.Estimate, metric.Ideal, null, Join(RangeNote(metric), PresentNote(metric.Estimate), SeenNote(run)),
+        !IsIdleAbort(metric) && (of.Case == Honest || metric.Name.StartsWith("harm", StringComparison.Ordinal)));
 
     private static Figure OfYield(YieldResult yield) =>
         new(Honest, "yield", "copies kept", "", FigureText.One, yield.Value, null, null, FactorNote(yield), true);
@@ -50,11 +54,14 @@ internal sealed record Figure(
 
     private static string RangeNote(MetricResult metric) => Join(
         metric.WorstAt is { Length: > 0 } at ? $"worst at {at}" : "",
-        RangeNote(metric.Range));
+        RangeNote(metric.Range, metric.Estimate.Label));
 
-    // Rounded outwards: a bound, which is rounded to its side, stays inside.
-    private static string RangeNote((double Low, double High)? range) =>
-        range is { } ends ? $"from {FigureText.Number(ends.Low, Rounding.Down)} to {FigureText.Number(ends.High, Rounding.Up)}" : "";
+    // Bounds are rounded to their side, so the ends of a range of them are rounded outwards: none lies outside.
+    private static string RangeNote((double Low, double High)? range, TruthLabel label)
+    {
+        (Rounding low, Rounding high) = label == TruthLabel.Bound ? (Rounding.Down, Rounding.Up) : (Rounding.Nearest, Rounding.Nearest);
+        return range is { } ends ? $"from {FigureText.Number(ends.Low, low)} to {FigureText.Number(ends.High, high)}" : "";
+    }
 
     private static string PresentNote(Estimate estimate) => estimate.Present < 1 ? $"present in {FigureText.Number(estimate.Present)} of copies" : "";
 
@@ -62,10 +69,10 @@ internal sealed record Figure(
         kept < 1 && Math.Abs(kept - yield) > 1e-12 ? $"{FigureText.Number(kept)} of copies kept so far" : "";
 
     private static string FactorNote(YieldResult yield) => Join(
-        RangeNote(yield.Range),
-        yield.Heralded < 1 ? $"{FigureText.Number(yield.Heralded)} arrive" : "",
-        yield.Seen < 1 ? $"{FigureText.Number(yield.Seen)} not dropped for a missing click" : "",
-        yield.Kept < 1 ? $"{FigureText.Number(yield.Kept)} are kept by the script" : "");
+        RangeNote(yield.Range, yield.Value.Label),
+        yield.Heralded < 1 - RoundOff ? $"{FigureText.Number(yield.Heralded)} arrive" : "",
+        yield.Seen < 1 - RoundOff ? $"{FigureText.Number(yield.Seen)} not dropped for a missing click" : "",
+        yield.Kept < 1 - RoundOff ? $"{FigureText.Number(yield.Kept)} are kept by the script" : "");
 
     private static string SeenNote(RunResult run) => run.Yield.OnlySeen ? OnlySeen : "";
 

@@ -131,8 +131,16 @@ internal static class RunReport
                 Cell.Of(Truth.Describe(a.Value)),
                 a.Average is { } average ? Truth.CellOf(average) : Cell.Empty,
                 Cell.Of(a.Average is { } known ? Truth.Describe(known) : null),
-            ])]), [.. run.Attacks.Select(a => $"{a.Case}: {a.Method}."), .. Assumptions(run)]),
+            ])]), [.. run.Attacks.Select(a => $"{a.Case}: {a.Method}{Noticed(run, a)}."), .. Assumptions(run)]),
     ];
+
+    /// <summary>What others see of a cheat on single copies.</summary>
+    private static string Noticed(RunResult run, AttackResult attack)
+    {
+        string[] seen = [.. run.Cases.Single(c => c.Case == attack.Case).Metrics.Where(m => !m.Name.StartsWith("harm", StringComparison.Ordinal))
+            .Select(m => $"{m.Name} {Quantities.FigureText.Number(m.Estimate.Value)}")];
+        return seen.Length == 0 ? "" : $"; with it {string.Join(", ", seen)} (exact)";
+    }
 
     // What the harms say and what they leave open, said wherever they are shown.
     private static IEnumerable<string> Assumptions(RunResult run)

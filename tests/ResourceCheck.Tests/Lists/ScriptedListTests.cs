@@ -1,5 +1,4 @@
 using System.Globalization;
-using System.Runtime.CompilerServices;
 using ResourceCheck.Engines.Lists;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Tests.Reference;
@@ -45,7 +44,7 @@ public sealed class ScriptedListTests
 
     private static ListTask Task(string name, int copies, double p)
     {
-        Protocol protocol = TestScripts.Bind(File.ReadAllText(Path.Combine(Folder(), name + ".protocol")), ("M", copies));
+        Protocol protocol = TestScripts.Bind(ProtocolLibrary.ProtocolLibraryTests.Text(name + ".protocol"), ("M", copies));
         return new ListTask
         {
             Protocol = protocol,
@@ -53,6 +52,4 @@ public sealed class ScriptedListTests
             Inputs = [Value.Of(0)],
         };
     }
-
-    private static string Folder([CallerFilePath] string file = "") => Path.Combine(Path.GetDirectoryName(file)!, "..", "Binding", "Lists");
 }

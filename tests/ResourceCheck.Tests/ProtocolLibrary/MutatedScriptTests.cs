@@ -15,7 +15,7 @@ public sealed class MutatedScriptTests
     [InlineData("removal.protocol", "Dov announces k", "Dov announces (if k = 0 then 1 else if k = 1 then 0 else k) as said", "swapped outcome", "\"after removal\" = 1")]
     public void Mutated_script_is_refuted_with_outcomes_that_break_it(string script, string original, string mutated, string mutation, string claim)
     {
-        string text = ProtocolLibraryTests.Text(script);
+        string text = ProtocolLibraryTests.Text(script).Split("\ndishonest")[0]; // cheats need the lines that are mutated
         Assert.Contains(original, text, StringComparison.Ordinal);
         string changed = text.Replace(original, mutated, StringComparison.Ordinal);
         if (mutation == "swapped outcome")

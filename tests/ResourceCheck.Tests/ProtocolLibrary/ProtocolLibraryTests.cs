@@ -33,7 +33,8 @@ public sealed class ProtocolLibraryTests
             return;
         }
 
-        Assert.Equal(1, outcome.Value!.Cases[0].Metrics[0].Estimate.Value, 1e-10);
+        // Thresholds on counts of finitely many copies are missed now and then.
+        Assert.Equal(1, outcome.Value!.Cases[0].Metrics[0].Estimate.Value, outcome.Value.List is null ? 1e-10 : 0.03);
         Assert.All(outcome.Value.Checkpoints, c => Assert.Equal(1, c.Fidelity.Value, 1e-10));
     }
 

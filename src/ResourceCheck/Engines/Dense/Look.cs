@@ -6,6 +6,8 @@ internal sealed class Look(string label, double at, History history)
     /// <summary>Histories kept per checkpoint in results; the rest adds up to little and would only fill the document.</summary>
     private const int BranchesTold = 256;
 
+    private const double Nothing = 1e-14;
+
     private double _overlap;
 
     public string Label { get; } = label;
@@ -20,6 +22,9 @@ internal sealed class Look(string label, double at, History history)
         history.Add(branch.Slots, weight, overlap);
     }
 
+    /// <summary>An overlap of nothing is the round-off of a sum of terms of order one.</summary>
+    private static double Whole(double fidelity) => Math.Abs(fidelity) < Nothing ? 0 : fidelity;
+
     public CheckpointEvaluation Conclude() =>
-        new(Label, Estimate.Exact(Tally.Clip(Tally.Ratio(_overlap, Weight))), Tally.Clip(Weight), at, [.. history.MostProbable(Weight, BranchesTold)]);
+        new(Label, Estimate.Exact(Tally.Clip(Whole(Tally.Ratio(_overlap, Weight)))), Tally.Clip(Weight), at, [.. history.MostProbable(Weight, BranchesTold)]);
 }

@@ -72,6 +72,20 @@ internal sealed class BindingFindings(SourceText source)
         _found.Add((header.Start, From(BindingMessages.WrongInCase(source.LineOf(span.Start), message), source.PlaceOf(header))));
     }
 
+    /// <summary>Tries something whose failure is no mistake of the script; null when it failed, and nothing is told.</summary>
+    public T? Try<T>(Func<T?> bind)
+        where T : class
+    {
+        (int count, HashSet<string> suspects) = (_found.Count, [.. _suspects]);
+        (string, Span, string?)[] seen = [.. _seen];
+        T? result = bind();
+        bool failed = _found.Count > count;
+        _found.RemoveRange(count, _found.Count - count);
+        _seen.IntersectWith(seen);
+        _suspects.IntersectWith(suspects);
+        return failed ? null : result;
+    }
+
     /// <summary>Whether the current part is switched off by the parameter values.</summary>
     public bool IsMuted => _muted > 0;
 

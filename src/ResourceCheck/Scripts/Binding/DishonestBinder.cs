@@ -37,6 +37,7 @@ internal sealed class DishonestBinder(BindContext context, NameState start)
         StepBinder binder = new(context, _labels);
         IReadOnlyList<Step> steps = binder.Bind();
         BoundExpression? harm = Harm(statement);
+        BoundExpression? success = context.Findings.Try(() => Success(binder, steps));
         foreach (ChooseStatement unused in cheat.Unused)
             context.Findings.Report(unused.Span, BindingMessages.ChoiceUnused(unused.Name.Text));
         context.Cheat = null;
@@ -46,6 +47,7 @@ internal sealed class DishonestBinder(BindContext context, NameState start)
             return null;
         return new DishonestCase(statement.Title.Text, cheat.By, cheat.Choices, steps, context.HasCopies ? binder.ListSteps : null, harm)
         {
+            Success = success,
             PerfectHardware = statement.Body.Any(s => s is PerfectStatement),
         };
     }
@@ -86,6 +88,14 @@ internal sealed class DishonestBinder(BindContext context, NameState start)
             if (!cheat.IsFree(name))
                 context.Findings.Report(choose.Name.Span, BindingMessages.NameTaken(name, context.IsNameTaken(name) ? context.RoleOf(name) : "another value"));
         }
+    }
+
+    /// <summary>The success condition with what the strategy makes of its names; null when the cheat leaves a name out.</summary>
+    private BoundExpression? Success(StepBinder binder, IReadOnlyList<Step> steps)
+    {
+        RefereeBinder referee = new(context, _labels, steps);
+        referee.Bind([.. binder.RefereeLines.Where(l => l.Statement is SuccessStatement).Take(1)]);
+        return referee.Success;
     }
 
     private BoundExpression? Harm(DishonestStatement statement)

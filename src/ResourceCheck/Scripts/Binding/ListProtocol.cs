@@ -30,6 +30,9 @@ public sealed record DishonestCase(
     /// <summary>Whether the cheat's own hardware is declared perfect: its figures are then those without noise at the cheat.</summary>
     public bool PerfectHardware { get; init; }
 
+    /// <summary>The referee's condition with what the strategy makes of its names; null when the cheat leaves one of them out, so that success cannot be told.</summary>
+    public BoundExpression? Success { get; init; }
+
     /// <summary>Whether anything that decides about the harm looks at a private input.</summary>
     public bool Asks(IReadOnlyList<InputValues> inputs)
     {
@@ -42,7 +45,7 @@ public sealed record DishonestCase(
     public Protocol In(Protocol honest, IReadOnlyList<Value> choices)
     {
         ArgumentNullException.ThrowIfNull(honest);
-        return honest with { Steps = [.. CopySteps.Select(s => StepWalk.Put(s, choices))], Harm = BoundWalk.Put(Harm, choices) };
+        return honest with { Steps = [.. CopySteps.Select(s => StepWalk.Put(s, choices))], Harm = BoundWalk.Put(Harm, choices), Success = Success is { } success ? BoundWalk.Put(success, choices) : honest.Success };
     }
 }
 

@@ -17,6 +17,7 @@ internal sealed class StepMap(Func<int, int> slots)
         CopySteps = Steps(strategy.CopySteps),
         ListSteps = strategy.ListSteps is { } steps ? Steps(steps) : null,
         Harm = Value(strategy.Harm),
+        Success = strategy.Success is { } success ? Value(success) : null,
     };
 
     /// <summary>Rewrites a figure.</summary>

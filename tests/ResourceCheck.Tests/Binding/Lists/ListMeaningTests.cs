@@ -1,4 +1,3 @@
-using System.Runtime.CompilerServices;
 using ResourceCheck.Judgement;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts;
@@ -147,7 +146,7 @@ public sealed class ListMeaningTests
     internal static string Lists(string rest) =>
         "parameter M = 30 in 1..500\nparties Ada, Ben, Cyd\ninput x of Ada in {0, 1}\nresource antisymmetric on all\ncopies M\nround \"r\"\n  all measure level as v\n  Cyd announces v\nend\n" + rest + "\n";
 
-    private static string Text(string name, [CallerFilePath] string here = "") => File.ReadAllText(Path.Combine(Path.GetDirectoryName(here)!, name + ".protocol"));
+    private static string Text(string name) => ProtocolLibrary.ProtocolLibraryTests.Text(name + ".protocol");
 
     private static Func<Step, string> Written(Protocol protocol) => s => $"{s.GetType().Name} {protocol.Source.LineOf(s.Span.Start)}";
 

@@ -1,0 +1,82 @@
+using ResourceCheck.Conditions;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Judgement;
+using Xunit;
+
+namespace ResourceCheck.Tests.ProtocolLibrary;
+
+/// <summary>What cheats do, against values worked by hand and tables.</summary>
+public sealed class DishonestCaseTests
+{
+    /// <summary>
+    /// Ideally P[1] holds level 0 in 1/n of the draws. Denying leaves them without a leader; claiming makes a second one in all others;
+    /// hiding level 0 as a missing click drops 1/n of the copies and leaves draws that others always win.
+    /// </summary>
+    [Theory]
+    [InlineData(3)]
+    [InlineData(4)]
+    public void Cheats_of_the_leader_draw_do_what_counting_says(int n)
+    {
+        RunResult run = Run("leader-draw.protocol", ("n", $"{n}"));
+        Assert.Equal(1.0 / n, Metric(run, "P[1] denies that it leads", "harm"), 1e-12);
+        Assert.Equal(1 - (1.0 / n), Metric(run, "P[1] denies that it leads", "success"), 1e-12);
+        Assert.Equal(1 - (1.0 / n), Metric(run, "P[1] claims to lead", "harm"), 1e-12);
+        Assert.Equal(1.0 / n, Metric(run, "P[1] claims to lead", "success"), 1e-12);
+        const string hides = "P[1] hides that it leads as a missing click";
+        Assert.Equal(1, Metric(run, hides, "harm"), 1e-12);
+        Assert.Equal(1 - (1.0 / n), Metric(run, hides, "copies kept"), 1e-12);
+        Assert.Equal(1, Metric(run, hides, "success"), 1e-12);
+    }
+
+    [Fact]
+    public void A_leaver_who_announces_a_wrong_outcome_leaves_an_orthogonal_state()
+    {
+        RunResult run = Run("removal.protocol");
+        Assert.Equal(0, Metric(run, "Dov announces a wrong outcome", "fidelity after removal"), 1e-12);
+        Assert.Equal(0, Metric(run, "Dov announces a wrong outcome", "harm"), 1e-12); // a draw of levels shows nothing
+        AttackResult attack = Assert.Single(run.Attacks);
+        Assert.Equal("o", Assert.Single(attack.Choices).Key);
+    }
+
+    /// <summary>Largest harms of the table of lists (tests/reference/lists.csv; numbers of the sender's case found by the search).</summary>
+    [Fact]
+    public void Harms_of_liar_detection_are_at_least_those_of_the_reference_attacks_and_labelled_with_their_side()
+    {
+        RunResult run = Run("liar-detection.protocol");
+        Assert.InRange(Metric(run, "sender lies", "harm"), 0.18408203125 - 1e-12, 0.2);
+        Assert.InRange(Metric(run, "forwarder lies", "harm"), 0.24532776694 - 1e-10, 0.26);
+        Assert.All(run.Cases.Skip(1), c =>
+        {
+            Estimate most = c.Metrics.Single(m => m.Name == "harm").Estimate, least = c.Metrics.Single(m => m.Name == "harm on average").Estimate;
+            Assert.True(double.IsFinite(most.High) && double.IsInfinity(most.Low));
+            Assert.True(double.IsFinite(least.Low) && double.IsInfinity(least.High));
+            Assert.True(least.Value <= most.Value);
+        });
+        Assert.Equal(2.4262163320e-2, run.Cases[0].Metrics.Single(m => m.Name == "failure").Estimate.Value, 1e-11);
+    }
+
+    /// <summary>A forger without noise of its own: p = 0.02 on the others only (tests/reference/lists.py and the page of the protocol).</summary>
+    [Fact]
+    public void Perfect_hardware_takes_the_noise_of_the_cheat_away()
+    {
+        string script = ProtocolLibraryTests.Text("detectable-broadcast.protocol");
+        int end = script.IndexOf("dishonest \"sender splits\"", StringComparison.Ordinal), forger = script.IndexOf("dishonest \"receiver forges\"", StringComparison.Ordinal);
+        string perfect = (script[..end] + script[forger..]).Replace("goal harm \"sender splits\" <= 0.2\n", "", StringComparison.Ordinal)
+            .Replace("  instead of \"evidence\"", "  perfect hardware\n  instead of \"evidence\"", StringComparison.Ordinal);
+        RunResult run = Value(Judge.Run(new RunRequest { Script = new InputText("p.protocol", perfect, ""), Overrides = [new("flight.depolarising", "0.02")] }));
+        Assert.Equal(0.10465065169, Metric(run, "receiver forges", "harm"), 1e-10);
+    }
+
+    private static double Metric(RunResult run, string name, string metric) => run.Cases.Single(c => c.Case == name).Metrics.Single(m => m.Name == metric).Estimate.Value;
+
+    private static RunResult Run(string script, params (string Name, string Value)[] parameters) => Value(Judge.Run(
+        ProtocolLibraryTests.Request(script, conditions: false, parameters: false) with { Parameters = [.. parameters.Select(p => KeyValuePair.Create(p.Name, p.Value))] }));
+
+    private static T Value<T>(Outcome<T> outcome)
+        where T : class
+    {
+        Assert.True(outcome.Succeeded, string.Join("\n\n", outcome.Findings));
+        return outcome.Value!;
+    }
+}
