@@ -19,6 +19,13 @@ public static class Judge
         { Findings: var findings } => Outcome<VerifyResult>.Failed(findings),
     };
 
+    /// <summary>Shares a loss out among its sources.</summary>
+    public static Outcome<BudgetResult> Budget(RunRequest request) => Setup.From(request) switch
+    {
+        { Value: { } setup } => BudgetJudgement.Of(setup),
+        { Findings: var findings } => Outcome<BudgetResult>.Failed(findings),
+    };
+
     /// <summary>Follows storage side by side against time.</summary>
     public static Outcome<StorageResult> Storage(StorageRequest request) => StorageJudgement.Of(request);
 

@@ -107,6 +107,9 @@ internal static class JudgementMessages
         combinations < 1 ? "widen the range" : "narrow the ranges, or make a case for each part",
         Place.Of($"dishonest \"{name}\""));
 
+    public static Diagnostic NothingToShare(string metric, string reason) => new(
+        "E009", Severity.Error, $"The loss of {metric} cannot be shared out among its sources: {reason}.", "set a goal on another figure", Place.Of("budget"));
+
     public static Diagnostic SearchRefused(string name, string reason) => new(
         "E008",
         Severity.Error,

@@ -18,27 +18,17 @@ internal static class Limits
     /// <summary>A sentence about the worst goal, or the last checkpoint, or success; null when nothing is lost or it would take long.</summary>
     public static string? Hint(IReadOnlyList<(Goal Goal, GoalResult Result)> goals, IReadOnlyList<Evaluated> all, RunRequest request)
     {
-        MetricName metric = Metric(goals, all);
-        Evaluated? worst = all.Where(e => e.Figure(metric) is not null).MinBy(e => Sign(metric) * e.Figure(metric)!.Value);
+        MetricName metric = MetricChoice.Of(goals, all);
+        int sign = MetricChoice.Sign(metric, goals.Select(g => g.Goal));
+        Evaluated? worst = all.Where(e => e.Figure(metric) is not null).MinBy(e => sign * e.Figure(metric)!.Value);
         if (worst is null || worst.Setting.IsIdeal || worst.Actual.Engine.Work > MostWork || !double.IsFinite(worst.Figure(metric)!.Value))
             return null;
         PreparedState prepared = Prepare(worst.Setting.Plan);
         Func<Source, int?, double> without = (source, party) => Without(worst, prepared, metric, source, party, request);
         double now = worst.Figure(metric)!.Value;
-        (Source source, double best) = Enum.GetValues<Source>().Select(s => (s, without(s, null))).MaxBy(pair => Sign(metric) * pair.Item2);
-        return Sign(metric) * (best - now) < Noticeable ? null : Sentence(metric, now, source, best, WorstParty(worst, source, metric, without));
+        (Source source, double best) = Enum.GetValues<Source>().Select(s => (s, without(s, null))).MaxBy(pair => sign * pair.Item2);
+        return sign * (best - now) < Noticeable ? null : Sentence(metric, now, source, best, WorstParty(worst, source, metric, sign, without));
     }
-
-    private static MetricName Metric(IReadOnlyList<(Goal Goal, GoalResult Result)> goals, IReadOnlyList<Evaluated> all)
-    {
-        if (goals.Count > 0)
-            return goals.MinBy(g => g.Result.Margin).Goal.Metric;
-        CheckpointEvaluation? last = all[0].Actual.Checkpoints.Skip(3).LastOrDefault();
-        return last is null ? new MetricName(MetricKind.Success, "") : new MetricName(MetricKind.Checkpoint, last.Label);
-    }
-
-    /// <summary>+1 when more is better.</summary>
-    private static int Sign(MetricName metric) => metric.Kind is MetricKind.Failure or MetricKind.Abort or MetricKind.Harm ? -1 : 1;
 
     private static PreparedState Prepare(Plan plan) => Resource.Prepare(plan.World.Resource, plan.Protocol.Holders.Count).Value!; // was prepared once already
 
@@ -51,12 +41,12 @@ internal static class Limits
         return double.IsNaN(value) ? worst.Figure(metric)!.Value : value;
     }
 
-    private static string? WorstParty(Evaluated worst, Source source, MetricName metric, Func<Source, int?, double> without)
+    private static string? WorstParty(Evaluated worst, Source source, MetricName metric, int sign, Func<Source, int?, double> without)
     {
         if (source is Source.Preparation or Source.Storage)
             return null;
         Protocol protocol = worst.Setting.Protocol;
-        (int party, double value) = protocol.Holders.Select(p => (p, without(source, p))).MaxBy(pair => Sign(metric) * pair.Item2);
+        (int party, double value) = protocol.Holders.Select(p => (p, without(source, p))).MaxBy(pair => sign * pair.Item2);
         double gain = Math.Abs(value - worst.Figure(metric)!.Value);
         return gain < Noticeable ? null : $"{protocol.Parties[party]}'s {FigureText.Number(gain)}";
     }
@@ -67,7 +57,7 @@ internal static class Limits
         return $"Most is lost {Words(source)}: {FigureText.Number(Math.Abs(best - now))}{above}; without it {GoalJudgement.Name(metric)} would be {FigureText.Number(best)} (exact).";
     }
 
-    private static string Words(Source source) => source switch
+    internal static string Words(Source source) => source switch
     {
         Source.Preparation => "in the preparation of the state",
         Source.Storage => "in storage before the particles part",

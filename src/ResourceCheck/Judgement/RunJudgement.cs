@@ -12,16 +12,18 @@ internal static class RunJudgement
     public static Outcome<RunResult> Of(Setup setup)
     {
         List<Diagnostic> findings = [];
-        List<Evaluated> all = [];
-        foreach (Setting setting in setup.Settings)
-            all.AddRange(Evaluate(setting, setup.Request, findings));
+        List<Evaluated> all = All(setup, findings, cheats: true);
         if (findings.Any(f => f.Severity == Severity.Error))
             return Outcome<RunResult>.Failed([.. findings.Distinct()]);
         RunResult result = Conclude(setup with { Notes = [.. setup.Notes, .. findings.Distinct()] }, all);
         return new Outcome<RunResult>(result, result.Warnings);
     }
 
-    private static IEnumerable<Evaluated> Evaluate(Setting setting, RunRequest request, List<Diagnostic> findings)
+    /// <summary>Every setting and assignment of the private inputs, evaluated; what went wrong is added to the findings.</summary>
+    public static List<Evaluated> All(Setup setup, List<Diagnostic> findings, bool cheats) =>
+        [.. setup.Settings.SelectMany(s => Evaluate(s, setup.Request, findings, cheats))];
+
+    private static IEnumerable<Evaluated> Evaluate(Setting setting, RunRequest request, List<Diagnostic> findings, bool withCheats)
     {
         Outcome<IReadOnlyList<Evaluation>> actual = Evaluator.Evaluate(setting, request);
         findings.AddRange(actual.Findings);
@@ -29,7 +31,7 @@ internal static class RunJudgement
             return [];
         Outcome<IReadOnlyList<Evaluation>> ideal = setting.IsIdeal ? actual : Evaluator.Evaluate(setting.Idealised(), request, mayKeepNothing: true);
         findings.AddRange(ideal.Succeeded ? [] : ideal.Findings);
-        Outcome<IReadOnlyList<CheatEvaluation>> cheats = Evaluator.Cheats(setting, evaluations, request);
+        Outcome<IReadOnlyList<CheatEvaluation>> cheats = withCheats ? Evaluator.Cheats(setting, evaluations, request) : Outcome<IReadOnlyList<CheatEvaluation>>.Of([]);
         findings.AddRange(cheats.Findings);
         return ideal.Value is { } best && cheats.Value is { } strategies
             ? evaluations.Zip(best, (a, i) => new Evaluated(setting, a, i) { Cheats = strategies }) : [];

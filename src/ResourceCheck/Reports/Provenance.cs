@@ -24,6 +24,15 @@ internal static class Provenance
     public static IReadOnlyList<string> Of(VerifyResult verification) =>
         [Inputs(verification.Version, verification.Title, verification.Protocol, null, ideal: "ideal conditions")];
 
+    /// <summary>Of a budget.</summary>
+    public static IReadOnlyList<string> Of(BudgetResult budget) =>
+    [
+        Inputs(budget.Version, budget.Title, budget.Protocol, budget.Conditions, ideal: budget.Overrides.Count == 0 ? "ideal conditions" : "ideal conditions except what is set"),
+        .. budget.Overrides.Select(o => $"Set: {o.Key} = {o.Value}"),
+        .. Parameters(budget.Parameters),
+        Engine(budget.Engine),
+    ];
+
     /// <summary>Of an inspection.</summary>
     public static IReadOnlyList<string> Of(InspectResult inspection) =>
         [Inputs(inspection.Version, inspection.Title, inspection.Protocol, inspection.Conditions, ideal: "ideal conditions"), .. Parameters(inspection.Parameters)];

@@ -1,0 +1,20 @@
+using ResourceCheck.Cli.Usage;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement;
+using ResourceCheck.Reports;
+
+namespace ResourceCheck.Cli.Commands;
+
+/// <summary><c>budget</c>.</summary>
+internal static class BudgetCommand
+{
+    /// <summary>Executes it.</summary>
+    public static async Task<int> Execute(Invocation use, Options o, CancellationToken token)
+    {
+        Target target = Work.TargetOf(use, o);
+        if (Work.Request(use, o) is not { } request)
+            return Work.Refuse(use);
+        Outcome<BudgetResult> outcome = await Work.Compute(() => Judge.Budget(request with { Cancellation = token }), token);
+        return Work.Finish(use, target, outcome, (budget, writer, colour) => ReportWriter.Write(budget, target.Format, writer, colour), _ => ExitCodes.Done, budget => budget.Warnings);
+    }
+}
