@@ -11,9 +11,10 @@ import pairs
 import preparation
 import runs
 import removal
+import tolerance
 from tables import near, stored_values
 
-BUILDERS = [local_noise.build, removal.build, outcomes.build, pairs.build, preparation.build, runs.build]
+BUILDERS = [local_noise.build, removal.build, outcomes.build, pairs.build, preparation.build, runs.build, tolerance.build]
 
 
 def main(arguments):

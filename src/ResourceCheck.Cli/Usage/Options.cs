@@ -40,6 +40,10 @@ internal sealed class Options
 
     public Option<string[]> Parties { get; } = Value("--parties", "NUMBER", "Number of emitters, one per party. Default 3.");
 
+    public Option<string[]> Vary { get; } = Value("--vary", "PATH=FROM..TO", "What to vary: a conditions path or a parameter, and its range, such as flight.default.length=\"1 km..20 km:20\" or n=3..4; :log 20 spaces logarithmically.");
+
+    public Option<string[]> Goal { get; } = Value("--until", "GOAL", "Goal to hold, such as \"success >= 0.9\"; without it the script's tightest.");
+
     public Option<string[]> Until { get; } = Value("--until", "TIME", "Last storage time, such as \"5 ns\"; without it the duration in the conditions.");
 
     public Option<string[]> Points { get; } = Value("--points", "NUMBER", "Number of times from 0 on. Default 41.");
@@ -55,7 +59,7 @@ internal sealed class Options
     public Option<bool> Force { get; } = new("--force") { Description = "Replace files that exist." };
 
     /// <summary>Whether an option may be given several times.</summary>
-    public static bool MayRepeat(Option option) => option.Name is "--set" or "--parameter";
+    public static bool MayRepeat(Option option) => option.Name is "--set" or "--parameter" or "--vary";
 
     private static Option<string[]> Value(string name, string helpName, string description, string[]? choices = null)
     {

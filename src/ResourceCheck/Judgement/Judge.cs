@@ -1,4 +1,5 @@
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement.Studies;
 
 namespace ResourceCheck.Judgement;
 
@@ -25,6 +26,12 @@ public static class Judge
         { Value: { } setup } => BudgetJudgement.Of(setup),
         { Findings: var findings } => Outcome<BudgetResult>.Failed(findings),
     };
+
+    /// <summary>Evaluates a protocol at every point of a grid of one or two varied values.</summary>
+    public static Outcome<SweepResult> Sweep(SweepRequest request) => SweepJudgement.Of(request);
+
+    /// <summary>Finds the values at which a goal is just met.</summary>
+    public static Outcome<ToleranceResult> Tolerance(ToleranceRequest request) => ToleranceJudgement.Of(request);
 
     /// <summary>Follows storage side by side against time.</summary>
     public static Outcome<StorageResult> Storage(StorageRequest request) => StorageJudgement.Of(request);

@@ -1,6 +1,7 @@
 using ResourceCheck.Conditions;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Judgement;
+using ResourceCheck.Judgement.Studies;
 using ResourceCheck.Resources;
 using ResourceCheck.Scripts;
 using ResourceCheck.Scripts.Binding;
@@ -24,6 +25,7 @@ public static class Catalogue
             ConditionsCatalogue.All,
             StateCatalogue.All,
             JudgementCatalogue.All,
+            StudyCatalogue.All,
             UsageCatalogue.All,
         ];
         return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];

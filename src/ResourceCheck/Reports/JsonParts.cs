@@ -111,6 +111,16 @@ internal static class JsonParts
         Number(json, "multiplications", engine.Work);
     });
 
+    /// <summary>The fields of what a study varies.</summary>
+    public static void Varied(Utf8JsonWriter json, Judgement.Studies.Variation varied)
+    {
+        json.WriteString("path", varied.Path);
+        json.WriteString("unit", varied.Unit);
+        Number(json, "from", varied.From);
+        Number(json, "to", varied.To);
+        json.WriteBoolean("logarithmic", varied.IsLogarithmic);
+    }
+
     /// <summary>Parameters and the values used.</summary>
     public static void Parameters(Utf8JsonWriter json, IReadOnlyList<ParameterUse> parameters) => Objects(json, "parameters", parameters, p =>
     {

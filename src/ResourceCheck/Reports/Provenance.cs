@@ -33,6 +33,16 @@ internal static class Provenance
         Engine(budget.Engine),
     ];
 
+    /// <summary>Of a sweep.</summary>
+    public static IReadOnlyList<string> Of(Judgement.Studies.SweepResult sweep) => Of(sweep.Version, sweep.Title, sweep.Protocol, sweep.Conditions, sweep.Overrides);
+
+    /// <summary>Of a tolerance.</summary>
+    public static IReadOnlyList<string> Of(Judgement.Studies.ToleranceResult tolerance) =>
+        [.. Of(tolerance.Version, tolerance.Title, tolerance.Protocol, tolerance.Conditions, tolerance.Overrides), Engine(tolerance.Engine)];
+
+    private static IReadOnlyList<string> Of(string version, string title, InputFile protocol, InputFile? conditions, IReadOnlyList<KeyValuePair<string, string>> overrides) =>
+        [Inputs(version, title, protocol, conditions, ideal: "ideal conditions except what is set or varied"), .. overrides.Select(o => $"Set: {o.Key} = {o.Value}")];
+
     /// <summary>Of an inspection.</summary>
     public static IReadOnlyList<string> Of(InspectResult inspection) =>
         [Inputs(inspection.Version, inspection.Title, inspection.Protocol, inspection.Conditions, ideal: "ideal conditions"), .. Parameters(inspection.Parameters)];

@@ -1,4 +1,5 @@
 using ResourceCheck.Judgement;
+using ResourceCheck.Judgement.Studies;
 using ResourceCheck.Resources;
 
 namespace ResourceCheck.Reports;
@@ -33,6 +34,14 @@ public static class ReportWriter
     /// <summary>Writes the result of <c>budget</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
     public static void Write(BudgetResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
         Write(format, writer, colour, () => BudgetReport.From(result), () => BudgetDocument.Write(result, writer));
+
+    /// <summary>Writes the result of <c>sweep</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(SweepResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => SweepReport.From(result), () => SweepDocument.Write(result, writer));
+
+    /// <summary>Writes the result of <c>tolerance</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(ToleranceResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => ToleranceReport.From(result), () => ToleranceDocument.Write(result, writer));
 
     private static void Write(ReportFormat format, TextWriter writer, bool colour, Func<Report> build, Action writeDocument)
     {

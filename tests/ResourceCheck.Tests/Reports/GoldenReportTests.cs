@@ -15,7 +15,7 @@ public sealed class GoldenReportTests
         [ReportFormat.Markdown] = "md",
     };
 
-    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage"];
+    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage", "budget", "sweep", "tolerance"];
 
     public static TheoryData<string, ReportFormat> All()
     {
@@ -88,6 +88,15 @@ public sealed class GoldenReportTests
                 break;
             case "storage":
                 ReportWriter.Write(Samples.Storage, format, writer);
+                break;
+            case "budget":
+                ReportWriter.Write(Samples.Budget, format, writer);
+                break;
+            case "sweep":
+                ReportWriter.Write(Samples.Sweep, format, writer);
+                break;
+            case "tolerance":
+                ReportWriter.Write(Samples.Tolerance, format, writer);
                 break;
             case "state":
                 ReportWriter.Write(Samples.State, "0.1.0", format, writer);

@@ -1,6 +1,7 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
 using ResourceCheck.Judgement;
+using ResourceCheck.Judgement.Studies;
 using ResourceCheck.Resources;
 using ResourceCheck.Timeline;
 
@@ -154,6 +155,60 @@ internal static class Samples
         InitialRates = (2.93e6, 1.479e8, 7.54e7),
         Points = [new(0, 1, 1, 1, 1, 1), new(1e-9, 0.9911, 0.9099, 0.8902, 0.8338, 0.9415), new(2e-9, 0.98409123, 0.953187, 0.7526, 0.7239, 0.86)],
         ErrorEstimate = 9.61e-12,
+        Warnings = [Warning],
+    };
+
+    /// <summary>Two sources of which one costs nothing.</summary>
+    public static BudgetResult Budget { get; } = new()
+    {
+        Version = "0.1.0",
+        Protocol = Script,
+        Title = "Party removal",
+        Conditions = new("winter.conditions.json", Hash),
+        Overrides = [new("flight.Dov.length", "5 km")],
+        Parameters = [new("n", ["4"], true)],
+        Engine = Engine,
+        Metric = "fidelity \"after removal\"",
+        At = "n = 4",
+        Figures = (0.7828, 1),
+        Loss = 0.2172,
+        Shares = [new(Source.FlightNoise, 0.2172, 0.2172, 0.2172), new(Source.Loss, 0, 1e-17, 0)],
+        Advice = "Improve first what is lost to noise in flight: without it fidelity \"after removal\" would be 1 (exact), with half of it 0.8914 (exact).",
+        Warnings = [Warning],
+    };
+
+    /// <summary>One path; a bound, an undefined figure and a point that failed.</summary>
+    public static SweepResult Sweep { get; } = new()
+    {
+        Version = "0.1.0",
+        Protocol = Script,
+        Title = "a | b <b>",
+        Conditions = null,
+        Overrides = [],
+        Varied = [new("flight.default.length", false, 1, 3, "km", 3, false, false)],
+        Points =
+        [
+            new([1], [new("success", Estimate.Exact(0.9)), new("Bell value", Estimate.AtLeast(2.4312))], true, null),
+            new([2], [new("success", Estimate.Exact(double.NaN)), new("Bell value", Estimate.AtLeast(2.1))], false, null),
+            new([3], [], null, "No copy is kept. (E003)"),
+        ],
+        Warnings = [],
+    };
+
+    /// <summary>A curve that is crossed twice.</summary>
+    public static ToleranceResult Tolerance { get; } = new()
+    {
+        Version = "0.1.0",
+        Protocol = Script,
+        Title = "Party removal",
+        Conditions = new("winter.conditions.json", Hash),
+        Overrides = [],
+        Varied = new("flight.Dov.length", false, 0, 60, "km", null, false, false),
+        Goal = "\"after removal\" >= 0.75",
+        Engine = Engine,
+        Crossings = [new(12.345678, true, Estimate.Exact(0.75), (12345.678, 6.05e-5)), new(40, false, Estimate.AtLeast(0.75), null)],
+        MetAt = (true, true),
+        Evaluations = 58,
         Warnings = [Warning],
     };
 

@@ -15,6 +15,9 @@ public sealed class SchemaTests
     [InlineData("inspection", "inspection")]
     [InlineData("state", "state")]
     [InlineData("storage", "storage")]
+    [InlineData("budget", "budget")]
+    [InlineData("sweep", "sweep")]
+    [InlineData("tolerance", "tolerance")]
     public async Task Documents_fit_their_published_schema(string name, string schema)
     {
         JsonSchema published = await JsonSchema.FromJsonAsync(Schemas.Find(schema)!, TestContext.Current.CancellationToken);

@@ -1,0 +1,44 @@
+using ResourceCheck.Diagnostics;
+
+namespace ResourceCheck.Judgement.Studies;
+
+/// <summary>Texts about what a sweep or a tolerance varies (J001 to J019).</summary>
+internal static class StudyMessages
+{
+    private const string Example = "flight.default.length=1 km..20 km:20";
+
+    public static Diagnostic UnreadableRange(string path, string text) => Wrong(
+        "J001", path, $"`{text}` is no range of values: FROM..TO, with a number of points behind a colon if need be, fits here.", $"write for example --vary {path}=0..0.1:11, or {Example}, or with log in front of the number of points");
+
+    public static Diagnostic TwoUnits(string path, string one, string other) => Wrong(
+        "J002", path, $"The range of {path} begins in {one} and ends in {other}: one unit fits here.", "write both ends in the same unit");
+
+    public static Diagnostic EmptyRange(string path, string text) => Wrong(
+        "J003", path, $"`{text}` holds no range: it must begin with the smaller end.", "swap the ends");
+
+    public static Diagnostic NoLogarithm(string path, string text) => Wrong(
+        "J004", path, $"`{text}` cannot be spaced logarithmically: both ends must be above 0.", "leave log out, or begin above 0");
+
+    public static Diagnostic TooManyPoints(string path, int count, int most) => Wrong(
+        "J005", path, $"{path} would take {count} values: 2 to {most} fit here.", "choose another number of points, or a wider range");
+
+    public static Diagnostic NothingVaried(int found, int most) => Wrong(
+        "J006", "", found == 0 ? "Nothing is varied." : $"{found} paths are varied: up to {most} fit here.", $"say what is varied, such as --vary \"{Example}\"");
+
+    public static Diagnostic OtherJournal(string journal) => new(
+        "J007", Severity.Error, $"{journal} holds the points of another sweep.", "delete it, or write to another file with --out", Place.Of("--out"));
+
+    public static Diagnostic JournalRefused(string journal, string reason) => new(
+        "J008", Severity.Error, $"The finished points cannot be kept in {journal}: {reason}.", "free the disk or choose another file with --out; run again to go on where it stopped", Place.Of("--out"));
+
+    public static Diagnostic NoGoal() => new(
+        "J009", Severity.Error, "There is no goal to hold: one such as `success >= 0.9` fits here.", "give it with --until, or write a goal line into the script", Place.Of("--until"));
+
+    public static Diagnostic GoalOnHarm() => new(
+        "J010", Severity.Error, "A tolerance follows success, failure, abort, yield, a checkpoint or a report; harm of a dishonest case is searched anew at each value and does not fit here.", "set a goal on another figure", Place.Of("--until"));
+
+    public static Diagnostic UndefinedGoal(string path, string value) => Wrong(
+        "J011", path, $"The goal's figure is not defined at {path} = {value}.", "choose a range in which it is");
+
+    private static Diagnostic Wrong(string code, string path, string message, string cure) => new(code, Severity.Error, message, cure, Place.Of(path.Length == 0 ? "--vary" : $"--vary {path}"));
+}

@@ -1,0 +1,52 @@
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+
+namespace ResourceCheck.Judgement.Studies;
+
+/// <summary>What <c>sweep</c> tells: figures against one or two varied values.</summary>
+public sealed record SweepResult
+{
+    /// <summary>Program version.</summary>
+    public required string Version { get; init; }
+
+    /// <summary>The script.</summary>
+    public required InputFile Protocol { get; init; }
+
+    /// <summary>Name in the <c>protocol</c> line.</summary>
+    public required string Title { get; init; }
+
+    /// <summary>The conditions; null when ideal.</summary>
+    public required InputFile? Conditions { get; init; }
+
+    /// <summary>Overrides that hold at every point.</summary>
+    public required IReadOnlyList<KeyValuePair<string, string>> Overrides { get; init; }
+
+    /// <summary>What was varied; one or two.</summary>
+    public required IReadOnlyList<Variation> Varied { get; init; }
+
+    /// <summary>The points, the first variation slowest.</summary>
+    public required IReadOnlyList<SweepPoint> Points { get; init; }
+
+    /// <summary>Warnings and notes.</summary>
+    public required IReadOnlyList<Diagnostic> Warnings { get; init; }
+}
+
+/// <summary>One point of a sweep.</summary>
+/// <param name="Values">Values varied, in their units.</param>
+/// <param name="Figures">Figures by name, the worst over inputs; empty when the point failed.</param>
+/// <param name="GoalsMet">Whether all goals are met; null when there are none or the point failed.</param>
+/// <param name="Failure">What stood against the point, with its code; null when it was computed.</param>
+public sealed record SweepPoint(IReadOnlyList<double> Values, IReadOnlyList<KeyValuePair<string, Estimate>> Figures, bool? GoalsMet, string? Failure);
+
+/// <summary>State of a sweep.</summary>
+/// <param name="Done">Points finished.</param>
+/// <param name="Total">Points in all.</param>
+/// <param name="Remaining">Estimated time left, s; null before anything can be said.</param>
+public sealed record SweepProgress(int Done, int Total, double? Remaining);
+
+/// <summary>What <c>sweep</c> is asked.</summary>
+/// <param name="Run">Script, conditions and what holds at every point.</param>
+/// <param name="Vary">Path and range, once or twice.</param>
+/// <param name="Journal">File that keeps finished points until the sweep is done; null keeps none.</param>
+/// <param name="Progress">Told about every finished point; null for nobody.</param>
+public sealed record SweepRequest(RunRequest Run, IReadOnlyList<KeyValuePair<string, string>> Vary, string? Journal, IProgress<SweepProgress>? Progress);

@@ -1,0 +1,57 @@
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+
+namespace ResourceCheck.Judgement.Studies;
+
+/// <summary>What <c>tolerance</c> tells: how far a value may go before a goal is missed.</summary>
+public sealed record ToleranceResult
+{
+    /// <summary>Program version.</summary>
+    public required string Version { get; init; }
+
+    /// <summary>The script.</summary>
+    public required InputFile Protocol { get; init; }
+
+    /// <summary>Name in the <c>protocol</c> line.</summary>
+    public required string Title { get; init; }
+
+    /// <summary>The conditions; null when ideal.</summary>
+    public required InputFile? Conditions { get; init; }
+
+    /// <summary>Overrides that hold at every value.</summary>
+    public required IReadOnlyList<KeyValuePair<string, string>> Overrides { get; init; }
+
+    /// <summary>What is varied.</summary>
+    public required Variation Varied { get; init; }
+
+    /// <summary>The goal held.</summary>
+    public required string Goal { get; init; }
+
+    /// <summary>Engine used.</summary>
+    public required EngineChoice Engine { get; init; }
+
+    /// <summary>Values at which the goal is just met, ascending.</summary>
+    public required IReadOnlyList<Crossing> Crossings { get; init; }
+
+    /// <summary>Whether the goal is met at the ends of the range.</summary>
+    public required (bool From, bool To) MetAt { get; init; }
+
+    /// <summary>Number of evaluations.</summary>
+    public required int Evaluations { get; init; }
+
+    /// <summary>Warnings and notes.</summary>
+    public required IReadOnlyList<Diagnostic> Warnings { get; init; }
+}
+
+/// <summary>A value at which the goal is just met.</summary>
+/// <param name="Value">The value, in the unit varied; for whole numbers the last one that meets the goal.</param>
+/// <param name="MetBelow">Whether the goal is met below it and missed above, rather than the reverse.</param>
+/// <param name="Figure">The goal's figure there.</param>
+/// <param name="Flight">Longest flight there: distance in m and time in s; null where nothing flies.</param>
+public sealed record Crossing(double Value, bool MetBelow, Estimate Figure, (double Metres, double Seconds)? Flight);
+
+/// <summary>What <c>tolerance</c> is asked.</summary>
+/// <param name="Run">Script, conditions and what holds at every value.</param>
+/// <param name="Vary">Path and range.</param>
+/// <param name="Goal">Goal to hold, as behind the word <c>goal</c>; null takes the script's tightest.</param>
+public sealed record ToleranceRequest(RunRequest Run, IReadOnlyList<KeyValuePair<string, string>> Vary, string? Goal);

@@ -1,0 +1,29 @@
+using ResourceCheck.Judgement.Studies;
+
+namespace ResourceCheck.Reports;
+
+/// <summary>The JSON document of <c>tolerance</c>; docs/schema/tolerance.schema.json describes it.</summary>
+internal static class ToleranceDocument
+{
+    /// <summary>Writes the document.</summary>
+    public static void Write(ToleranceResult tolerance, TextWriter writer) => JsonParts.WriteDocument(writer, "tolerance", tolerance.Version, json =>
+    {
+        JsonParts.Protocol(json, tolerance.Protocol, tolerance.Title);
+        JsonParts.Conditions(json, tolerance.Conditions, tolerance.Overrides);
+        JsonParts.Engine(json, tolerance.Engine);
+        JsonParts.Object(json, "varied", () => JsonParts.Varied(json, tolerance.Varied));
+        json.WriteString("goal", tolerance.Goal);
+        json.WriteBoolean("metAtFrom", tolerance.MetAt.From);
+        json.WriteBoolean("metAtTo", tolerance.MetAt.To);
+        json.WriteNumber("evaluations", tolerance.Evaluations);
+        JsonParts.Objects(json, "crossings", tolerance.Crossings, c =>
+        {
+            JsonParts.Number(json, "at", c.Value);
+            json.WriteBoolean("metBelow", c.MetBelow);
+            JsonParts.Object(json, "figure", () => JsonParts.EstimateFields(json, c.Figure));
+            JsonParts.Number(json, "metres", c.Flight?.Metres);
+            JsonParts.Number(json, "seconds", c.Flight?.Seconds);
+        });
+        JsonParts.Warnings(json, tolerance.Warnings);
+    });
+}
