@@ -86,6 +86,13 @@ internal static class JudgementMessages
         "make all pairs equivalent (a pair, an equilateral triangle), stand further apart, or store for a shorter time",
         Place.Of("storage"));
 
+    public static Diagnostic RoughIntegration(double error) => new(
+        "P022",
+        Severity.Warning,
+        $"Collective decay was integrated with an estimated error of {FigureText.Number(error, Rounding.Up)} in probabilities, so that figures marked exact are exact only to that.",
+        "lower `tolerance` in `storage` or `resource.relaxed`",
+        Place.Of("tolerance"));
+
     public static Diagnostic InterceptTooKnowing(Place at) => new(
         "P031",
         Severity.Error,

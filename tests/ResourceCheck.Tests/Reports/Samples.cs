@@ -41,6 +41,7 @@ internal static class Samples
         Conditions = new("winter.conditions.json", Hash),
         Overrides = [new("flight.Dov.length", "5 km")],
         Engine = Engine,
+        IntegrationError = 3.21e-11,
         Seed = 1,
         Parameters = [new("n", ["4"], true), new("x", ["0", "1"], false)],
         Cases =
