@@ -34,6 +34,7 @@ internal static class StorageJudgement
             Conditions = new InputFile(request.Conditions.Name, request.Conditions.Sha256),
             Overrides = request.Overrides,
             Emitters = request.Emitters,
+            Heralded = model.Heralded,
             WithoutShifts = model.IsPoint,
             InitialRates = (PhotonFreeStorage.InitialRate(couplings, ExchangeSign.Odd), PhotonFreeStorage.InitialRate(couplings, ExchangeSign.Even), couplings.TotalRate),
             Points = points,

@@ -38,7 +38,8 @@ internal static class RelaxedPrepared
             start.Findings);
     }
 
-    private static Outcome<PreparedState> Start(RelaxedStart start, int parties)
+    /// <summary>The state that relaxation starts from; a file is read here.</summary>
+    public static Outcome<PreparedState> Start(RelaxedStart start, int parties)
     {
         if (start.File is { } file)
             return Resource.Fit(StateFile.Read(file, false), file, parties);
