@@ -67,6 +67,17 @@ internal sealed class Invocation
         return otherwise;
     }
 
+    /// <summary>An option's probability, above 0 and up to 1; null when it is not given.</summary>
+    public double? Probability(Option<string[]> option)
+    {
+        if (Text(option) is not { } text)
+            return null;
+        if (double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out double value) && value is > 0 and <= 1)
+            return value;
+        Findings.Add(Usage.Findings.NoProbability(_words, option.Name, text));
+        return null;
+    }
+
     /// <summary>An option's memory size in bytes, or null when it is not given.</summary>
     public double? Memory(Option<string[]> option)
     {

@@ -85,7 +85,7 @@ internal static class RunJudgement
         }
     }
 
-    private static (int Copies, double? Seconds)? ListOf(Setting setting, YieldResult yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
+    internal static (int Copies, double? Seconds)? ListOf(Setting setting, YieldResult yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
         : (copies, SecondsPerKeptCopy(setting, yield) is { } each ? (copies * each) + setting.Plan.Duration.Seconds : null);
 
     /// <summary>Preparation and use of copies overlap, so the slower of the two sets the pace.</summary>

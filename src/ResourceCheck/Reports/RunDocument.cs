@@ -59,7 +59,7 @@ internal static class RunDocument
         JsonParts.Objects(json, "metrics", of.Metrics, m => Metric(json, m));
     }
 
-    private static void Attack(Utf8JsonWriter json, AttackResult attack)
+    internal static void Attack(Utf8JsonWriter json, AttackResult attack)
     {
         json.WriteString("case", attack.Case);
         json.WriteString("at", attack.At);
