@@ -22,6 +22,7 @@ internal static class RunReport
                 new Section(null, Short(figures, run), Remarks(run)),
                 .. Goals(run),
                 .. Attacks(run.Attacks, a => Noticed(run, a), run.List is not null),
+                .. Drift(run),
                 .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
                 .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
             ],
@@ -116,6 +117,14 @@ internal static class RunReport
                 Cell.Of(g.Text), Cell.Of(g.Met ? "met" : "not met"), Truth.CellOf(g.Value), Cell.Of(Truth.Describe(g.Value)), Margin(g),
             ])],
             Headed: false), []),
+    ];
+
+    private static Section[] Drift(RunResult run) => run.Drift is not { } drift ? [] :
+    [
+        new Section($"With {Quantities.FigureText.Number(100 * drift.Fraction)} % of runs under {drift.Conditions.Name}", new Table(
+            [new("case", "Case"), new("figure", "Figure"), new("whole", "Value"), new("floor", "Floor"), new("label", "Label")],
+            [.. drift.Figures.Select(f => (IReadOnlyList<Cell>)[Cell.Of(f.Case), Cell.Of(f.Name), Truth.CellOf(f.Whole), Truth.CellOf(f.Floor), Cell.Of(Truth.Describe(f.Whole))])]),
+            ["The floor is what the drifting runs alone give: nothing that improves the others brings the value below it."]),
     ];
 
     /// <summary>The worst of the listed strategies, with what is supposed.</summary>

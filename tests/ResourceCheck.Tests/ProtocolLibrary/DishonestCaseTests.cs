@@ -79,6 +79,20 @@ public sealed class DishonestCaseTests
         Assert.True(Judge.Run(request).Succeeded);
     }
 
+    /// <summary>One run in a hundred with every outcome random: its draws have one leader in 4 · 27/256 of the cases, and none of the three others leads in (3/4)³.</summary>
+    [Fact]
+    public void A_drift_puts_a_floor_under_failure_and_harms()
+    {
+        RunRequest request = ProtocolLibraryTests.Request("leader-draw.protocol", conditions: false, parameters: false);
+        DriftResult drift = Value(Judge.Run(request with { Drift = new Drift(0.01, new InputText("worse.json", """{ "flight": { "depolarising": 1 } }""", "")) })).Drift!;
+        DriftFigure honest = drift.Figures[0], denies = drift.Figures[1];
+        double failure = 1 - (4 * 27.0 / 256);
+        Assert.Equal((0.01 * failure, 0.01 * failure), (honest.Floor.Value, honest.Whole.Value), (a, b) => Math.Abs(a.Item1 - b.Item1) + Math.Abs(a.Item2 - b.Item2) < 1e-12);
+        Assert.Equal(("P[1] denies that it leads", "harm"), (denies.Case, denies.Name));
+        Assert.Equal(0.01 * 27 / 64, denies.Floor.Value, 1e-12);
+        Assert.Equal((0.99 * 0.25) + (0.01 * 27 / 64), denies.Whole.Value, 1e-12);
+    }
+
     /// <summary>A harm that speaks of a chosen number, and a number chosen before there are lists.</summary>
     [Fact]
     public void Choices_in_harms_and_in_rounds_are_handled()
