@@ -31,5 +31,6 @@ internal static class JudgementCatalogue
         new("P030", "figure of a discussion", "A report or claim of a list protocol asks for the probability of something that a discussion made once for all copies.", "Let `success` or the harm of a dishonest case ask for it."),
         new("P031", "interception that knows too much", "An interception happens in flight, when no message has been sent yet, so a conditional block around it can use only the outsider's own values and hold only the outsider's lines.", "Condition it on the outsider's own picks."),
         new("P032", "choices out of reach", "On single copies every combination of a cheat's choices is tried; here there are none, or too many.", "Narrow the ranges, or make a case for each part."),
+        new("P033", "uncertainties are not carried through", "Values of the conditions are given with a standard uncertainty. Figures are computed from the central values; this is a note.", "Try the ends with --set, or sweep over the value."),
     ];
 }

@@ -93,6 +93,13 @@ internal static class JudgementMessages
         "let the condition use the outsider's own picks alone, and take other lines out of the block",
         at);
 
+    public static Diagnostic CentralValues(IReadOnlyList<Conditions.UncertainQuantity> uncertain) => new(
+        "P033",
+        Severity.Note,
+        $"{Words.And(uncertain.Select(u => $"`{u.Path}`"))} {(uncertain.Count == 1 ? "carries an uncertainty" : "carry uncertainties")}: figures are of the central values, and no uncertainty is carried through to them.",
+        null,
+        Place.Of("conditions"));
+
     public static Diagnostic FigureOfDiscussion(Place at) => new(
         "P030",
         Severity.Error,
