@@ -12,8 +12,10 @@ internal static class RunCommand
     public static async Task<int> Execute(Invocation use, Options o, CancellationToken token)
     {
         Target target = Work.TargetOf(use, o);
-        if (Work.Request(use, o) is not { } request)
+        Drift? drift = use.Drift(o.Drift);
+        if (Work.Request(use, o) is not { } asked)
             return Work.Refuse(use);
+        RunRequest request = asked with { Drift = drift };
         Outcome<RunResult> outcome = await Work.Compute(() => use.Session.Library.Run(request), token);
         return Work.Finish(use, target, outcome, (run, writer, colour) => ReportWriter.Write(run, target.Format, writer, colour), CodeOf, run => run.Warnings);
     }

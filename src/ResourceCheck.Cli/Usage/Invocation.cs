@@ -67,6 +67,29 @@ internal sealed class Invocation
         return otherwise;
     }
 
+    /// <summary>A fraction and a conditions file; null when the option is not given.</summary>
+    public Drift? Drift(Option<string[]> option)
+    {
+        if (Text(option) is not { } text)
+            return null;
+        int colon = text.IndexOf(':', StringComparison.Ordinal);
+        bool reads = double.TryParse(text[..Math.Max(0, colon)], NumberStyles.Float, CultureInfo.InvariantCulture, out double fraction) && fraction is > 0 and <= 1 && colon < text.Length - 1;
+        if (!reads)
+            Findings.Add(Usage.Findings.NoDrift(_words, text));
+        return reads && Read(text[(colon + 1)..]) is { } file ? new Drift(fraction, file) : null;
+    }
+
+    /// <summary>An option's probability, above 0 and up to 1; null when it is not given.</summary>
+    public double? Probability(Option<string[]> option)
+    {
+        if (Text(option) is not { } text)
+            return null;
+        if (double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out double value) && value is > 0 and <= 1)
+            return value;
+        Findings.Add(Usage.Findings.NoProbability(_words, option.Name, text));
+        return null;
+    }
+
     /// <summary>An option's memory size in bytes, or null when it is not given.</summary>
     public double? Memory(Option<string[]> option)
     {

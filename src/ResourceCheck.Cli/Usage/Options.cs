@@ -44,6 +44,12 @@ internal sealed class Options
 
     public Option<string[]> Goal { get; } = Value("--until", "GOAL", "Goal to hold, such as \"success >= 0.9\"; without it the script's tightest.");
 
+    public Option<string[]> Drift { get; } = Value("--drift", "FRACTION:FILE", "A fraction of runs under worse conditions, such as 0.01:worse.conditions.json: what failure and harms become, and the floor under them.");
+
+    public Option<string[]> Failure { get; } = Value("--failure", "PROBABILITY", "What honest failure must not exceed, such as 1e-6.");
+
+    public Option<string[]> Harm { get; } = Value("--harm", "PROBABILITY", "What every harm must not exceed; the same as --failure unless said, and with 1 harms are not looked at.");
+
     public Option<string[]> Until { get; } = Value("--until", "TIME", "Last time, such as \"5 ns\"; without it the duration in the conditions.");
 
     public Option<string[]> Points { get; } = Value("--points", "NUMBER", "Number of times from 0 on. Default 41.");

@@ -41,7 +41,7 @@ internal static class CheatEvaluator
     {
         public Evaluation Copies(IReadOnlyList<Value> choices)
         {
-            Plan plan = Planner.Lay(Case.In(Setting.Protocol, choices), Case.PerfectHardware ? PerfectHardware.Of(Setting.World, Case.By) : Setting.World);
+            Plan plan = Planner.Lay(Setting.Protocol.Lists is null ? Case.In(Setting.Protocol, choices) : Case.Rounds(Setting.Protocol), Case.PerfectHardware ? PerfectHardware.Of(Setting.World, Case.By) : Setting.World);
             return Evaluator.Copies(Setting, plan, State, Inputs, Engine, Request);
         }
 
@@ -74,6 +74,8 @@ internal static class CheatEvaluator
 
     private static Outcome<CheatEvaluation> OnLists(Cheating cheating)
     {
+        if (cheating.Case.ChoosesInRounds)
+            return Outcome<CheatEvaluation>.Failed([JudgementMessages.SearchRefused(cheating.Case.Name, "a number is used in a round, before there are lists; make a case for each of its values.")]);
         Evaluation copies = cheating.Copies([]);
         if (!(copies.Yield > 0))
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.NothingKept($"case \"{cheating.Case.Name}\"")]);

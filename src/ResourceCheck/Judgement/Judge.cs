@@ -30,6 +30,9 @@ public static class Judge
     /// <summary>Evaluates a protocol at every point of a grid of one or two varied values.</summary>
     public static Outcome<SweepResult> Sweep(SweepRequest request) => SweepJudgement.Of(request);
 
+    /// <summary>Finds the least number of copies that holds targets of failure and harm.</summary>
+    public static Outcome<CopiesResult> Copies(CopiesRequest request) => CopiesJudgement.Of(request);
+
     /// <summary>Finds the values at which a goal is just met.</summary>
     public static Outcome<ToleranceResult> Tolerance(ToleranceRequest request) => ToleranceJudgement.Of(request);
 

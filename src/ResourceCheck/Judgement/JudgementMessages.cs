@@ -82,7 +82,7 @@ internal static class JudgementMessages
         Place.Of("storage"));
 
     public static Diagnostic TooManyToRelax(int emitters, int most) => new(
-        "E010",
+        "E017",
         Severity.Error,
         $"Relaxation of {emitters} emitters starts from {emitters}^{emitters} amplitudes, {FigureText.Bytes(16 * Math.Pow(emitters, emitters))} of them: up to {most} emitters fit here.",
         "ask for fewer emitters",
@@ -111,6 +111,13 @@ internal static class JudgementMessages
         "This interception stands in a conditional block that asks for more than the outsider knows while qudits fly: only the outsider's own values and lines fit in such a block.",
         "let the condition use the outsider's own picks alone, and take other lines out of the block",
         at);
+
+    public static Diagnostic CentralValues(IReadOnlyList<Conditions.UncertainQuantity> uncertain) => new(
+        "P033",
+        Severity.Note,
+        $"{Words.And(uncertain.Select(u => $"`{u.Path}`"))} {(uncertain.Count == 1 ? "carries an uncertainty" : "carry uncertainties")}: figures are of the central values, and no uncertainty is carried through to them.",
+        null,
+        Place.Of("conditions"));
 
     public static Diagnostic FigureOfDiscussion(Place at) => new(
         "P030",

@@ -16,6 +16,14 @@ internal static class RunJudgement
         if (findings.Any(f => f.Severity == Severity.Error))
             return Outcome<RunResult>.Failed([.. findings.Distinct()]);
         RunResult result = Conclude(setup with { Notes = [.. setup.Notes, .. findings.Distinct()] }, all);
+        if (setup.Request.Drift is { } drift)
+        {
+            Outcome<DriftResult> drifted = DriftJudgement.Of(setup.Request, drift, result.Cases);
+            if (drifted.Value is null)
+                return Outcome<RunResult>.Failed(drifted.Findings);
+            result = result with { Drift = drifted.Value };
+        }
+
         return new Outcome<RunResult>(result, result.Warnings);
     }
 
@@ -85,7 +93,7 @@ internal static class RunJudgement
         }
     }
 
-    private static (int Copies, double? Seconds)? ListOf(Setting setting, YieldResult yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
+    internal static (int Copies, double? Seconds)? ListOf(Setting setting, YieldResult yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
         : (copies, SecondsPerKeptCopy(setting, yield) is { } each ? (copies * each) + setting.Plan.Duration.Seconds : null);
 
     /// <summary>Preparation and use of copies overlap, so the slower of the two sets the pace.</summary>

@@ -27,9 +27,17 @@ public sealed record RunRequest
     /// <summary>Stops the evaluation.</summary>
     public CancellationToken Cancellation { get; init; }
 
+    /// <summary>A fraction of runs that are under worse conditions without anybody noticing; null for none.</summary>
+    public Drift? Drift { get; init; }
+
     /// <summary>Most memory an engine may take, bytes; null uses what the machine has free.</summary>
     public double? MemoryLimit { get; init; }
 }
+
+/// <summary>A drift of the apparatus.</summary>
+/// <param name="Fraction">Fraction of runs.</param>
+/// <param name="Conditions">Conditions of these runs.</param>
+public sealed record Drift(double Fraction, InputText Conditions);
 
 /// <summary>An input file as read.</summary>
 /// <param name="Name">Name as the user gave it.</param>

@@ -46,6 +46,9 @@ public sealed record RunResult
     /// <summary>Copies kept for one use of a list protocol, with the time until they are; null for a protocol on single copies or without a preparation rate.</summary>
     public (int Copies, double? Seconds)? List { get; init; }
 
+    /// <summary>What a drift does to failure and harms; null when none was asked for.</summary>
+    public DriftResult? Drift { get; init; }
+
     /// <summary>Checkpoints in order.</summary>
     public required IReadOnlyList<CheckpointResult> Checkpoints { get; init; }
 
@@ -110,6 +113,19 @@ public sealed record MetricResult(string Name, Estimate Estimate, double? Ideal,
 /// <param name="Average">Average harm of a cheat that picks after it has seen its own list; null where it has no list or no choice, or where it was not evaluated.</param>
 /// <param name="Method">How numbers and harm were found.</param>
 public sealed record AttackResult(string Case, string? At, IReadOnlyList<KeyValuePair<string, string>> Choices, Estimate Value, Estimate? Average, string Method);
+
+/// <summary>Failure and harms when a fraction of runs is under worse conditions.</summary>
+/// <param name="Fraction">The fraction.</param>
+/// <param name="Conditions">The worse conditions.</param>
+/// <param name="Figures">Case and figure, with the whole and the part that the drift alone gives: no number of copies brings the whole below that.</param>
+public sealed record DriftResult(double Fraction, InputFile Conditions, IReadOnlyList<DriftFigure> Figures);
+
+/// <summary>One figure under drift.</summary>
+/// <param name="Case"><c>honest</c> or the name of a dishonest block.</param>
+/// <param name="Name"><c>failure</c> or <c>harm</c>.</param>
+/// <param name="Whole">(1 - fraction) · figure + fraction · figure under the worse conditions.</param>
+/// <param name="Floor">fraction · figure under the worse conditions.</param>
+public sealed record DriftFigure(string Case, string Name, Estimate Whole, Estimate Floor);
 
 /// <summary>Fidelity at a checkpoint.</summary>
 /// <param name="Name">Its label.</param>

@@ -40,9 +40,25 @@ internal static class VerifyJudgement
         if (setting.Protocol.Requirements.FirstOrDefault(r => !r.Holds) is { } broken)
             return setting.Protocol.Claims.Select(c => Undone(c, setting, ClaimVerdict.OutsideRequirements, $"the script requires {broken.Text}: {broken.Reason}"));
         Outcome<IReadOnlyList<Evaluation>> outcome = Evaluator.Evaluate(setting.Idealised(), request);
-        return outcome.Value is { } evaluations
-            ? setting.Protocol.Claims.Select((c, i) => Worst(c, i, setting, evaluations))
-            : setting.Protocol.Claims.Select(c => Undone(c, setting, ClaimVerdict.NotVerified, outcome.Findings[0].Message));
+        if (outcome.Value is { } evaluations)
+        {
+            IReadOnlyList<CheatEvaluation> cheats = setting.Protocol.Claims.Any(c => Harmed(c) is not null) ? Evaluator.Cheats(setting.Idealised(), evaluations, request).Value ?? [] : [];
+            return [.. setting.Protocol.Claims.Select((c, i) => Harmed(c) is { } name && cheats.Any(e => e.Case.Name == name) ? OnHarm(c, setting, name, cheats) : Worst(c, i, setting, evaluations))];
+        }
+
+        return setting.Protocol.Claims.Select(c => Undone(c, setting, ClaimVerdict.NotVerified, outcome.Findings[0].Message));
+    }
+
+    /// <summary>The case whose harm a claim compares with a number; null for other claims.</summary>
+    private static string? Harmed(Claim claim) => claim is { Left: MetricFigure { Metric: { Kind: MetricKind.Harm } metric }, Right: NumberFigure } ? metric.Label : null;
+
+    private static ClaimResult OnHarm(Claim claim, Setting setting, string name, IReadOnlyList<CheatEvaluation> cheats)
+    {
+        Estimate harm = cheats.Where(c => c.Case.Name == name).Select(c => c.Harm).MaxBy(h => h.Value)!;
+        double right = ((NumberFigure)claim.Right).Value;
+        ClaimVerdict verdict = Decide(claim.Comparison, harm, Estimate.Exact(right));
+        string? reason = verdict == ClaimVerdict.NotVerified ? "the harm is known only as a bound that does not decide it" : null;
+        return new ClaimResult(claim.Text, setting.Words, verdict, harm.Value, right, [], reason) { Label = harm.Label };
     }
 
     private static ClaimResult Undone(Claim claim, Setting setting, ClaimVerdict verdict, string reason) =>
@@ -61,7 +77,7 @@ internal static class VerifyJudgement
         ClaimVerdict verdict = Decide(claim.Comparison, left, right);
         IReadOnlyList<BranchEvaluation> breaking = verdict == ClaimVerdict.Refuted ? Breaking.Of(claim, setting.Protocol, evaluation, BreakingTold) : [];
         string? reason = verdict == ClaimVerdict.NotVerified ? "a side of the claim is undefined or known only as a bound that does not decide it" : null;
-        return new ClaimResult(claim.Text, parameters, verdict, left.Value, right.Value, breaking, reason);
+        return new ClaimResult(claim.Text, parameters, verdict, left.Value, right.Value, breaking, reason) { Label = left.Label == TruthLabel.Exact ? right.Label : left.Label };
     }
 
     /// <summary>A bound decides a claim only when it lies on the right side.</summary>

@@ -22,7 +22,11 @@ public sealed record VerifyResult(
 /// <param name="Breaking">Outcomes that break it with their probability, most probable first; empty unless refuted.</param>
 /// <param name="Reason">Why it was not verified, in words; null otherwise.</param>
 public sealed record ClaimResult(
-    string Text, string Parameters, ClaimVerdict Verdict, double? Left, double? Right, IReadOnlyList<BranchEvaluation> Breaking, string? Reason);
+    string Text, string Parameters, ClaimVerdict Verdict, double? Left, double? Right, IReadOnlyList<BranchEvaluation> Breaking, string? Reason)
+{
+    /// <summary>The weaker label of the two sides.</summary>
+    public TruthLabel Label { get; init; } = TruthLabel.Exact;
+}
 
 /// <summary>What became of a claim.</summary>
 public enum ClaimVerdict

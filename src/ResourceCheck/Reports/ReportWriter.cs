@@ -47,6 +47,10 @@ public static class ReportWriter
     public static void Write(ToleranceResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
         Write(format, writer, colour, () => ToleranceReport.From(result), () => ToleranceDocument.Write(result, writer));
 
+    /// <summary>Writes the result of <c>copies</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(CopiesResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => CopiesReport.From(result), () => CopiesDocument.Write(result, writer));
+
     private static void Write(ReportFormat format, TextWriter writer, bool colour, Func<Report> build, Action writeDocument)
     {
         switch (format)

@@ -21,6 +21,10 @@ internal static class RunDocument
         JsonParts.Objects(json, "cases", run.Cases, c => Case(json, c));
         JsonParts.Objects(json, "attacks", run.Attacks, a => Attack(json, a));
         json.WriteString("listMethod", run.ListMethod);
+        if (run.Drift is { } drift)
+            JsonParts.Object(json, "drift", () => Drift(json, drift));
+        else
+            json.WriteNull("drift");
         JsonParts.Objects(json, "checkpoints", run.Checkpoints, c => Checkpoint(json, c));
         JsonParts.Object(json, "yield", () => Yield(json, run.Yield));
         JsonParts.Object(json, "copies", () =>
@@ -59,7 +63,7 @@ internal static class RunDocument
         JsonParts.Objects(json, "metrics", of.Metrics, m => Metric(json, m));
     }
 
-    private static void Attack(Utf8JsonWriter json, AttackResult attack)
+    internal static void Attack(Utf8JsonWriter json, AttackResult attack)
     {
         json.WriteString("case", attack.Case);
         json.WriteString("at", attack.At);
@@ -74,6 +78,20 @@ internal static class RunDocument
         else
             json.WriteNull("average");
         json.WriteString("method", attack.Method);
+    }
+
+    private static void Drift(Utf8JsonWriter json, DriftResult drift)
+    {
+        JsonParts.Number(json, "fraction", drift.Fraction);
+        json.WriteString("conditions", drift.Conditions.Name);
+        json.WriteString("sha256", drift.Conditions.Sha256);
+        JsonParts.Objects(json, "figures", drift.Figures, f =>
+        {
+            json.WriteString("case", f.Case);
+            json.WriteString("name", f.Name);
+            JsonParts.Object(json, "whole", () => JsonParts.EstimateFields(json, f.Whole));
+            JsonParts.Object(json, "floor", () => JsonParts.EstimateFields(json, f.Floor));
+        });
     }
 
     private static void Metric(Utf8JsonWriter json, MetricResult metric)

@@ -21,7 +21,8 @@ internal static class RunReport
             [
                 new Section(null, Short(figures, run), Remarks(run)),
                 .. Goals(run),
-                .. Attacks(run),
+                .. Attacks(run.Attacks, a => Noticed(run, a), run.List is not null),
+                .. Drift(run),
                 .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
                 .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
             ],
@@ -118,11 +119,20 @@ internal static class RunReport
             Headed: false), []),
     ];
 
-    private static Section[] Attacks(RunResult run) => run.Attacks.Count == 0 ? [] :
+    private static Section[] Drift(RunResult run) => run.Drift is not { } drift ? [] :
+    [
+        new Section($"With {Quantities.FigureText.Number(100 * drift.Fraction)} % of runs under {drift.Conditions.Name}", new Table(
+            [new("case", "Case"), new("figure", "Figure"), new("whole", "Value"), new("floor", "Floor"), new("label", "Label")],
+            [.. drift.Figures.Select(f => (IReadOnlyList<Cell>)[Cell.Of(f.Case), Cell.Of(f.Name), Truth.CellOf(f.Whole), Truth.CellOf(f.Floor), Cell.Of(Truth.Describe(f.Whole))])]),
+            ["The floor is what the drifting runs alone give: nothing that improves the others brings the value below it."]),
+    ];
+
+    /// <summary>The worst of the listed strategies, with what is supposed.</summary>
+    internal static Section[] Attacks(IReadOnlyList<AttackResult> attacks, Func<AttackResult, string> noticed, bool ofLists) => attacks.Count == 0 ? [] :
     [
         new Section("Worst of the listed strategies", new Table(
             [new("case", "Case"), new("at", "At"), new("choices", "Choices"), new("harm", "Harm"), new("label", "Label"), new("average", "On average"), new("averageLabel", "Label")],
-            [.. run.Attacks.Select(a => (IReadOnlyList<Cell>)
+            [.. attacks.Select(a => (IReadOnlyList<Cell>)
             [
                 Cell.Of(a.Case),
                 Cell.Of(a.At),
@@ -131,7 +141,7 @@ internal static class RunReport
                 Cell.Of(Truth.Describe(a.Value)),
                 a.Average is { } average ? Truth.CellOf(average) : Cell.Empty,
                 Cell.Of(a.Average is { } known ? Truth.Describe(known) : null),
-            ])]), [.. run.Attacks.Select(a => $"{a.Case}: {a.Method}{Noticed(run, a)}."), .. Assumptions(run)]),
+            ])]), [.. attacks.Select(a => $"{a.Case}: {a.Method}{noticed(a)}."), .. Assumptions(ofLists && attacks.Any(a => a.Choices.Count > 0))]),
     ];
 
     /// <summary>What others see of a cheat on single copies.</summary>
@@ -143,9 +153,9 @@ internal static class RunReport
     }
 
     // What the harms say and what they leave open, said wherever they are shown.
-    private static IEnumerable<string> Assumptions(RunResult run)
+    private static IEnumerable<string> Assumptions(bool conditional)
     {
-        if (run.List is not null && run.Attacks.Any(a => a.Choices.Count > 0))
+        if (conditional)
         {
             yield return "Harm at chosen numbers supposes that the cheat's own list holds enough positions for them, so it bounds what these numbers achieve; "
                 + "the average is of a cheat that looks at its own list first, so the best such cheat does at least that.";

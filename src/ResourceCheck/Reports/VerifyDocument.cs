@@ -22,7 +22,7 @@ internal static class VerifyDocument
         json.WriteString("verdict", VerifyReport.Name(claim.Verdict));
         JsonParts.Number(json, "left", claim.Left);
         JsonParts.Number(json, "right", claim.Right);
-        json.WriteString("label", claim.Left is null && claim.Right is null ? null : "exact");
+        json.WriteString("label", claim.Left is null && claim.Right is null ? null : Truth.Name(claim.Label));
         JsonParts.Branches(json, "breaking", claim.Breaking);
         json.WriteString("reason", claim.Reason);
     }

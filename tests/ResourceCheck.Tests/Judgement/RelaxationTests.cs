@@ -91,7 +91,7 @@ public sealed class RelaxationTests
 
     [Theory]
     [InlineData("{}", 3, "C068")]
-    [InlineData("""{ "resource": { "relaxed": { "shape": "point", "linewidth": "6 MHz", "start": "excited", "time": "50 ns" } } }""", 9, "E010")]
+    [InlineData("""{ "resource": { "relaxed": { "shape": "point", "linewidth": "6 MHz", "start": "excited", "time": "50 ns" } } }""", 9, "E017")]
     [InlineData("""{ "resource": { "relaxed": { "shape": "point", "linewidth": "6 MHz", "start": { "levels": [0, 0] }, "time": "50 ns" } } }""", 3, "C061")]
     public void What_cannot_be_followed_is_one_clear_error(string conditions, int emitters, string code)
     {

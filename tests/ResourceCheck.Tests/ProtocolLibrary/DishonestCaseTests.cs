@@ -68,6 +68,42 @@ public sealed class DishonestCaseTests
         Assert.Equal(0.10465065169, Metric(run, "receiver forges", "harm"), 1e-10);
     }
 
+    /// <summary>Harms of the leader draw are 1/n and (n-1)/n, exactly; a claim on one is decided, and run does not stumble over it.</summary>
+    [Fact]
+    public void A_claim_on_a_harm_is_decided()
+    {
+        string script = ProtocolLibraryTests.Text("leader-draw.protocol").Replace("goal success", "claim harm \"P[1] denies that it leads\" <= 0.25\nclaim harm \"P[1] claims to lead\" <= 0.7\ngoal success", StringComparison.Ordinal);
+        RunRequest request = new() { Script = new InputText("p.protocol", script, "") };
+        ClaimResult[] claims = [.. Value(Judge.Verify(request)).Claims.Where(c => c.Text.StartsWith("harm", StringComparison.Ordinal))];
+        Assert.Equal([(ClaimVerdict.Proved, 0.25), (ClaimVerdict.Refuted, 0.75)], claims.Select(c => (c.Verdict, Math.Round(c.Left!.Value, 12))));
+        Assert.True(Judge.Run(request).Succeeded);
+    }
+
+    /// <summary>One run in a hundred with every outcome random: its draws have one leader in 4 · 27/256 of the cases, and none of the three others leads in (3/4)³.</summary>
+    [Fact]
+    public void A_drift_puts_a_floor_under_failure_and_harms()
+    {
+        RunRequest request = ProtocolLibraryTests.Request("leader-draw.protocol", conditions: false, parameters: false);
+        DriftResult drift = Value(Judge.Run(request with { Drift = new Drift(0.01, new InputText("worse.json", """{ "flight": { "depolarising": 1 } }""", "")) })).Drift!;
+        DriftFigure honest = drift.Figures[0], denies = drift.Figures[1];
+        double failure = 1 - (4 * 27.0 / 256);
+        Assert.Equal((0.01 * failure, 0.01 * failure), (honest.Floor.Value, honest.Whole.Value), (a, b) => Math.Abs(a.Item1 - b.Item1) + Math.Abs(a.Item2 - b.Item2) < 1e-12);
+        Assert.Equal(("P[1] denies that it leads", "harm"), (denies.Case, denies.Name));
+        Assert.Equal(0.01 * 27 / 64, denies.Floor.Value, 1e-12);
+        Assert.Equal((0.99 * 0.25) + (0.01 * 27 / 64), denies.Whole.Value, 1e-12);
+    }
+
+    /// <summary>A harm that speaks of a chosen number, and a number chosen before there are lists.</summary>
+    [Fact]
+    public void Choices_in_harms_and_in_rounds_are_handled()
+    {
+        const string lists = "protocol \"p\"\nparties A, B, C\nresource antisymmetric on all\ncopies 20\nround \"r\"\n  all measure level as v\nend\ndiscussion \"d\"\n  A sets J to where(v = 0)\n  A sends J to B\nend\nsuccess when size(B.J) > 0\n"
+            + "dishonest \"part\" by A\n  choose k in 1..5\n  instead of \"d\"\n    A sends some(k of where(v = 0)) as J to B\n  end\n  harm when size(B.J) = k\nend\n";
+        Assert.Equal(1, Metric(Value(Judge.Run(new RunRequest { Script = new InputText("p.protocol", lists, "") })), "part", "harm"), 1e-12);
+        string early = lists.Replace("instead of \"d\"", "instead of \"r\"\n    A measures (if k = 1 then fourier else level) as v\n  end\n  instead of \"d\"", StringComparison.Ordinal);
+        Assert.Equal(["E008"], Judge.Run(new RunRequest { Script = new InputText("p.protocol", early, "") }).Findings.Select(f => f.Code));
+    }
+
     private static double Metric(RunResult run, string name, string metric) => run.Cases.Single(c => c.Case == name).Metrics.Single(m => m.Name == metric).Estimate.Value;
 
     private static RunResult Run(string script, params (string Name, string Value)[] parameters) => Value(Judge.Run(

@@ -15,7 +15,7 @@ public sealed class GoldenReportTests
         [ReportFormat.Markdown] = "md",
     };
 
-    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance"];
+    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies"];
 
     public static TheoryData<string, ReportFormat> All()
     {
@@ -97,6 +97,9 @@ public sealed class GoldenReportTests
                 break;
             case "sweep":
                 ReportWriter.Write(Samples.Sweep, format, writer);
+                break;
+            case "copies":
+                ReportWriter.Write(Samples.Copies, format, writer);
                 break;
             case "tolerance":
                 ReportWriter.Write(Samples.Tolerance, format, writer);

@@ -222,6 +222,25 @@ internal static class Samples
         Warnings = [],
     };
 
+    /// <summary>Copies with harms.</summary>
+    public static CopiesResult Copies { get; } = new()
+    {
+        Version = "0.1.0",
+        Protocol = Script,
+        Title = "Detectable broadcast",
+        Conditions = new("winter.conditions.json", Hash),
+        Overrides = [],
+        Thresholds = [new("a", "1/4"), new("b", "3/40")],
+        Parameter = "M",
+        Targets = (0.01, 0.05),
+        Copies = 548,
+        CheckedUpTo = 575,
+        Steps = [new(541, Estimate.Exact(2.6e-5), Estimate.AtMost(0.05212)), new(548, Estimate.Exact(1.94e-5), null)],
+        Attacks = [new("sender splits", "x = 0", [new("n", "137"), new("k1", "0")], Estimate.AtMost(0.04994), Estimate.AtLeast(0.031), "a search")],
+        Seconds = 1.25,
+        Warnings = [Warning],
+    };
+
     /// <summary>A curve that is crossed twice.</summary>
     public static ToleranceResult Tolerance { get; } = new()
     {

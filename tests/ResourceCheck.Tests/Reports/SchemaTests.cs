@@ -19,6 +19,7 @@ public sealed class SchemaTests
     [InlineData("budget", "budget")]
     [InlineData("sweep", "sweep")]
     [InlineData("tolerance", "tolerance")]
+    [InlineData("copies", "copies")]
     public async Task Documents_fit_their_published_schema(string name, string schema)
     {
         JsonSchema published = await JsonSchema.FromJsonAsync(Schemas.Find(schema)!, TestContext.Current.CancellationToken);

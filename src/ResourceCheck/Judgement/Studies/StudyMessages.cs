@@ -1,4 +1,5 @@
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Quantities;
 
 namespace ResourceCheck.Judgement.Studies;
 
@@ -39,6 +40,17 @@ internal static class StudyMessages
 
     public static Diagnostic UndefinedGoal(string path, string value) => Wrong(
         "J011", path, $"The goal's figure is not defined at {path} = {value}.", "choose a range in which it is");
+
+    public static Diagnostic NoCopiesParameter() => new(
+        "J012", Severity.Error, "The number of copies cannot be varied: a `copies` line with a parameter, as in `copies M`, fits here.", "declare `parameter M = 150 in 12..1000000` and write `copies M`", Place.Of("script"));
+
+    public static Diagnostic NotReached(string parameter, CopiesStep last, CopiesRequest request) => new(
+        "E010",
+        Severity.Error,
+        $"No number of copies up to {last.Copies} holds the targets: at {parameter} = {last.Copies} honest failure is {FigureText.Number(last.Failure.Value)}, the target {FigureText.Number(request.Failure)}"
+            + (last.Harm is { } harm ? $", the worst harm {FigureText.Number(harm.Value)}, the target {FigureText.Number(request.Harm)}." : "."),
+        "choose other thresholds with --parameter, lower the noise, or ask for less",
+        Place.Of("copies"));
 
     private static Diagnostic Wrong(string code, string path, string message, string cure) => new(code, Severity.Error, message, cure, Place.Of(path.Length == 0 ? "--vary" : $"--vary {path}"));
 }

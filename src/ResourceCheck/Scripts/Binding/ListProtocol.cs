@@ -47,6 +47,16 @@ public sealed record DishonestCase(
         ArgumentNullException.ThrowIfNull(honest);
         return honest with { Steps = [.. CopySteps.Select(s => StepWalk.Put(s, choices))], Harm = BoundWalk.Put(Harm, choices), Success = Success is { } success ? BoundWalk.Put(success, choices) : honest.Success };
     }
+
+    /// <summary>The rounds of a list protocol under the strategy, whose numbers are chosen later.</summary>
+    public Protocol Rounds(Protocol honest)
+    {
+        ArgumentNullException.ThrowIfNull(honest);
+        return honest with { Steps = CopySteps };
+    }
+
+    /// <summary>Whether a number is chosen before the lists are known.</summary>
+    public bool ChoosesInRounds => CopySteps.SelectMany(StepWalk.Expressions).SelectMany(BoundWalk.Within).Any(e => e is BoundChoice);
 }
 
 /// <summary>A number left to the cheat; its range may depend on what the cheat holds when it is used.</summary>

@@ -1,0 +1,56 @@
+using ResourceCheck.Conditions;
+using ResourceCheck.Diagnostics;
+using ResourceCheck.Engines;
+using ResourceCheck.Judgement;
+using ResourceCheck.Judgement.Studies;
+using ResourceCheck.Tests.ProtocolLibrary;
+using Xunit;
+
+namespace ResourceCheck.Tests.Judgement;
+
+/// <summary>Numbers of copies that a failure probability costs.</summary>
+public sealed class CopiesTests
+{
+    /// <summary>Runs at neighbouring numbers say the same: the one below fails the target, all of the margin hold it.</summary>
+    [Fact]
+    public void Honest_failure_holds_from_the_number_found_and_not_below()
+    {
+        CopiesResult found = Value(Judge.Copies(new CopiesRequest(Broadcast(), 0.02, 1, null)));
+        Assert.True(Failure(found.Copies - 1) > 0.02);
+        Assert.All(Enumerable.Range(found.Copies, found.CheckedUpTo - found.Copies + 1), copies => Assert.True(Failure(copies) <= 0.02));
+        Assert.Empty(found.Attacks);
+    }
+
+    [Fact]
+    public void Harms_count_and_come_with_the_strategy()
+    {
+        CopiesResult found = Value(Judge.Copies(new CopiesRequest(Broadcast(), 0.1, 0.2, null)));
+        Assert.All(found.Attacks, a => Assert.True(a.Value.High <= 0.2));
+        Assert.Equal(["sender splits", "receiver forges"], found.Attacks.Select(a => a.Case));
+        Assert.Contains(found.Steps, s => s.Copies == found.Copies && s.Harm is { Label: TruthLabel.Bound });
+    }
+
+    [Fact]
+    public void What_cannot_be_had_is_told_with_its_figures()
+    {
+        Outcome<CopiesResult> noisy = Judge.Copies(new CopiesRequest(Broadcast() with { Overrides = [new("flight.depolarising", "0.3")], Parameters = [new("M", "12")] }, 1e-3, 1, null));
+        Assert.Equal(["E010"], noisy.Findings.Select(f => f.Code));
+        Outcome<CopiesResult> single = Judge.Copies(new CopiesRequest(ProtocolLibraryTests.Request("removal.protocol", conditions: false), 1e-3, 1, null));
+        Assert.Equal(["J012"], single.Findings.Select(f => f.Code));
+    }
+
+    private static double Failure(int copies)
+    {
+        RunRequest request = Broadcast() with { Script = Broadcast().Script with { Text = Broadcast().Script.Text.Split("\ndishonest")[0].Replace("goal harm", "# goal harm", StringComparison.Ordinal) }, Parameters = [new("M", $"{copies}")] };
+        return Value(Judge.Run(request)).Cases[0].Metrics.Single(m => m.Name == "failure").Estimate.Value;
+    }
+
+    private static RunRequest Broadcast() => ProtocolLibraryTests.Request("detectable-broadcast.protocol", conditions: false, parameters: false);
+
+    private static T Value<T>(Outcome<T> outcome)
+        where T : class
+    {
+        Assert.True(outcome.Succeeded, string.Join("\n\n", outcome.Findings));
+        return outcome.Value!;
+    }
+}
