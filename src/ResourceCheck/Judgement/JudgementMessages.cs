@@ -81,6 +81,13 @@ internal static class JudgementMessages
         $"lower the number of parties, or look at storage alone: `resourcecheck storage FILE --parties {parties}`, exact for up to {PhotonFreeStorage.MostEmitters} emitters, with and without heralding",
         Place.Of("storage"));
 
+    public static Diagnostic TooLongToIntegrate(string section, double work) => new(
+        "E018",
+        Severity.Error,
+        $"Integrating `{section}` would take about {FigureText.Number(work)} multiplications, hours on one core: up to {FigureText.Number(EvolutionCost.Most)} fit here. Exchange shifts grow as the inverse cube of the spacing.",
+        "move the emitters apart, shorten the time, or take the shape `point`, the limit without exchange shifts",
+        Place.Of(section));
+
     public static Diagnostic TooManyToRelax(int emitters, int most) => new(
         "E017",
         Severity.Error,
