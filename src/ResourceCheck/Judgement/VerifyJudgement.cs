@@ -76,9 +76,13 @@ internal static class VerifyJudgement
         string parameters = new Evaluated(setting, evaluation, evaluation).At;
         ClaimVerdict verdict = Decide(claim.Comparison, left, right);
         IReadOnlyList<BranchEvaluation> breaking = verdict == ClaimVerdict.Refuted ? Breaking.Of(claim, setting.Protocol, evaluation, BreakingTold) : [];
-        string? reason = verdict == ClaimVerdict.NotVerified ? "a side of the claim is undefined or known only as a bound that does not decide it" : null;
+        string? reason = verdict == ClaimVerdict.NotVerified ? Reason(left, right) : null;
         return new ClaimResult(claim.Text, parameters, verdict, left.Value, right.Value, breaking, reason) { Label = left.Label == TruthLabel.Exact ? right.Label : left.Label };
     }
+
+    private static string Reason(Estimate left, Estimate right) => double.IsNaN(left.Value) || double.IsNaN(right.Value)
+        ? "a side is undefined: its checkpoint is never reached, its condition never holds, or it divides by zero"
+        : "a side is known only as a bound that does not decide the claim";
 
     /// <summary>A bound decides a claim only when it lies on the right side.</summary>
     private static ClaimVerdict Decide(BinaryOperator comparison, Estimate left, Estimate right)

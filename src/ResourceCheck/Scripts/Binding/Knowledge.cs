@@ -1,3 +1,6 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using System.Text;
 using ResourceCheck.Judgement;
 using ResourceCheck.Scripts.Syntax;
 
@@ -18,9 +21,9 @@ internal static class Knowledge
                 groups.Add((step.Span, [step]));
         }
 
-        IEnumerable<KnowledgeLine> inputs = protocol.Inputs.Select(i => Line(protocol, protocol.Slots[i.Slot].Span, $"{protocol.Parties[i.Party]} knows {i.Name}"));
-        IEnumerable<KnowledgeLine> steps = groups.Select(g => (g.Span, Text: Learned(protocol, g.Steps))).Where(g => g.Text.Length > 0)
-            .Select(g => Line(protocol, g.Span, g.Text));
+        IEnumerable<KnowledgeLine> inputs = protocol.Inputs.Select(i => Line(protocol, protocol.Slots[i.Slot].Span, ImmutableDictionary<string, int>.Empty, $"{protocol.Parties[i.Party]} knows {i.Name}"));
+        IEnumerable<KnowledgeLine> steps = groups.Select(g => (g.Span, g.Steps[0].Counters, Text: Learned(protocol, g.Steps))).Where(g => g.Text.Length > 0)
+            .Select(g => Line(protocol, g.Span, g.Counters, g.Text));
         return [.. inputs, .. steps];
     }
 
@@ -67,13 +70,33 @@ internal static class Knowledge
         _ => -1,
     };
 
-    private static KnowledgeLine Line(Protocol protocol, Span span, string learned)
+    private static KnowledgeLine Line(Protocol protocol, Span span, IReadOnlyDictionary<string, int> counters, string learned)
     {
         string line = protocol.Source.PlaceOf(span).LineText ?? "";
         bool quoted = false;
         int end = 0;
         while (end < line.Length && (quoted || line[end] != '#'))
             quoted ^= line[end++] == '"';
-        return new KnowledgeLine(protocol.Source.LineOf(span.Start), line[..end].Trim(), learned);
+        return new KnowledgeLine(protocol.Source.LineOf(span.Start), Filled(line[..end].Trim(), counters), learned);
+    }
+
+    /// <summary>A line as it stands in one turn: counters, which no other name may be called, give way to their values.</summary>
+    private static string Filled(string line, IReadOnlyDictionary<string, int> counters)
+    {
+        StringBuilder filled = new();
+        bool quoted = false;
+        for (int at = 0, end; at < line.Length; at = end)
+        {
+            end = at + 1;
+            while (IsPart(line[at]) && end < line.Length && IsPart(line[end]))
+                end++;
+            string word = line[at..end];
+            quoted ^= word == "\"";
+            filled.Append(!quoted && counters.TryGetValue(word, out int value) ? value.ToString(CultureInfo.InvariantCulture) : word);
+        }
+
+        return filled.ToString();
+
+        static bool IsPart(char c) => char.IsLetterOrDigit(c) || c == '_';
     }
 }
