@@ -23,7 +23,7 @@ internal static class Evaluator
             return Outcome<EngineChoice>.Failed([JudgementMessages.CollectiveTooLarge(setting.Protocol.Levels, RelaxedPrepared.MostParties)]);
         EngineChoice choice = DenseEngine.Estimate(setting.Plan, Reason(setting, request));
         double limit = Math.Min(request.MemoryLimit ?? (GC.GetGCMemoryInfo().TotalAvailableMemoryBytes * UsableMemory), DenseEngine.LargestMemory);
-        return choice.MemoryBytes > limit ? Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit, request.MemoryLimit is not null)]) : Outcome<EngineChoice>.Of(choice);
+        return choice.MemoryBytes > limit ? Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit, request.MemoryLimit is not null, setting.Plan.NeedsSink)]) : Outcome<EngineChoice>.Of(choice);
     }
 
     /// <summary>Evaluates a setting for all private inputs.</summary>

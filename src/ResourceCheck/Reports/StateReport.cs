@@ -35,7 +35,7 @@ internal static class StateReport
 
     private static string Mending(double by, bool isState) => by < NotMended
         ? "Nothing needed mending: the nearest density matrix is the one read."
-        : isState ? $"The file holds a state within round-off; mending moved it by a trace distance of no more than {FigureText.Number(by, Rounding.Up)}."
+        : isState ? $"The file holds a state within round-off; mending moved it by a trace distance of {FigureText.Number(by)}, which is of no account."
         : $"Mended to the nearest density matrix, a trace distance of {FigureText.Number(by)} away; nothing is certified from a mended state.";
 
     private static string Validity(StateDescription state) => state.IsVector

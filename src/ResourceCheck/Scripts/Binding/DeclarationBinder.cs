@@ -36,7 +36,7 @@ internal sealed class DeclarationBinder(BindContext context)
         if (_parties.Whole(statement.Count) is not { } copies)
             return 1;
         if (copies < 1)
-            context.Findings.Report(statement.Count.Span, BindingMessages.CopiesCount(Words.Number(copies)));
+            context.Findings.Report(statement.Count.Span, BindingMessages.CopiesCount(Written.Number(copies)));
         return Math.Max(1, copies);
     }
 
@@ -182,7 +182,7 @@ internal sealed class DeclarationBinder(BindContext context)
     };
 
     private string Figure(Expression expression) =>
-        new ExpressionBinder(context, new ConstantView(context)).Bind(expression).Constant is { } value ? Words.Write(value) : context.TextOf(expression.Span);
+        new ExpressionBinder(context, new ConstantView(context)).Bind(expression).Constant is { } value ? Written.Write(value) : context.TextOf(expression.Span);
 
     private static string Sign(BinaryOperator op) => op switch
     {

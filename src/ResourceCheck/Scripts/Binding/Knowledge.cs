@@ -1,6 +1,5 @@
+using ResourceCheck.Diagnostics;
 using System.Collections.Immutable;
-using System.Globalization;
-using System.Text;
 using ResourceCheck.Judgement;
 using ResourceCheck.Scripts.Syntax;
 
@@ -57,7 +56,7 @@ internal static class Knowledge
     private static string Sent(Protocol protocol, SendStep[] sent)
     {
         IReadOnlyList<int> recipients = sent[0].Recipients;
-        string values = Words.List(sent.Select(s => $"{protocol.Parties[s.Party]}.{protocol.Slots[s.Slot].Name}"));
+        string values = Words.And(sent.Select(s => $"{protocol.Parties[s.Party]}.{protocol.Slots[s.Slot].Name}"));
         return $"{string.Join(", ", recipients.Select(r => protocol.Parties[r]))} {Words.Verb(recipients.Count, "learns", "learn")} {values}";
     }
 
@@ -77,26 +76,6 @@ internal static class Knowledge
         int end = 0;
         while (end < line.Length && (quoted || line[end] != '#'))
             quoted ^= line[end++] == '"';
-        return new KnowledgeLine(protocol.Source.LineOf(span.Start), Filled(line[..end].Trim(), counters), learned);
-    }
-
-    /// <summary>A line as it stands in one turn: counters, which no other name may be called, give way to their values.</summary>
-    private static string Filled(string line, IReadOnlyDictionary<string, int> counters)
-    {
-        StringBuilder filled = new();
-        bool quoted = false;
-        for (int at = 0, end; at < line.Length; at = end)
-        {
-            end = at + 1;
-            while (IsPart(line[at]) && end < line.Length && IsPart(line[end]))
-                end++;
-            string word = line[at..end];
-            quoted ^= word == "\"";
-            filled.Append(!quoted && counters.TryGetValue(word, out int value) ? value.ToString(CultureInfo.InvariantCulture) : word);
-        }
-
-        return filled.ToString();
-
-        static bool IsPart(char c) => char.IsLetterOrDigit(c) || c == '_';
+        return new KnowledgeLine(protocol.Source.LineOf(span.Start), TurnText.Of(line[..end].Trim(), counters), learned);
     }
 }

@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -234,7 +235,7 @@ internal sealed class ConstantView(BindContext context) : NameView(context, new 
     public override Typed Bare(string name, Span span)
     {
         IEnumerable<string> known = Context.Parameters.Keys.Concat(Context.Counters.Keys);
-        Context.Findings.ReportName(name, span, BindingMessages.NotConstant(name, Words.Near(name, known), [.. known.Order()]));
+        Context.Findings.ReportName(name, span, BindingMessages.NotConstant(name, NearWords.Find(name, known), [.. known.Order()]));
         return Typed.Broken;
     }
 

@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using System.Numerics;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Syntax;
@@ -45,7 +46,7 @@ internal sealed class PartyResolver(BindContext context)
             return null;
         if (value is NumberValue { Number.IsWhole: true } number && BigInteger.Abs(number.Number.Numerator) <= int.MaxValue)
             return (int)number.Number.Numerator;
-        context.Findings.Report(expression.Span, BindingMessages.WholeNumberNeeded(Words.Write(value)));
+        context.Findings.Report(expression.Span, BindingMessages.WholeNumberNeeded(Written.Write(value)));
         return null;
     }
 
@@ -120,7 +121,7 @@ internal sealed class PartyResolver(BindContext context)
         return [];
     }
 
-    private string? NearParty(string name) => Words.Near(name, context.Parties.Names.Concat(context.Parties.Families.Keys));
+    private string? NearParty(string name) => NearWords.Find(name, context.Parties.Names.Concat(context.Parties.Families.Keys));
 
-    private string? NearFamily(string name) => Words.Near(name, context.Parties.Families.Keys);
+    private string? NearFamily(string name) => NearWords.Find(name, context.Parties.Families.Keys);
 }

@@ -145,7 +145,7 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
     {
         Typed typed = values.Expect(expression, ValueKind.Number);
         return typed.Constant is NumberValue { Number.IsWhole: false } number
-            ? values.Refuse(expression.Span, BindingMessages.WholeNumberNeeded(Words.Number(number.Number)))
+            ? values.Refuse(expression.Span, BindingMessages.WholeNumberNeeded(Written.Number(number.Number)))
             : typed;
     }
 
