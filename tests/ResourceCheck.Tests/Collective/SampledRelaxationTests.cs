@@ -16,7 +16,7 @@ public sealed class SampledRelaxationTests
     public void Copies_without_a_photon_are_those_of_the_density_operator(int[] levels)
     {
         Complex[] start = StartStates.Product(levels, 4);
-        IReadOnlyList<RelaxationFigures> expected = Relaxation.Follow(CollectiveCases.Uneven(4), StartStates.Operator(start), Times, photons: false).Figures;
+        IReadOnlyList<RelaxationFigures> expected = Relaxation.Follow(CollectiveCases.Uneven(4), StartStates.Operator(start), Times, photons: false, cancellation: TestContext.Current.CancellationToken).Figures;
         AssertClose(expected, new SampledRelaxation(CollectiveCases.Uneven(4), start).WithoutPhoton(Times));
     }
 
@@ -27,7 +27,7 @@ public sealed class SampledRelaxationTests
         Complex[] start = StartStates.Inverted(3, 3);
         SampledRelaxation relaxation = new(CollectiveCases.General, start);
         Assert.False(relaxation.NothingToSample);
-        IReadOnlyList<RelaxationFigures> all = Relaxation.Follow(CollectiveCases.General, StartStates.Operator(start), Times).Figures, quiet = relaxation.WithoutPhoton(Times);
+        IReadOnlyList<RelaxationFigures> all = Relaxation.Follow(CollectiveCases.General, StartStates.Operator(start), Times, cancellation: TestContext.Current.CancellationToken).Figures, quiet = relaxation.WithoutPhoton(Times);
         var rest = relaxation.WithPhotons(Times, Seed, 3000, 1 - 1e-9, TestContext.Current.CancellationToken);
         for (int i = 0; i < Times.Length; i++)
         {
@@ -46,7 +46,7 @@ public sealed class SampledRelaxationTests
         Complex[] start = StartStates.Pair([2, 3], 4);
         SampledRelaxation relaxation = new(CollectiveCases.Uneven(4), start);
         Assert.True(relaxation.NothingToSample);
-        IReadOnlyList<RelaxationFigures> all = Relaxation.Follow(CollectiveCases.Uneven(4), StartStates.Operator(start), Times).Figures, quiet = relaxation.WithoutPhoton(Times);
+        IReadOnlyList<RelaxationFigures> all = Relaxation.Follow(CollectiveCases.Uneven(4), StartStates.Operator(start), Times, cancellation: TestContext.Current.CancellationToken).Figures, quiet = relaxation.WithoutPhoton(Times);
         Assert.All(all.Zip(quiet), pair =>
         {
             Assert.Equal(pair.First.Population, pair.Second.Population, 1e-10);
