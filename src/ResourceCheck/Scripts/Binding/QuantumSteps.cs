@@ -54,7 +54,7 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
         Duration? time = Time(statement);
         foreach (PartyMention actor in actors.Idle(statement.Actors))
         {
-            if (context.Now.Qudits.TryGetValue(actor.Party, out QuditState qudit) && qudit.Phase == QuditPhase.Fresh)
+            if (context.Now.Qudit(actor.Party) is { Phase: QuditPhase.Fresh })
                 context.Now = context.Now.WithQudit(actor.Party, QuditPhase.Touched, statement.Span);
             if (time is { } duration)
                 steps.Add(new WaitStep(statement.Span, actor.Party, duration));
@@ -118,7 +118,7 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
 
         if (!actors.HoldsQudit(victim, "intercept"))
             return false;
-        QuditState qudit = context.Now.Qudits[victim.Party];
+        QuditState qudit = context.Now.Qudit(victim.Party)!;
         if (qudit.Phase == QuditPhase.Fresh)
             return true;
         context.Findings.Report(statement.Victim.Span, BindingMessages.InterceptTooLate(context.NameOf(victim.Party), context.LineOf(qudit.By)));
