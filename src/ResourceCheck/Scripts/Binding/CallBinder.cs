@@ -81,7 +81,7 @@ internal sealed class CallBinder(ExpressionBinder values)
     {
         if (function is not (ValueFunction.Distinct or ValueFunction.Same))
             return true;
-        if (arguments.FirstOrDefault(a => a.Kind == ValueKind.Set).Kind == ValueKind.Set)
+        if (arguments.Any(a => a.Kind == ValueKind.Set))
         {
             values.Refuse(call.Span, BindingMessages.SetsCompared(call.Function.Text));
             return false;

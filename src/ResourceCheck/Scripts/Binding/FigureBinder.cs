@@ -132,7 +132,7 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
     private Figure? Given(CallExpression e, ValueKind wanted, Func<BoundExpression, BoundExpression?, Figure> build)
     {
         Typed value = _values.Expect(e.Arguments[0], wanted);
-        Typed given = e.Second.Count == 0 ? default : _values.Expect(e.Second[0], ValueKind.Truth);
+        Typed given = e.Second.Count == 0 ? Typed.Broken : _values.Expect(e.Second[0], ValueKind.Truth);
         return value.Bound is null || (e.Second.Count > 0 && given.Bound is null) ? null : build(value.Bound, given.Bound);
     }
 
