@@ -14,7 +14,7 @@ internal static class RunReport
     private const int EmptyCells = 7;
 
     /// <summary>Branches closer than this are the same for anybody who would choose between them.</summary>
-    private const double SameFidelity = 1e-6;
+    private const double SameFidelity = 1e-4;
 
     /// <summary>Builds the report.</summary>
     public static Report From(RunResult run)
