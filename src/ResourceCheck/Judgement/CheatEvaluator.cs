@@ -45,7 +45,7 @@ internal static class CheatEvaluator
             return Evaluator.Copies(Setting, plan, State, Inputs, Engine, Request);
         }
 
-        public KeyValuePair<string, string>[] Named(IReadOnlyList<Value> choices) => [.. Case.Choices.Zip(choices, (c, v) => KeyValuePair.Create(c.Name, Scripts.Binding.Words.Write(v)))];
+        public KeyValuePair<string, string>[] Named(IReadOnlyList<Value> choices) => [.. Case.Choices.Zip(choices, (c, v) => KeyValuePair.Create(c.Name, Scripts.Binding.Written.Write(v)))];
     }
 
     private static Outcome<CheatEvaluation> OnCopies(Cheating cheating)

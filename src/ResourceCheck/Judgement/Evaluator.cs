@@ -26,7 +26,7 @@ internal static class Evaluator
         EngineChoice choice = DenseEngine.Estimate(setting.Plan, Reason(setting, request));
         double limit = Math.Min(request.MemoryLimit ?? (GC.GetGCMemoryInfo().TotalAvailableMemoryBytes * UsableMemory), DenseEngine.LargestMemory);
         if (choice.MemoryBytes > limit)
-            return Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit, request.MemoryLimit is not null)]);
+            return Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit, request.MemoryLimit is not null, setting.Plan.NeedsSink)]);
         return TooLong(setting.World) is { } tooLong ? Outcome<EngineChoice>.Failed([tooLong]) : Outcome<EngineChoice>.Of(choice);
     }
 

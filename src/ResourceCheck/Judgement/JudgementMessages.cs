@@ -47,11 +47,11 @@ internal static class JudgementMessages
     public static Diagnostic NotUnitary(Place at, string file, double defect) => new(
         "P013", Severity.Error, $"The matrix in {file} is not unitary: U†U differs from 1 by {FigureText.Number(defect)}, more than 1e-9.", "give every entry with all its digits", at);
 
-    public static Diagnostic DoesNotFit(EngineChoice choice, double limit, bool asked) => new(
+    public static Diagnostic DoesNotFit(EngineChoice choice, double limit, bool asked, bool hasSink) => new(
         "E001",
         Severity.Error,
-        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {FigureText.Bytes(limit)} may be used{(asked ? " (--memory)" : "")}.",
-        $"{(asked && choice.MemoryBytes < DenseEngine.LargestMemory ? "allow more with --memory if the machine has it, " : "")}lower the number of parties, or herald losses (one that is not adds a level)",
+        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {Allowed(limit, asked)}.",
+        $"{(asked && choice.MemoryBytes < DenseEngine.LargestMemory ? "allow more with --memory if the machine has it, " : "")}lower the number of parties{(hasSink ? ", or herald losses (one that is not adds a level)" : "")}",
         Place.Of("engine"));
 
     public static Diagnostic UnknownEngine(string name) => new(
@@ -152,6 +152,13 @@ internal static class JudgementMessages
 
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
+
+    private static string Allowed(double limit, bool asked) => FigureText.Bytes(limit) switch
+    {
+        var size when limit >= DenseEngine.LargestMemory => $"the engine can use {size} at most on any machine",
+        var size when asked => $"--memory allows {size}",
+        var size => $"of this machine's, {size} may be used",
+    };
 
     private static string Domain(ParameterInfo parameter) =>
         parameter.Values is { } values ? Words.Or(values.Select(v => v.ToString())) : $"a number from {parameter.From} to {parameter.To}";

@@ -79,7 +79,7 @@ internal sealed class ListCompiler
     private void Make(int party, int slot, BoundExpression value)
     {
         _party = party;
-        bool choice = _task.Cheats(party) && Reads.Parts(value).Any(p => p is BoundChoice or BoundSome);
+        bool choice = _task.Cheats(party) && BoundWalk.Within(value).Any(p => p is BoundChoice or BoundSome);
         Assign(slot, value);
         if (choice)
             _lastCheat = _operations.Count;
