@@ -8,6 +8,9 @@ internal sealed class LocalOperator
     /// <summary>Entries this much smaller than the largest are round-off when an operator is asked for its form.</summary>
     private const double Nothing = 1e-14;
 
+    /// <summary>Its square is far below round-off.</summary>
+    private const double Small = 1e-10;
+
     private LocalOperator(int levels, double[] re, double[] im)
     {
         (Levels, Re, Im) = (levels, re, im);
@@ -93,12 +96,15 @@ internal sealed class LocalOperator
         return matrix;
     }
 
-    /// <summary>Whether all off-diagonal entries vanish against <paramref name="scale"/>, up to round-off.</summary>
+    /// <summary>
+    /// Whether all off-diagonal entries are small against <paramref name="scale"/>. Among diagonal operators they count in second order, so that this
+    /// may be asked less strictly than equality.
+    /// </summary>
     public bool IsDiagonal(double scale)
     {
         for (int i = 0; i < Re.Length; i++)
         {
-            if (i % (Levels + 1) != 0 && Math.Abs(Re[i]) + Math.Abs(Im[i]) > Nothing * Levels * scale)
+            if (i % (Levels + 1) != 0 && Math.Abs(Re[i]) + Math.Abs(Im[i]) > Small * scale)
                 return false;
         }
 

@@ -60,8 +60,6 @@ internal sealed class SignedDeterminants
             int from = leaf == first ? 0 : _depth - 1 - BitOperations.Log2((ulong)(leaf ^ (leaf - 1)));
             for (int level = from; level < _depth; level++)
                 Descend(re, im, level, (leaf >> (_depth - 1 - level)) & 1);
-            if (_depth == 0)
-                Seed(re, im);
             Add(int.IsEvenInteger(BitOperations.PopCount((ulong)leaf)) ? Vector512<double>.One : -Vector512<double>.One);
         }
 
