@@ -27,6 +27,7 @@ internal static class CommandTree
         Add("copies", "SCRIPT", "Find how many copies a failure probability costs, honest and with the cheats listed.", CopiesCommand.Execute, [o.Failure, o.Harm, .. judging, .. writing, .. computing]);
         Add("state", "FILE", "Tell what a prepared state is: validity, fidelity, purity, negativity, populations.", StateCommand.Execute, [o.Mend, .. writing]);
         Add("storage", "CONDITIONS", "Tell how long emitters side by side keep the antisymmetric state, beside its symmetric counterpart and independent decay.", StorageCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, .. writing]);
+        Add("relaxation", "CONDITIONS", "Tell what shared decay makes of a start: fidelity, populations and yield against time.", RelaxationCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, o.Samples, o.Seed, .. writing]);
         Add("format", "SCRIPT", "Print a script in its one shape.", FormatCommand.Execute, [o.Check, o.Write, o.Out, o.Quiet]);
         Add("explain", "[CODE]", "Tell cause and cure of a message; without a code, list all.", ExplainCommand.Execute, [o.PageFormat, o.Out]);
         Add("schema", "NAME", "Print the JSON schema of a file kind.", SchemaCommand.Execute, [o.Out]);

@@ -50,9 +50,11 @@ internal sealed class Options
 
     public Option<string[]> Harm { get; } = Value("--harm", "PROBABILITY", "What every harm must not exceed; the same as --failure unless said, and with 1 harms are not looked at.");
 
-    public Option<string[]> Until { get; } = Value("--until", "TIME", "Last storage time, such as \"5 ns\"; without it the duration in the conditions.");
+    public Option<string[]> Until { get; } = Value("--until", "TIME", "Last time, such as \"5 ns\"; without it the duration in the conditions.");
 
     public Option<string[]> Points { get; } = Value("--points", "NUMBER", "Number of times from 0 on. Default 41.");
+
+    public Option<string[]> Samples { get; } = Value("--samples", "NUMBER", "Number of trajectories where figures must be sampled. Default 1000.");
 
     public Option<bool> Quiet { get; } = new("--quiet") { Description = "Show no warnings on standard error; documents still hold them." };
 

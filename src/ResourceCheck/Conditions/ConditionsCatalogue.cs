@@ -341,6 +341,11 @@ internal static class ConditionsCatalogue
             "A speed above that of light in vacuum. This is a warning: figures are computed all the same, for a world that does not exist.",
             "Check the value and its unit."),
         new(
+            "C068",
+            "No relaxation",
+            "`resourcecheck relaxation` follows what the `resource.relaxed` section of the conditions describes.",
+            "Add a `resource.relaxed` section."),
+        new(
             "C070",
             "Malformed path",
             "The path of `--set` cannot be taken apart.",

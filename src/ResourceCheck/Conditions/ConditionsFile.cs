@@ -57,6 +57,16 @@ public static class ConditionsFile
         return model is null || findings.HasErrors ? Outcome<CollectiveModel>.Failed(findings.InOrder(document.Name)) : Outcome<CollectiveModel>.Of(model);
     }
 
+    /// <summary>The <c>resource.relaxed</c> section for a number of emitters; a finding when there is none.</summary>
+    public static Outcome<RelaxedPreparation> Relaxation(ConditionsDocument document, int emitters)
+    {
+        Findings findings = new();
+        if (document.Root.Find("resource") is not GroupSetting resource || resource.Find("relaxed") is not GroupSetting relaxed)
+            return Outcome<RelaxedPreparation>.Failed([ConditionsMessages.NoRelaxation(document.Name)]);
+        RelaxedPreparation? preparation = new ResourceBuilder(emitters, FolderOf(document.Name), findings).Relaxed(relaxed);
+        return preparation is null || findings.HasErrors ? Outcome<RelaxedPreparation>.Failed(findings.InOrder(document.Name)) : Outcome<RelaxedPreparation>.Of(preparation);
+    }
+
     /// <summary>The JSON schema of conditions files, as published.</summary>
     public static string Schema => SchemaWriter.Write(KeyTable.Root);
 

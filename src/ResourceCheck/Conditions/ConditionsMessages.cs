@@ -189,6 +189,9 @@ internal static class ConditionsMessages
     public static Diagnostic NoStorage(string file) =>
         new("C066", Severity.Error, "These conditions have no `storage` section, so there is nothing to follow.", "add one, such as {\"shape\": \"ring\", \"spacing\": \"0.1 wavelengths\", \"linewidth\": \"6.07 MHz\", \"duration\": \"5 ns\"}", Place.Of(file));
 
+    public static Diagnostic NoRelaxation(string file) =>
+        new("C068", Severity.Error, "These conditions have no `resource.relaxed` section, so there is nothing to follow.", "add one, such as {\"resource\": {\"relaxed\": {\"shape\": \"point\", \"linewidth\": \"6.07 MHz\", \"start\": {\"bystanders\": [2]}, \"time\": \"50 ns\"}}}", Place.Of(file));
+
     public static Diagnostic BadGeometry(Spot at, string what, string cure) => Error("C065", at, what, cure);
 
     public static Diagnostic KeyBesideParties(Spot at, string path, string name) =>

@@ -39,6 +39,9 @@ public static class Judge
     /// <summary>Follows storage side by side against time.</summary>
     public static Outcome<StorageResult> Storage(StorageRequest request) => StorageJudgement.Of(request);
 
+    /// <summary>Follows preparation by relaxation against time.</summary>
+    public static Outcome<RelaxationResult> Relaxation(RelaxationRequest request) => RelaxationJudgement.Of(request);
+
     /// <summary>Tells what would be computed, without computing it.</summary>
     public static Outcome<InspectResult> Inspect(RunRequest request) => Setup.From(request) switch
     {

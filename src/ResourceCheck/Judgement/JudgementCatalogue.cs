@@ -16,6 +16,7 @@ internal static class JudgementCatalogue
         new("E007", "storage too large", "What is left after a photon is followed with the density operator of all emitters.", "Lower the number of parties, or use `resourcecheck storage`, which follows copies without a photon."),
         new("E008", "search refused", "The worst choice of a cheat on lists is found by counting, which is too much work here or does not apply.", "Lower M, or fix some of the choices."),
         new("E009", "loss that cannot be shared out", "A budget compares a figure with and without each source of loss; the figure must be exact and defined each time.", "Set a goal on another figure, which the budget is then about."),
+        new("E017", "relaxation too large", "Relaxation starts from a state vector of N emitters with N levels each, and beyond eight of them it does not fit in memory.", "Ask for fewer emitters."),
         new("P001", "unknown parameter", "--parameter names something that the script does not declare.", "Use a declared name; `inspect` lists them.", "--parameter m=3"),
         new("P002", "unreadable value", "The value of --parameter is no number, fraction, list, range or `all`.", "Write a number, 1/3, 3,4 or 3..8.", "--parameter n=three"),
         new("P003", "outside the domain", "The script limits the values of this parameter.", "Choose a value inside, or widen the domain in the script.", "--parameter n=40"),
@@ -28,8 +29,10 @@ internal static class JudgementCatalogue
         new("P013", "not unitary", "The columns of a matrix file named by the script are not orthonormal to 1e-9.", "Give every entry with all its digits."),
         new("P020", "no exchange shifts at one point", "At no distance the exchange shifts between emitters have no bound; the shape `point` is the limit in which they are left out.", "Give a shape with a spacing to see what they do."),
         new("P021", "dark is not stable", "The antisymmetric state hardly emits, but exchange shifts that differ from pair to pair turn it into other dark states: the no-photon probability stays high while the fidelity falls.", "Make all pairs equivalent, stand further apart, or store for a shorter time."),
+        new("P022", "rough integration", "The evolution of emitters that decay together was integrated with a tolerance so wide that its estimated error shows in the figures.", "Lower `tolerance` in `storage` or `resource.relaxed`; 1e-12 is taken where it is not given.", "\"tolerance\": 0.01"),
         new("P030", "figure of a discussion", "A report or claim of a list protocol asks for the probability of something that a discussion made once for all copies.", "Let `success` or the harm of a dishonest case ask for it."),
         new("P031", "interception that knows too much", "An interception happens in flight, when no message has been sent yet, so a conditional block around it can use only the outsider's own values and hold only the outsider's lines.", "Condition it on the outsider's own picks."),
         new("P032", "choices out of reach", "On single copies every combination of a cheat's choices is tried; here there are none, or too many.", "Narrow the ranges, or make a case for each part."),
+        new("P033", "uncertainties are not carried through", "Values of the conditions are given with a standard uncertainty. Figures are computed from the central values; this is a note.", "Try the ends with --set, or sweep over the value."),
     ];
 }

@@ -1,6 +1,7 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
 using ResourceCheck.Engines.Dense;
+using ResourceCheck.Numerics.Collective;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts;
 
@@ -74,7 +75,18 @@ internal static class JudgementMessages
         "E006", Severity.Error, $"Storage of {emitters} emitters without a photon takes {emitters}! amplitudes: up to {most} emitters fit here.", "ask for fewer emitters", Place.Of("--parties"));
 
     public static Diagnostic CollectiveTooLarge(int parties, int most) => new(
-        "E007", Severity.Error, $"Storage with photons evolves the density operator of all emitters, which {parties} of them do not fit in: up to {most} fit here.", "lower the number of parties, or look at storage alone with `resourcecheck storage`", Place.Of("storage"));
+        "E007",
+        Severity.Error,
+        $"Storage with photons evolves the density operator of all emitters, which takes {FigureText.Bytes(16 * Math.Pow(parties, 2 * parties))} for {parties} of them: up to {most} emitters fit here.",
+        $"lower the number of parties, or look at storage alone: `resourcecheck storage FILE --parties {parties}`, exact for up to {PhotonFreeStorage.MostEmitters} emitters, with and without heralding",
+        Place.Of("storage"));
+
+    public static Diagnostic TooManyToRelax(int emitters, int most) => new(
+        "E017",
+        Severity.Error,
+        $"Relaxation of {emitters} emitters starts from {emitters}^{emitters} amplitudes, {FigureText.Bytes(16 * Math.Pow(emitters, emitters))} of them: up to {most} emitters fit here.",
+        "ask for fewer emitters",
+        Place.Of("--parties"));
 
     public static Diagnostic WithoutShifts() => new(
         "P020", Severity.Note, "The emitters stand at one point: exchange shifts, which have no bound there, are left out.", "give a shape with a spacing to see what the shifts do", Place.Of("storage.shape"));
@@ -86,12 +98,26 @@ internal static class JudgementMessages
         "make all pairs equivalent (a pair, an equilateral triangle), stand further apart, or store for a shorter time",
         Place.Of("storage"));
 
+    public static Diagnostic RoughIntegration(double error) => new(
+        "P022",
+        Severity.Warning,
+        $"Collective decay was integrated with an estimated error of {FigureText.Number(error, Rounding.Up)} in probabilities, so that figures marked exact are exact only to that.",
+        "lower `tolerance` in `storage` or `resource.relaxed`",
+        Place.Of("tolerance"));
+
     public static Diagnostic InterceptTooKnowing(Place at) => new(
         "P031",
         Severity.Error,
         "This interception stands in a conditional block that asks for more than the outsider knows while qudits fly: only the outsider's own values and lines fit in such a block.",
         "let the condition use the outsider's own picks alone, and take other lines out of the block",
         at);
+
+    public static Diagnostic CentralValues(IReadOnlyList<Conditions.UncertainQuantity> uncertain) => new(
+        "P033",
+        Severity.Note,
+        $"{Words.And(uncertain.Select(u => $"`{u.Path}`"))} {(uncertain.Count == 1 ? "carries an uncertainty" : "carry uncertainties")}: figures are of the central values, and no uncertainty is carried through to them.",
+        null,
+        Place.Of("conditions"));
 
     public static Diagnostic FigureOfDiscussion(Place at) => new(
         "P030",

@@ -74,7 +74,7 @@ internal static class RunJudgement
             VerdictText = GoalJudgement.Sentence(goals, all) + Outside(setup.Settings),
             Hint = Limits.Hint(goals, all, setup.Request),
             Timeline = Provenance.Schedule(longest),
-            Warnings = [.. setup.Notes, .. Notes(all), .. longest.World.Storage is { } storage ? StorageAdvice.Of(storage, storage.Time.Seconds) : []],
+            Warnings = [.. setup.Notes, .. Notes(all), .. longest.World.Storage is { } storage ? StorageAdvice.Of(storage, storage.Time.Seconds) : [], .. StorageAdvice.OfError(all.Max(e => e.Actual.IntegrationError))],
         };
     }
 

@@ -16,6 +16,13 @@ internal static class StorageAdvice
     /// <summary>Moved without a photon by this much is worth a warning.</summary>
     private const double Moved = 0.02;
 
+    /// <summary>Integration errors below this are nobody's concern: results are held to 1e-8.</summary>
+    private const double Rough = 1e-8;
+
+    /// <summary>Warns where an integration is too rough for its figures to pass as exact.</summary>
+    public static IEnumerable<Diagnostic> OfError(double error) => error > Rough ? [JudgementMessages.RoughIntegration(error)] : [];
+
+    /// <summary>Warnings and notes about storage that lasts until a time, s.</summary>
     public static IEnumerable<Diagnostic> Of(CollectiveModel model, double until)
     {
         int emitters = model.Positions.Length;

@@ -27,17 +27,19 @@ internal static class StorageJudgement
         double until = request.Until ?? model.Time.Seconds;
         double[] times = [.. Enumerable.Range(0, request.Points).Select(i => until * i / (request.Points - 1))];
         StoragePoint[] points = [.. times.Select(t => Point(t, dark, bright, couplings, model.Tolerance))];
+        double error = 2 * Math.Max(dark.Work.ErrorEstimate, bright.Work.ErrorEstimate);
         return new StorageResult
         {
             Version = Provenance.Version,
             Conditions = new InputFile(request.Conditions.Name, request.Conditions.Sha256),
             Overrides = request.Overrides,
             Emitters = request.Emitters,
+            Heralded = model.Heralded,
             WithoutShifts = model.IsPoint,
             InitialRates = (PhotonFreeStorage.InitialRate(couplings, ExchangeSign.Odd), PhotonFreeStorage.InitialRate(couplings, ExchangeSign.Even), couplings.TotalRate),
             Points = points,
-            ErrorEstimate = 2 * Math.Max(dark.Work.ErrorEstimate, bright.Work.ErrorEstimate),
-            Warnings = [.. StorageAdvice.Of(model, until)],
+            ErrorEstimate = error,
+            Warnings = [.. StorageAdvice.Of(model, until), .. StorageAdvice.OfError(error)],
         };
     }
 

@@ -17,6 +17,9 @@ public sealed record StorageResult
     /// <summary>Number of emitters and of levels of each.</summary>
     public required int Emitters { get; init; }
 
+    /// <summary>Whether the conditions drop copies that emitted a photon.</summary>
+    public required bool Heralded { get; init; }
+
     /// <summary>Whether exchange shifts are left out, as in the limit of one point.</summary>
     public required bool WithoutShifts { get; init; }
 
@@ -40,7 +43,11 @@ public sealed record StorageResult
 /// <param name="SymmetricNoPhoton">Probability that the counterpart with all signs + has emitted no photon.</param>
 /// <param name="SymmetricFidelity">Its fidelity with itself at the start.</param>
 /// <param name="Independent">Both probabilities when the emitters decay each alone.</param>
-public sealed record StoragePoint(double Time, double NoPhoton, double Fidelity, double SymmetricNoPhoton, double SymmetricFidelity, double Independent);
+public sealed record StoragePoint(double Time, double NoPhoton, double Fidelity, double SymmetricNoPhoton, double SymmetricFidelity, double Independent)
+{
+    /// <summary>Fidelity of the copies that emitted no photon; 0 where none are left.</summary>
+    public double PhotonFreeFidelity => NoPhoton > 0 ? Math.Min(1, Fidelity / NoPhoton) : 0;
+}
 
 /// <summary>What <c>storage</c> is asked.</summary>
 /// <param name="Conditions">Conditions with a <c>storage</c> section.</param>

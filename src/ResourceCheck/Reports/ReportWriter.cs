@@ -31,6 +31,10 @@ public static class ReportWriter
     public static void Write(StorageResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
         Write(format, writer, colour, () => StorageReport.From(result), () => StorageDocument.Write(result, writer));
 
+    /// <summary>Writes the result of <c>relaxation</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(RelaxationResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => RelaxationReport.From(result), () => RelaxationDocument.Write(result, writer));
+
     /// <summary>Writes the result of <c>budget</c>; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
     public static void Write(BudgetResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
         Write(format, writer, colour, () => BudgetReport.From(result), () => BudgetDocument.Write(result, writer));

@@ -8,12 +8,9 @@ internal static class StorageDocument
     /// <summary>Writes the document.</summary>
     public static void Write(StorageResult storage, TextWriter writer) => JsonParts.WriteDocument(writer, "storage", storage.Version, json =>
     {
-        JsonParts.Object(json, "conditions", () =>
-        {
-            json.WriteString("name", storage.Conditions.Name);
-            json.WriteString("sha256", storage.Conditions.Sha256);
-        });
+        JsonParts.Conditions(json, storage.Conditions, storage.Overrides);
         json.WriteNumber("emitters", storage.Emitters);
+        json.WriteBoolean("heralded", storage.Heralded);
         json.WriteBoolean("withoutShifts", storage.WithoutShifts);
         json.WriteString("label", "exact");
         JsonParts.Number(json, "errorEstimate", storage.ErrorEstimate);
@@ -28,14 +25,11 @@ internal static class StorageDocument
             JsonParts.Number(json, "time", p.Time);
             JsonParts.Number(json, "noPhoton", p.NoPhoton);
             JsonParts.Number(json, "fidelity", p.Fidelity);
+            JsonParts.Number(json, "photonFreeFidelity", p.PhotonFreeFidelity);
             JsonParts.Number(json, "symmetricNoPhoton", p.SymmetricNoPhoton);
             JsonParts.Number(json, "symmetricFidelity", p.SymmetricFidelity);
             JsonParts.Number(json, "independent", p.Independent);
         });
-        JsonParts.Objects(json, "warnings", storage.Warnings, w =>
-        {
-            json.WriteString("code", w.Code);
-            json.WriteString("message", w.Message);
-        });
+        JsonParts.Warnings(json, storage.Warnings);
     });
 }

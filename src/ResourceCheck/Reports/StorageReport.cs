@@ -6,9 +6,6 @@ namespace ResourceCheck.Reports;
 /// <summary>The report of <c>storage</c>.</summary>
 internal static class StorageReport
 {
-    /// <summary>Rows shown to people; files for programs hold them all.</summary>
-    private const int RowsShown = 21;
-
     /// <summary>Builds the report.</summary>
     public static Report From(StorageResult storage) => new(
         Headline(storage),
@@ -24,7 +21,8 @@ internal static class StorageReport
     private static string Headline(StorageResult storage)
     {
         StoragePoint last = storage.Points[^1];
-        return $"After {FigureText.Time(last.Time)} side by side, the antisymmetric state of {storage.Emitters} emitters has fidelity {FigureText.Number(last.Fidelity)} (exact); decaying each alone it would be {FigureText.Number(last.Independent)} (exact).";
+        return $"After {FigureText.Time(last.Time)} side by side, the antisymmetric state of {storage.Emitters} emitters has fidelity {FigureText.Number(last.Fidelity)} (exact); decaying each alone it would be {FigureText.Number(last.Independent)} (exact)."
+            + (storage.Heralded ? $" These conditions keep copies without a photon alone, {FigureText.Number(last.NoPhoton)} of all (exact): their fidelity is {FigureText.Number(last.PhotonFreeFidelity)} (exact)." : "");
     }
 
     private static Table Rates(StorageResult storage) => new(
@@ -36,27 +34,24 @@ internal static class StorageReport
         ],
         Headed: false);
 
-    private static Table Curves(IReadOnlyList<StoragePoint> points, bool shown)
-    {
-        int step = shown ? Math.Max(1, (points.Count - 1 + RowsShown - 2) / (RowsShown - 1)) : 1;
-        return new(
-            [
-                new("time", "Time", shown ? "" : "s"),
-                new("antisymmetric_no_photon", "No photon"),
-                new("antisymmetric_fidelity", "Fidelity"),
-                new("symmetric_no_photon", "All +, no photon"),
-                new("symmetric_fidelity", "All +, fidelity"),
-                new("independent", "Each alone"),
-            ],
-            [.. points.Where((_, i) => i % step == 0 || i == points.Count - 1).Select(Row)]);
-    }
+    private static Table Curves(IReadOnlyList<StoragePoint> points, bool shown) => new(
+        [
+            new("time", "Time", shown ? "" : "s"),
+            new("antisymmetric_no_photon", "No photon"),
+            new("antisymmetric_fidelity", "Fidelity"),
+            new("photon_free_fidelity", "if no photon"),
+            new("symmetric_no_photon", "All +, no photon"),
+            new("symmetric_fidelity", "All +, fidelity"),
+            new("independent", "Each alone"),
+        ],
+        [.. (shown ? CurveRows.Shown(points) : points).Select(Row)]);
 
     private static IReadOnlyList<Cell> Row(StoragePoint point) =>
-        [Cell.Of(point.Time, "s"), Cell.Of(point.NoPhoton), Cell.Of(point.Fidelity), Cell.Of(point.SymmetricNoPhoton), Cell.Of(point.SymmetricFidelity), Cell.Of(point.Independent)];
+        [Cell.Of(point.Time, "s"), Cell.Of(point.NoPhoton), Cell.Of(point.Fidelity), Cell.Of(point.PhotonFreeFidelity), Cell.Of(point.SymmetricNoPhoton), Cell.Of(point.SymmetricFidelity), Cell.Of(point.Independent)];
 
     private static IReadOnlyList<string> Remarks(StorageResult storage) =>
     [
-        "Fidelity is of all copies: one that emitted a photon adds nothing. \"All +\" is the counterpart with all signs +, compared with its own start.",
+        "Fidelity is of all copies: one that emitted a photon adds nothing; \"if no photon\" is of those that emitted none. As one excitation is shared, \"no photon\" is also the population of level 0, summed over the emitters. \"All +\" is the counterpart with all signs +, compared with its own start.",
         .. storage.WithoutShifts ? ["The shape is one point, the limit of no distance: exchange shifts are left out."] : Array.Empty<string>(),
     ];
 }

@@ -20,6 +20,9 @@ public sealed record PreparedState
     /// <summary>Probability that the preparation succeeded where it was heralded; the state itself has trace 1.</summary>
     public double Probability { get; init; } = 1;
 
+    /// <summary>Estimated error of probabilities found in it, from integrating collective decay; 0 where none was integrated.</summary>
+    public double IntegrationError { get; init; }
+
     /// <summary>Density matrix, d^N × d^N, row after row, trace 1; null for a pure state.</summary>
     public Complex[]? Density { get; init; }
 }

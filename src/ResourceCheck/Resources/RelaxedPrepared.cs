@@ -21,16 +21,25 @@ internal static class RelaxedPrepared
         Outcome<PreparedState> start = Start(relaxed.Start, parties);
         if (start.Value is not { } state)
             return start;
-        (Complex[] density, _) = CollectiveDecay.Evolve(relaxed.Decay, state.Density ?? StartStates.Operator(state.Ket!));
+        (Complex[] density, double error) = CollectiveDecay.Evolve(relaxed.Decay, state.Density ?? StartStates.Operator(state.Ket!));
         int size = (int)Math.Round(Math.Sqrt(density.Length));
-        double kept = Enumerable.Range(0, size).Sum(i => density[(i * size) + i].Real);
+        double kept = CollectiveDecay.Trace(density, size);
         if (!(kept > Nothing))
             return Outcome<PreparedState>.Failed([StateMessages.NothingWithoutPhoton()]);
         return new Outcome<PreparedState>(
-            new PreparedState { Parties = parties, Levels = parties, Density = [.. density.Select(x => x / kept)], Probability = Math.Min(kept, 1) }, start.Findings);
+            new PreparedState
+            {
+                Parties = parties,
+                Levels = parties,
+                Density = [.. density.Select(x => x / kept)],
+                Probability = Math.Min(kept, 1),
+                IntegrationError = error,
+            },
+            start.Findings);
     }
 
-    private static Outcome<PreparedState> Start(RelaxedStart start, int parties)
+    /// <summary>The state that relaxation starts from; a file is read here.</summary>
+    public static Outcome<PreparedState> Start(RelaxedStart start, int parties)
     {
         if (start.File is { } file)
             return Resource.Fit(StateFile.Read(file, false), file, parties);

@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Numerics;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Numerics.States;
+using ResourceCheck.Quantities;
 using ResourceCheck.Resources.Formats;
 
 namespace ResourceCheck.Resources;
@@ -273,8 +274,8 @@ internal static class StateMessages
     public static Diagnostic RelaxedTooManyParties(int parties, int most) => new(
         "D045",
         Severity.Error,
-        $"Relaxation was asked for {parties} parties; density operators are evolved for up to {most}.",
-        "lower the number of parties, or give the relaxed state as a file",
+        $"Relaxation was asked for {parties} parties; density operators are evolved for up to {most}, and {parties} would take {FigureText.Bytes(16 * Math.Pow(parties, 2 * parties))}.",
+        $"lower the number of parties, give the relaxed state as a file, or look at relaxation alone: `resourcecheck relaxation FILE --parties {parties}`, for up to {AntisymmetricState.MostParties} emitters",
         Place.Of("resource.relaxed"));
 
     public static Diagnostic NothingWithoutPhoton() => new(

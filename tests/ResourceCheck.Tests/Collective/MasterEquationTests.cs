@@ -69,7 +69,7 @@ public sealed class MasterEquationTests
             Complex[] start = StartStates.Operator(AntisymmetricState.Ket(n)), ket = storage.Ket();
             Complex[] quiet = new MasterEquation(c).Evolve(start, 0.9, photons: false).State;
             Assert.Equal(StartStates.Operator(ket), quiet, (a, b) => (a - b).Magnitude < 1e-8);
-            (IReadOnlyList<RelaxationFigures> all, _) = Relaxation.Follow(c, start, [0.9]);
+            (IReadOnlyList<RelaxationFigures> all, _) = Relaxation.Follow(c, start, [0.9], cancellation: TestContext.Current.CancellationToken);
             Assert.Equal(figures.Fidelity, all[0].Population, 1e-8);
             Assert.Equal(1, all[0].Kept, 1e-10);
             Assert.Equal(figures.NoPhoton, all[0].Excitations, 1e-8);
@@ -80,7 +80,7 @@ public sealed class MasterEquationTests
     public void Five_emitters_fit()
     {
         Couplings c = Couplings.From(EmitterShape.Ring(5, 0.2), CollectiveCases.Unequal(5));
-        (IReadOnlyList<RelaxationFigures> figures, _) = Relaxation.Follow(c, StartStates.Operator(AntisymmetricState.Ket(5)), [0.2]);
+        (IReadOnlyList<RelaxationFigures> figures, _) = Relaxation.Follow(c, StartStates.Operator(AntisymmetricState.Ket(5)), [0.2], cancellation: TestContext.Current.CancellationToken);
         StorageFigures stored = PhotonFreeStorage.Antisymmetric(c).AdvanceTo(0.2);
         Assert.Equal(stored.Fidelity, figures[0].Population, 1e-8);
         Assert.Equal(stored.NoPhoton, figures[0].Excitations, 1e-8);

@@ -86,6 +86,21 @@ public sealed class QuantumJumpsTests
     }
 
     [Fact]
+    public void Looking_on_the_way_changes_nothing()
+    {
+        QuantumJumps jumps = new(CollectiveCases.General, StartStates.Inverted(3, 3));
+        for (int index = 0; index < 20; index++)
+        {
+            List<int> photons = [];
+            Trajectory looked = jumps.Run([0, 0.3, 0.3, 0.9, 2], Seed, index, (_, _, seen) => photons.Add(seen)), alone = jumps.Run(2, Seed, index);
+            Assert.Equal(alone.Photons.Select(p => p.Channel), looked.Photons.Select(p => p.Channel));
+            Assert.Equal(alone.Photons.Select(p => p.Time), looked.Photons.Select(p => p.Time), (a, b) => Math.Abs(a - b) < 1e-7);
+            Assert.Equal(new[] { 0, 0.3, 0.3, 0.9, 2 }.Select(t => alone.Photons.Count(p => p.Time <= t)), photons);
+            Assert.Equal(alone.State.Ket(), looked.State.Ket(), (a, b) => (a - b).Magnitude < 1e-6);
+        }
+    }
+
+    [Fact]
     public void Six_emitters_follow_their_no_photon_probability()
     {
         Couplings c = Couplings.From(EmitterShape.Ring(6, 0.15), CollectiveCases.Unequal(6));

@@ -12,7 +12,7 @@ public sealed class RelaxationTests
     {
         TableRow[] rows = [.. TableRow.Of("collective").Where(r => r.Kind == "population")];
         Assert.Equal(14, rows.Length);
-        Assert.All(rows, row => Assert.Equal(row.Value, Relaxation.Follow(CollectiveCases.Of(row), Start(row), [row.Number("time", 0)]).Figures[0].Population, 1e-10));
+        Assert.All(rows, row => Assert.Equal(row.Value, Relaxation.Follow(CollectiveCases.Of(row), Start(row), [row.Number("time", 0)], cancellation: TestContext.Current.CancellationToken).Figures[0].Population, 1e-10));
     }
 
     [Theory]
@@ -22,10 +22,10 @@ public sealed class RelaxationTests
     {
         Couplings c = Couplings.From(EmitterShape.Point(3), [new(1, 1, CollectiveCases.Normal), new(0.8, 1, CollectiveCases.Normal)]);
         Complex[] start = StartStates.Operator(StartStates.Pair([bystander], 3));
-        (IReadOnlyList<RelaxationFigures> figures, _) = Relaxation.Follow(c, start, [0, 1, 200]);
+        (IReadOnlyList<RelaxationFigures> figures, _) = Relaxation.Follow(c, start, [0, 1, 200], cancellation: TestContext.Current.CancellationToken);
         Assert.Equal(expected, figures[0].Population, 1e-14);
         Assert.Equal(expected, figures[^1].Population, 1e-9);
-        RelaxationFigures heralded = Relaxation.Follow(c, start, [200], photons: false).Figures[0];
+        RelaxationFigures heralded = Relaxation.Follow(c, start, [200], photons: false, cancellation: TestContext.Current.CancellationToken).Figures[0];
         Assert.Equal(expected, heralded.Population, 1e-9);
     }
 
@@ -34,7 +34,7 @@ public sealed class RelaxationTests
     public void Heralding_on_no_photon_turns_the_dark_share_into_yield()
     {
         Couplings c = Couplings.From(EmitterShape.Point(3), CollectiveCases.Equal(3));
-        RelaxationFigures figures = Relaxation.Follow(c, StartStates.Operator(StartStates.Pair([2], 3)), [60], photons: false).Figures[0];
+        RelaxationFigures figures = Relaxation.Follow(c, StartStates.Operator(StartStates.Pair([2], 3)), [60], photons: false, cancellation: TestContext.Current.CancellationToken).Figures[0];
         Assert.Equal(1.0 / 3, figures.Kept, 1e-9);
         Assert.Equal(1, figures.Fidelity, 1e-9);
     }
@@ -44,7 +44,7 @@ public sealed class RelaxationTests
     {
         Couplings c = Couplings.From(EmitterShape.Chain(3, 0.3), CollectiveCases.Equal(3));
         double[] times = [.. Enumerable.Range(0, 61).Select(i => 0.05 * i)];
-        (IReadOnlyList<RelaxationFigures> figures, _) = Relaxation.Follow(c, StartStates.Operator(StartStates.Inverted(3, 3)), times);
+        (IReadOnlyList<RelaxationFigures> figures, _) = Relaxation.Follow(c, StartStates.Operator(StartStates.Inverted(3, 3)), times, cancellation: TestContext.Current.CancellationToken);
         Assert.Equal(0.017, figures.Max(f => f.Population), 0.001);
         Assert.Equal(3, figures[0].Excitations, 1e-12);
         Assert.All(figures.Zip(figures.Skip(1)), pair => Assert.True(pair.First.Excitations > pair.Second.Excitations));

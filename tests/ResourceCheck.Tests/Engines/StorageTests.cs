@@ -9,7 +9,7 @@ namespace ResourceCheck.Tests.Engines;
 /// <summary>Collective decay from a conditions file to the dense engine's checkpoints; values of the design's page on physics, there computed independently.</summary>
 public sealed class StorageTests
 {
-    private const string Script = "protocol \"p\"\nparties P[1..3]\nresource antisymmetric on all\nsuccess when true\n";
+    private const string Script = "protocol \"p\"\nparties P[1..3]\nresource antisymmetric on all\nround \"r\"\n  all measure level as v\nend\nsuccess when distinct(v of all)\n";
 
     /// <summary>Linewidth 1/2π Hz makes Γ = 1/s.</summary>
     private const string UnitRate = "0.15915494309189535 Hz";
@@ -55,6 +55,27 @@ public sealed class StorageTests
     {
         Evaluation e = Evaluate($$"""{ "resource": { "relaxed": { "shape": "point", "linewidth": "{{UnitRate}}", "start": { "bystanders": [{{bystander}}] }, "time": "60 s" } } }""");
         Assert.Equal(overlap, Fidelity(e, "prepared"), 1e-8);
+        Assert.InRange(e.IntegrationError, 1e-16, 1e-8);
+    }
+
+    /// <summary>The tolerance is the user's: a wider one shows in the estimated error, which still covers the true one.</summary>
+    [Theory]
+    [InlineData("storage", "duration")]
+    [InlineData("resource.relaxed", "time")]
+    public void The_error_that_is_told_follows_the_tolerance_and_covers_the_true_error(string section, string time)
+    {
+        Evaluation rough = Evaluate(Uneven(section, time, 1e-4)), fine = Evaluate(Uneven(section, time, 1e-14));
+        Assert.InRange(fine.IntegrationError, 1e-16, 1e-9);
+        Assert.InRange(rough.IntegrationError, 1e-6, 1);
+        Assert.InRange(Math.Abs(Fidelity(rough, "stored") - Fidelity(fine, "stored")), 0, rough.IntegrationError);
+        Assert.InRange(Math.Abs(rough.Success.Value - fine.Success.Value), 1e-14, rough.IntegrationError);
+    }
+
+    private static string Uneven(string section, string time, double tolerance)
+    {
+        string inside = FormattableString.Invariant(
+            $$"""{ "shape": "chain", "spacing": "0.1 wavelengths", "linewidth": "{{UnitRate}}", "tolerance": {{tolerance}}, "{{time}}": "1.3 s"{{(section == "storage" ? "" : ", \"start\": \"excited\"")}} }""");
+        return section == "storage" ? $$"""{ "storage": {{inside}} }""" : $$"""{ "resource": { "relaxed": {{inside}} } }""";
     }
 
     [Theory]

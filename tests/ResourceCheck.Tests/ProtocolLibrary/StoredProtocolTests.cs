@@ -57,6 +57,14 @@ public sealed class StoredProtocolTests
     public void An_equilateral_triangle_is_warned_of_nothing() =>
         Assert.Empty(Storage(new InputText("ring.json", Chain.Replace("chain", "ring", StringComparison.Ordinal), ""), emitters: 3).Warnings);
 
+    [Fact]
+    public void A_tolerance_too_wide_for_exact_figures_is_warned_of()
+    {
+        InputText rough = new("ring.json", Chain.Replace("chain", "ring", StringComparison.Ordinal).Replace("\"2 ns\"", "\"2 ns\", \"tolerance\": 1e-4", StringComparison.Ordinal), "");
+        Assert.Equal("P022", Assert.Single(Storage(rough, emitters: 3).Warnings).Code);
+        Assert.Equal("P022", Assert.Single(Run(new RunRequest { Script = new InputText("p.protocol", Distinct, ""), Conditions = rough }).Warnings).Code);
+    }
+
     private static InputText File(string name)
     {
         string path = Path.Combine(Golden.Root, "protocols", name);

@@ -15,7 +15,7 @@ public sealed class GoldenReportTests
         [ReportFormat.Markdown] = "md",
     };
 
-    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage", "budget", "sweep", "tolerance", "copies"];
+    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies"];
 
     public static TheoryData<string, ReportFormat> All()
     {
@@ -88,6 +88,9 @@ public sealed class GoldenReportTests
                 break;
             case "storage":
                 ReportWriter.Write(Samples.Storage, format, writer);
+                break;
+            case "relaxation":
+                ReportWriter.Write(Samples.Relaxation, format, writer);
                 break;
             case "budget":
                 ReportWriter.Write(Samples.Budget, format, writer);

@@ -41,6 +41,7 @@ internal static class Samples
         Conditions = new("winter.conditions.json", Hash),
         Overrides = [new("flight.Dov.length", "5 km")],
         Engine = Engine,
+        IntegrationError = 3.21e-11,
         Seed = 1,
         Parameters = [new("n", ["4"], true), new("x", ["0", "1"], false)],
         Cases =
@@ -151,12 +152,38 @@ internal static class Samples
         Conditions = new("winter.conditions.json", Hash),
         Overrides = [new("storage.spacing", "0.05 wavelengths")],
         Emitters = 3,
+        Heralded = true,
         WithoutShifts = true,
         InitialRates = (2.93e6, 1.479e8, 7.54e7),
         Points = [new(0, 1, 1, 1, 1, 1), new(1e-9, 0.9911, 0.9099, 0.8902, 0.8338, 0.9415), new(2e-9, 0.98409123, 0.953187, 0.7526, 0.7239, 0.86)],
         ErrorEstimate = 9.61e-12,
         Warnings = [Warning],
     };
+
+    /// <summary>Relaxation of which some figures are sampled.</summary>
+    public static RelaxationResult Relaxation { get; } = new()
+    {
+        Version = "0.1.0",
+        Conditions = new("winter.conditions.json", Hash),
+        Overrides = [new("resource.relaxed.spacing", "0.05 wavelengths")],
+        Emitters = 6,
+        Start = "emitters in levels 0, 0, 1, 2, 3, 4",
+        Heralded = true,
+        WithoutShifts = true,
+        Method = "copies without a photon are one state vector and exact; what photons add is sampled by 400 quantum-jump trajectories",
+        Seed = -7,
+        Samples = 400,
+        Points =
+        [
+            new(0, Estimate.Exact(0), Estimate.Exact(0), Estimate.Exact(0), 1, 0, Estimate.Exact(2)),
+            new(1e-8, Sampled(0.0213, 0.0101, 0.0421), Sampled(0.1, 0.07, 0.13), Estimate.Exact(0.0123), 0.3333333333333, 0, Sampled(1.41, 1.2, 1.6)),
+            new(2e-8, Sampled(0.01123456, 0.002, 0.0312), Sampled(0, 0, 0.03), Estimate.Exact(0.0023), 0.125, 0.25, Sampled(0.4, 0.2, 0.6)),
+        ],
+        ErrorEstimate = 4.2e-12,
+        Warnings = [Warning],
+    };
+
+    private static Estimate Sampled(double value, double low, double high) => new(value, TruthLabel.Sampled, low, high, 0.99);
 
     /// <summary>Two sources of which one costs nothing.</summary>
     public static BudgetResult Budget { get; } = new()

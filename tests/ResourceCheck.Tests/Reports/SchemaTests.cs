@@ -15,6 +15,7 @@ public sealed class SchemaTests
     [InlineData("inspection", "inspection")]
     [InlineData("state", "state")]
     [InlineData("storage", "storage")]
+    [InlineData("relaxation", "relaxation")]
     [InlineData("budget", "budget")]
     [InlineData("sweep", "sweep")]
     [InlineData("tolerance", "tolerance")]

@@ -24,16 +24,13 @@ internal sealed class ResourceBuilder(int parties, string folder, Findings findi
         if (resource.Find("file") is TextSetting file)
             return new FilePreparation(Path.Combine(folder, file.Text), resource.Flag("mend"));
         if (resource.Find("relaxed") is GroupSetting relaxed)
-            return Relaxed(relaxed);
+            return Relaxed(relaxed) ?? (StatePreparation)new IdealPreparation();
         return resource.EntryOf("exchange") is { } exchange ? Exchange(exchange, (GroupSetting)exchange.Value) : new IdealPreparation();
     }
 
-    private StatePreparation Relaxed(GroupSetting relaxed)
-    {
-        if (new CollectiveBuilder(parties, findings).Build(relaxed, "time") is not { } decay)
-            return new IdealPreparation();
-        return new RelaxedPreparation(StartOf(relaxed), decay);
-    }
+    /// <summary>The model of a <c>relaxed</c> section; null when its geometry does not fit.</summary>
+    public RelaxedPreparation? Relaxed(GroupSetting relaxed) =>
+        new CollectiveBuilder(parties, findings).Build(relaxed, "time") is { } decay ? new RelaxedPreparation(StartOf(relaxed), decay) : null;
 
     private RelaxedStart StartOf(GroupSetting relaxed)
     {

@@ -48,6 +48,7 @@ public static class DenseEngine
     {
         OperatorBasis basis = new(plan.Protocol.Levels, plan.NeedsSink);
         Tally tally = new(plan, basis);
+        tally.IntegrationError(state.IntegrationError);
         Walker walker = new(plan, new LocalModels(basis, matrices), tally, cancellation);
         walker.Walk(Start(plan, basis, state, inputs));
         return tally.Conclude(choice, inputs, lists);

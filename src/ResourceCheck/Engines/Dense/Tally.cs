@@ -43,8 +43,8 @@ internal sealed class Tally
     /// <summary>A <c>keep</c> dropped the copy.</summary>
     public void Dropped(double weight) => _dropped += weight;
 
-    /// <summary>Estimated error of integrating collective decay.</summary>
-    public void IntegrationError(double error) => _error = Math.Max(_error, error);
+    /// <summary>Adds the estimated error of integrating collective decay: preparation and storage happen once each, one after the other.</summary>
+    public void IntegrationError(double error) => _error += error;
 
     /// <summary>A look at a checkpoint in one branch.</summary>
     public void Look(CheckpointPlanStep step, Branch branch, LocalModels models)

@@ -40,16 +40,33 @@ internal sealed class MasterEquation
         Complex[] rho, double time, bool photons = true, double tolerance = TaylorEvolution.DefaultTolerance)
     {
         ArgumentOutOfRangeException.ThrowIfNegative(time);
+        return Follow(rho, [time], photons, tolerance).Single();
+    }
+
+    /// <summary>
+    /// ρ at each of the times, which ascend from 0 on, and the work up to there. The operator is the same object every time: what is to
+    /// be kept of it must be read before the next time is asked for.
+    /// </summary>
+    public IEnumerable<(Complex[] State, EvolutionWork Work)> Follow(
+        Complex[] rho, IEnumerable<double> times, bool photons = true, double tolerance = TaylorEvolution.DefaultTolerance)
+    {
+        Part[] parts = [.. _sectors.Occupied(rho, photons).Select(pairs => new Part(pairs, new LiouvilleSector(_space, pairs, photons), _sectors.Take(rho, pairs)))];
         Complex[] result = new Complex[rho.Length];
         EvolutionWork work = new(0, 0, 0, tolerance);
-        foreach (IReadOnlyList<BlockPair> pairs in _sectors.Occupied(rho, photons))
+        double now = 0;
+        foreach (double time in times)
         {
-            LiouvilleSector sector = new(_space, pairs, photons);
-            Complex[] entries = _sectors.Take(rho, pairs);
-            work += TaylorEvolution.Advance(sector, entries, time, tolerance);
-            _sectors.Put(entries, pairs, result);
-        }
+            foreach (Part part in parts)
+            {
+                work += TaylorEvolution.Advance(part.Sector, part.Entries, time - now, tolerance);
+                _sectors.Put(part.Entries, part.Pairs, result);
+            }
 
-        return (result, work);
+            now = time;
+            yield return (result, work);
+        }
     }
+
+    /// <summary>A sector with its entries now.</summary>
+    private sealed record Part(IReadOnlyList<BlockPair> Pairs, LiouvilleSector Sector, Complex[] Entries);
 }

@@ -40,38 +40,35 @@ internal sealed class QuantumJumps
     public EmitterSpace Space => _space;
 
     /// <summary>The trajectory of one index: the same for the same seed, whatever runs beside it.</summary>
-    public Trajectory Run(double time, ulong seed, long index)
+    public Trajectory Run(double time, ulong seed, long index) => Run([time], seed, index, static (_, _, _) => { });
+
+    /// <summary>The trajectory of one index, looked at on its way; looking changes nothing.</summary>
+    /// <param name="times">When to look, ascending from 0 on; the trajectory ends at the last of them.</param>
+    /// <param name="seed">Seed of all trajectories.</param>
+    /// <param name="index">Its number.</param>
+    /// <param name="look">Gets the number of the time, the state there (not normalised, not to be changed) and the photons so far.</param>
+    public Trajectory Run(IReadOnlyList<double> times, ulong seed, long index, Action<int, EmitterState, int> look)
     {
         Xoshiro256 random = Xoshiro256.Stream(seed, (ulong)index);
         EmitterState state = _start.Copy();
         List<Photon> photons = [];
         EvolutionWork work = new(0, 0, 0, _tolerance);
-        double now = 0;
-        while (true)
+        double now = 0, u = random.NextUnit();
+        for (int i = 0; i < times.Count; i++)
         {
-            now += UntilPhoton(ref state, time - now, random.NextUnit(), ref work, out bool emitted);
-            if (!emitted)
-                return new Trajectory(index, Normalised(state), photons, work);
-            (JumpChannel channel, state) = Choose(state, random.NextUnit());
-            photons.Add(new Photon(now, channel));
-        }
-    }
+            now += UntilPhoton(ref state, times[i] - now, u, ref work, out bool emitted);
+            while (emitted)
+            {
+                (JumpChannel channel, state) = Choose(state, random.NextUnit());
+                photons.Add(new Photon(now, channel));
+                u = random.NextUnit();
+                now += UntilPhoton(ref state, times[i] - now, u, ref work, out emitted);
+            }
 
-    /// <summary>
-    /// Means of observables over trajectories 0 … count-1, each with an interval that holds with the stated confidence.
-    /// Observables must stay within [0, 1].
-    /// </summary>
-    public IReadOnlyList<SampledMean> Average(
-        double time, ulong seed, int count, double confidence, params IReadOnlyList<Func<Trajectory, double>> observables)
-    {
-        double[][] values = [.. observables.Select(_ => new double[count])];
-        Parallel.For(0, count, index =>
-        {
-            Trajectory trajectory = Run(time, seed, index);
-            for (int k = 0; k < values.Length; k++)
-                values[k][index] = observables[k](trajectory);
-        });
-        return [.. values.Select(v => SampledMean.From(v, confidence))];
+            look(i, state, photons.Count);
+        }
+
+        return new Trajectory(index, Normalised(state), photons, work);
     }
 
     /// <summary>Goes on until ‖ψ‖² = u or the time is over; returns the time that passed.</summary>

@@ -12,25 +12,25 @@ internal static class Relaxation
     /// <param name="times">From 0 on, ascending.</param>
     /// <param name="photons">False keeps only copies that emit no photon.</param>
     /// <param name="tolerance">See <see cref="MasterEquation.Evolve"/>.</param>
+    /// <param name="cancellation">Stops between two times.</param>
     public static (IReadOnlyList<RelaxationFigures> Figures, Complex[] Last) Follow(
         Couplings couplings, Complex[] start, IReadOnlyList<double> times, bool photons = true,
-        double tolerance = TaylorEvolution.DefaultTolerance)
+        double tolerance = TaylorEvolution.DefaultTolerance, CancellationToken cancellation = default)
     {
-        MasterEquation equation = new(couplings);
-        Complex[] target = AntisymmetricState.Ket(couplings.Emitters, couplings.Levels), rho = start;
+        Complex[] target = AntisymmetricState.Ket(couplings.Emitters, couplings.Levels), bright = [.. target.Select(a => (Complex)a.Magnitude)];
+        Complex[] last = start;
         List<RelaxationFigures> figures = [];
-        double now = 0, error = 0;
-        foreach (double time in times)
+        foreach ((Complex[] rho, EvolutionWork work) in new MasterEquation(couplings).Follow(start, times, photons, tolerance))
         {
-            (rho, EvolutionWork work) = equation.Evolve(rho, time - now, photons, tolerance);
-            (now, error) = (time, error + work.ErrorEstimate);
-            figures.Add(Figures(couplings, target, rho, time, error));
+            cancellation.ThrowIfCancellationRequested();
+            last = rho;
+            figures.Add(Figures(couplings, target, bright, rho, times[figures.Count], work.ErrorEstimate));
         }
 
-        return (figures, rho);
+        return (figures, last);
     }
 
-    private static RelaxationFigures Figures(Couplings couplings, Complex[] target, Complex[] rho, double time, double error)
+    private static RelaxationFigures Figures(Couplings couplings, Complex[] target, Complex[] bright, Complex[] rho, double time, double error)
     {
         double kept = 0, excitations = 0;
         for (int i = 0; i < target.Length; i++)
@@ -40,7 +40,7 @@ internal static class Relaxation
             excitations += population * Excited(i, couplings.Levels, couplings.Emitters);
         }
 
-        return new RelaxationFigures(time, Expectation(target, rho), kept, excitations, error);
+        return new RelaxationFigures(time, Expectation(target, rho), Expectation(bright, rho), kept, excitations, error);
     }
 
     private static double Expectation(Complex[] ket, Complex[] rho)

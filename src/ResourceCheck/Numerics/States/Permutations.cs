@@ -23,7 +23,8 @@ internal static class Permutations
         return index;
     }
 
-    private static int Sign(int[] levels)
+    /// <summary>Parity of the inversions: 1 or -1.</summary>
+    public static int Sign(int[] levels)
     {
         int inversions = 0;
         for (int i = 0; i < levels.Length; i++)
