@@ -96,7 +96,7 @@ public sealed class OutcomeKernelTests
         LocalOperator Diagonal() => LocalOperator.Combination([.. Enumerable.Range(0, n).Select(l => LocalOperator.Of(PlainTensors.Projector(basis, l)))], [.. Enumerable.Range(0, n).Select(_ => (Complex)random.NextDouble())]);
         LocalOperator[][] effects = [.. Enumerable.Range(0, m).Select(_ => Enumerable.Range(0, n).Select(_ => Diagonal()).ToArray())];
         LocalOperator[] others = [.. Enumerable.Range(0, n - m).Select(_ => Diagonal())];
-        RoundedSum? diagonal = DiagonalDistinct.Try(effects, others);
+        RoundedSum? diagonal = DiagonalDistinct.Find(effects, others)?.Probability();
         return diagonal is { } found && Math.Abs((found.Value / DistinctOutcomes.General(effects, others).Value).Real - 1) < 1e-10;
     }
 

@@ -10,7 +10,7 @@ namespace ResourceCheck.Numerics.Antisymmetric;
 /// one level; what matters is only how many indices of each class have been used as what, where a class holds indices that may be
 /// exchanged (as outcome and level together) without changing any operator. No term is negative.
 /// </summary>
-internal static class DiagonalDistinct
+internal sealed class DiagonalDistinct
 {
     /// <summary>States of the sum over used indices that are worth keeping; beyond, the double sign form serves better.</summary>
     private const double MostStates = 3e6;
@@ -18,8 +18,20 @@ internal static class DiagonalDistinct
     /// <summary>Differences below this part of the largest entry do not tell indices apart.</summary>
     private const double Nothing = 1e-13;
 
-    /// <summary>The probability; null when there is no common basis or too little symmetry.</summary>
-    public static RoundedSum? Try(IReadOnlyList<IReadOnlyList<LocalOperator>> effects, IReadOnlyList<LocalOperator> others)
+    /// <summary>Dictionary look-ups and what goes with them, in multiplications.</summary>
+    private const double WorkPerMove = 50;
+
+    private readonly double[][][] _outcomes;
+    private readonly double[][] _others;
+    private readonly int[][] _classes;
+
+    private DiagonalDistinct(double[][][] outcomes, double[][] others, int[][] classes) => (_outcomes, _others, _classes) = (outcomes, others, classes);
+
+    /// <summary>Multiplications of the sum, at most.</summary>
+    public double Work => WorkPerMove * States(_classes) * _classes.Length * _classes.Length;
+
+    /// <summary>Prepares the sum; null when there is no common basis or too little symmetry.</summary>
+    public static DiagonalDistinct? Find(IReadOnlyList<IReadOnlyList<LocalOperator>> effects, IReadOnlyList<LocalOperator> others)
     {
         if (effects[0].Count != effects[0][0].Levels || CommonBasis(effects, others) is not { } basis)
             return null;
@@ -27,8 +39,22 @@ internal static class DiagonalDistinct
         double[][] rest = [.. others.Select(a => Diagonal(a, basis))];
         (outcomes, rest) = Sorted(outcomes, rest);
         int[][] classes = Classes(outcomes, rest);
-        return classes.Aggregate(1.0, (product, c) => product * Subsets.ChooseReal(c.Length + 3, 3)) > MostStates ? null : Sum(outcomes, rest, classes);
+        return States(classes) > MostStates ? null : new DiagonalDistinct(outcomes, rest, classes);
     }
+
+    /// <summary>The probability.</summary>
+    public RoundedSum Probability()
+    {
+        UsedIndices used = new(_classes);
+        foreach (double[][] party in _outcomes)
+            used.Take(party);
+        foreach (double[] party in _others)
+            used.TakeLevel(party);
+        double value = used.Total() / AntisymmetricState.Factorial(_outcomes.Length + _others.Length);
+        return new RoundedSum(value, value * 1e-15);
+    }
+
+    private static double States(int[][] classes) => classes.Aggregate(1.0, (product, c) => product * Subsets.ChooseReal(c.Length + 3, 3));
 
     /// <summary>Level l is renamed to the outcome that it gives most likely to the first party, so that classes hold both at once.</summary>
     private static (double[][][] Outcomes, double[][] Others) Sorted(double[][][] outcomes, double[][] others)
@@ -46,13 +72,13 @@ internal static class DiagonalDistinct
         return ([.. outcomes.Select(p => p.Select(Renamed).ToArray())], [.. others.Select(Renamed)]);
     }
 
-    private static double[] Diagonal(LocalOperator a, Complex[,]? basis)
+    private static double[] Diagonal(LocalOperator a, Complex[,] basis)
     {
-        LocalOperator turned = basis is null ? a : a.In(basis);
+        LocalOperator turned = a.In(basis);
         return [.. Enumerable.Range(0, a.Levels).Select(l => Math.Max(0, turned.Re[l * (a.Levels + 1)]))];
     }
 
-    /// <summary>A basis in which all are diagonal, an empty matrix standing for the levels themselves; null when there is none.</summary>
+    /// <summary>A basis in which all are diagonal; null when there is none.</summary>
     private static Complex[,]? CommonBasis(IReadOnlyList<IReadOnlyList<LocalOperator>> effects, IReadOnlyList<LocalOperator> others)
     {
         LocalOperator[] all = [.. effects.SelectMany(e => e).Concat(others)];
@@ -91,16 +117,5 @@ internal static class DiagonalDistinct
         bool Same(double x, double y) => Math.Abs(x - y) <= Nothing;
         return others.All(o => Same(o[a], o[b]))
             && outcomes.All(p => Enumerable.Range(0, p.Length).All(k => Enumerable.Range(0, p.Length).All(l => Same(p[k][l], p[Other(k)][Other(l)]))));
-    }
-
-    private static RoundedSum Sum(double[][][] outcomes, double[][] others, int[][] classes)
-    {
-        UsedIndices used = new(classes);
-        foreach (double[][] party in outcomes)
-            used.Take(party);
-        foreach (double[] party in others)
-            used.TakeLevel(party);
-        double value = used.Total() / AntisymmetricState.Factorial(outcomes.Length + others.Length);
-        return new RoundedSum(value, value * 1e-15);
     }
 }

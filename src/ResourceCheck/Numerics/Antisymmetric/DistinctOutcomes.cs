@@ -22,7 +22,7 @@ internal static class DistinctOutcomes
             return default;
         if (m == d && AreEqual(effects))
             return MixedDiscriminant.Of([.. effects[0], .. others]).Times(AntisymmetricState.Factorial(m));
-        return DiagonalDistinct.Try(effects, others) ?? General(effects, others);
+        return DiagonalDistinct.Find(effects, others)?.Probability() ?? General(effects, others);
     }
 
     /// <summary>The double sign form, whatever the operators.</summary>
@@ -35,8 +35,16 @@ internal static class DistinctOutcomes
         return sums.Aggregate((a, b) => a + b).Times(MixedDiscriminant.Normalisation(n) / (Math.Pow(2, d - 1) * AntisymmetricState.Factorial(d - m)));
     }
 
-    /// <summary>Complex multiplications of the double sign form.</summary>
-    public static double Work(int n, int outcomes) => Math.Pow(2, outcomes - 1) * SignedDeterminants.Work(n, n);
+    /// <summary>Complex multiplications of <see cref="Of"/>.</summary>
+    public static double Work(IReadOnlyList<IReadOnlyList<LocalOperator>> effects, IReadOnlyList<LocalOperator> others)
+    {
+        int m = effects.Count, d = effects[0].Count, n = m + others.Count;
+        if (m > d)
+            return 0;
+        if (m == d && AreEqual(effects))
+            return MixedDiscriminant.Work(n, n);
+        return DiagonalDistinct.Find(effects, others)?.Work ?? Math.Pow(2, d - 1) * SignedDeterminants.Work(n, n);
+    }
 
     /// <summary>The same for a product state, of which party i finds k with the probability of row i, column k: a permanent.</summary>
     public static double OfProduct(double[][] probabilities)
