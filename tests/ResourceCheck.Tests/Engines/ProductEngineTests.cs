@@ -76,6 +76,64 @@ public sealed class ProductEngineTests
             Assert.True(Agree(protocol, RandomWorld.Of(name.Length, protocol.Parties.Count, protocol.Levels, lossy)));
     }
 
+    /// <summary>Sums that list no strings, at a size at which strings can be listed.</summary>
+    [Theory]
+    [InlineData("stranger-numbering", false)]
+    [InlineData("stranger-numbering", true)]
+    [InlineData("leader-draw", false)]
+    [InlineData("leader-draw", true)]
+    [InlineData("secret-sharing", false)]
+    [InlineData("secret-sharing-announced", false)]
+    [InlineData("secret-sharing-intercepted", false)]
+    [InlineData("removal", false)]
+    [InlineData("removal", true)]
+    public void Sums_without_strings_agree(string name, bool lossy)
+    {
+        Protocol protocol = LibraryFiles.Bind(name).Protocol;
+        World world = RandomWorld.Of(name.Length, protocol.Parties.Count, protocol.Levels, lossy);
+        EngineComparison.AssertEqual(Dense(protocol, world), Product(protocol, world, listed: false));
+    }
+
+    private const string Conditions = """
+        protocol "conditions"
+        parties P[1..4]
+        resource antisymmetric on all
+        round "r"
+          P[1], P[2] pick b from level, fourier
+          P[1], P[2] measure b as v
+          P[3], P[4] measure fourier as v
+          all announce v
+          keep when not (P[1].v = P[2].v and P[3].v = 0)
+        end
+        success when distinct(v of P[1..3]) or P[4].v = none
+        report "same" = probability(same(v of P[1..4]))
+        report "few" = probability(count(v = 0 over all) + count(v = 1 over all) <= 2 given P[1].b = level)
+        report "if" = probability(if P[1].v = 0 then distinct(v of P[2..4]) else P[2].v = 1)
+        report "not" = probability(not distinct(v of all) and P[1].v != 2)
+        report "all but one" = guess(P[1].v from v of P[2..3], P[1].b)
+        report "mean" = mean(P[1].v + P[2].v given P[3].v > 0)
+        report "bits" = information(P[1].v, P[1].b; P[2].v)
+        """;
+
+    [Property(MaxTest = 12)]
+    public bool Conditions_of_every_form_agree_without_strings(int seed)
+    {
+        Protocol protocol = TestScripts.Bind(Conditions);
+        World world = RandomWorld.Of(seed, 4, 4, seed % 2 == 0);
+        Evaluation dense = Dense(protocol, world);
+        EngineComparison.AssertEqual(dense, Product(protocol, world, listed: false));
+        EngineComparison.AssertEqual(dense, Product(protocol, world, listed: true));
+        return true;
+    }
+
+    private static Evaluation Dense(Protocol protocol, World world) => TestScripts.Evaluate(protocol, world, [.. protocol.Inputs.Select(i => i.Values[^1])]);
+
+    private static Evaluation Product(Protocol protocol, World world, bool listed)
+    {
+        Plan plan = Planner.Lay(protocol, world);
+        return ProductEngine.Evaluate(plan, [.. protocol.Inputs.Select(i => i.Values[^1])], ProductEngine.Estimate(plan, NoMatrices, "test"), NoMatrices, listed, null, default);
+    }
+
     public static TheoryData<string> Library => [.. LibraryFiles.Names];
 
     private static bool Agree(Protocol protocol, World world)

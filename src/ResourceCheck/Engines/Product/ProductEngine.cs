@@ -54,7 +54,14 @@ public static class ProductEngine
         Plan plan, IReadOnlyList<Value> inputs, EngineChoice choice, IReadOnlyDictionary<string, Complex[,]> matrices, CancellationToken cancellation,
         Func<IReadOnlyList<CopyType>, ListEvaluation>? lists = null)
     {
-        bool listed = IsListed(plan, Costs(plan, matrices, cancellation));
+        return Evaluate(plan, inputs, choice, matrices, IsListed(plan, Costs(plan, matrices, cancellation)), lists, cancellation);
+    }
+
+    /// <summary>Evaluates with strings of open outcomes listed or not, whichever the costs say.</summary>
+    internal static Evaluation Evaluate(
+        Plan plan, IReadOnlyList<Value> inputs, EngineChoice choice, IReadOnlyDictionary<string, Complex[,]> matrices, bool listed,
+        Func<IReadOnlyList<CopyType>, ListEvaluation>? lists, CancellationToken cancellation)
+    {
         OperatorBasis basis = new(plan.Protocol.Levels, plan.NeedsSink);
         ProductTally tally = new(plan, basis, listed);
         new ProductWalker(plan, new LocalModels(basis, matrices), tally, false, cancellation).Walk(Start(plan, basis, inputs));
