@@ -14,6 +14,9 @@ internal sealed class ProductTally : IProductTally
     /// <summary>Histories told for ends and failures.</summary>
     private const int HistoriesTold = 8;
 
+    /// <summary>As for fidelities: less than this is what sums of terms of order one leave of nothing.</summary>
+    private const double Nothing = 1e-14;
+
     private readonly Plan _plan;
     private readonly OperatorBasis _basis;
     private readonly bool _listed;
@@ -87,7 +90,8 @@ internal sealed class ProductTally : IProductTally
     public static Estimate Fraction(RoundedSum part, RoundedSum whole)
     {
         double value = FigureSum.Ratio(part.Value.Real, whole.Value.Real);
-        return Estimate.Exact(Tally.Clip(value)) with { RoundOff = whole.Value.Real > 0 ? (part.Error + whole.Error) / whole.Value.Real : 0 };
+        double roundOff = whole.Value.Real > 0 ? (part.Error + whole.Error) / whole.Value.Real : 0;
+        return Estimate.Exact(Math.Abs(value) <= Math.Max(roundOff, Nothing) ? 0 : Tally.Clip(value)) with { RoundOff = roundOff };
     }
 
     /// <summary>Everything added up; figures are of kept copies.</summary>
