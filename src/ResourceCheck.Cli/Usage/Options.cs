@@ -12,7 +12,7 @@ internal sealed class Options
     public static readonly string[] PageFormats = ["text", "markdown"];
 
     /// <summary>Choices of <c>--engine</c>.</summary>
-    public static readonly string[] Engines = ["dense"];
+    public static readonly string[] Engines = ["dense", "product"];
 
     public static Option<bool> Help { get; } = new("--help", "-h") { Description = "Show how a command is used.", Recursive = true };
 
@@ -24,7 +24,7 @@ internal sealed class Options
 
     public Option<string[]> Parameter { get; } = Value("--parameter", "NAME=VALUE", "Set a parameter: a number, a fraction, a list 3,4, a range 3..8, or all. May be repeated.");
 
-    public Option<string[]> Engine { get; } = Value("--engine", "NAME", "Evaluate with this engine (dense) instead of letting the program choose.", Engines);
+    public Option<string[]> Engine { get; } = Value("--engine", "NAME", "Evaluate with this engine (dense, product) instead of letting the program choose.", Engines);
 
     public Option<string[]> Memory { get; } = Value("--memory", "SIZE", "Most memory an engine may take, such as \"4 GB\".");
 
