@@ -76,6 +76,7 @@ internal static class RunJudgement
             Verdict = goals.Count == 0 ? Verdict.NoGoals : goals.All(g => g.Result.Met) ? Verdict.Met : Verdict.NotMet,
             VerdictText = GoalJudgement.Sentence(goals, all) + Outside(setup.Settings),
             Hint = Limits.Hint(goals, all, setup.Request),
+            Parties = longest.Protocol.Parties,
             Timeline = Provenance.Schedule(longest),
             Warnings = [.. setup.Notes, .. Notes(all), .. longest.World.Storage is { } storage ? StorageAdvice.Of(storage, storage.Time.Seconds) : [], .. StorageAdvice.OfError(all.Max(e => e.Actual.IntegrationError))],
         };

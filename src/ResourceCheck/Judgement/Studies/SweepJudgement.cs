@@ -2,6 +2,7 @@ using System.Diagnostics;
 using System.Text.Json;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts;
+using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Judgement.Studies;
@@ -88,6 +89,7 @@ internal static class SweepJudgement
         Overrides = request.Run.Overrides,
         Varied = variations,
         Points = points,
+        Goals = [.. setup.Settings[0].Protocol.Goals.Where(g => g.Metric.Kind != MetricKind.Harm).Select(g => new SweepGoal(PointFigures.Name(g.Metric), g.Text, g.Threshold))],
         Warnings = [.. setup.Notes],
     };
 }

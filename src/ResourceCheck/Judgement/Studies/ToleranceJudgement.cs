@@ -22,10 +22,10 @@ internal sealed class ToleranceJudgement
 
     private readonly RunRequest _request;
     private readonly Variation _varied;
-    private readonly string _goal;
+    private readonly Goal _goal;
     private readonly Dictionary<double, Point> _known = [];
 
-    private ToleranceJudgement(RunRequest request, Variation varied, string goal)
+    private ToleranceJudgement(RunRequest request, Variation varied, Goal goal)
     {
         _request = request;
         _varied = varied;
@@ -47,7 +47,7 @@ internal sealed class ToleranceJudgement
             return Outcome<ToleranceResult>.Failed([StudyMessages.GoalOnHarm()]);
         try
         {
-            return Outcome<ToleranceResult>.Of(new ToleranceJudgement(run, variation, goal.Text).Conclude(first, request));
+            return Outcome<ToleranceResult>.Of(new ToleranceJudgement(run, variation, goal).Conclude(first, request));
         }
         catch (PointFailedException failure)
         {
@@ -84,7 +84,10 @@ internal sealed class ToleranceJudgement
             Conditions = Provenance.Conditions(first),
             Overrides = request.Run.Overrides,
             Varied = _varied,
-            Goal = _goal,
+            Goal = _goal.Text,
+            Figure = PointFigures.Name(_goal.Metric),
+            Threshold = _goal.Threshold,
+            Scan = [.. _known.OrderBy(p => p.Key).Select(p => new ScanPoint(p.Key, p.Value.Figure))],
             Engine = At(scan[0]).Engine,
             Crossings = crossings,
             MetAt = (At(scan[0]).Met, At(scan[^1]).Met),
@@ -118,7 +121,7 @@ internal sealed class ToleranceJudgement
         Diagnostic[] errors = [.. setup.Findings.Concat(findings).Where(f => f.Severity == Severity.Error).Distinct()];
         if (errors.Length > 0)
             throw new PointFailedException(errors);
-        GoalResult result = GoalJudgement.Goals(all).Single(g => g.Goal.Text == _goal).Result;
+        GoalResult result = GoalJudgement.Goals(all).Single(g => g.Goal.Text == _goal.Text).Result;
         if (double.IsNaN(result.Margin))
             throw new PointFailedException([StudyMessages.UndefinedGoal(_varied.Path, _varied.Text(value))]);
         Setting setting = all[0].Setting;
