@@ -59,6 +59,7 @@ internal static class LatexText
         '>' => "\\textgreater{}",
         '|' => "\\textbar{}",
         '"' => "\\char34{}",
+        '[' or ']' => $"{{{c}}}", // else a row that begins with one would be read as an option of the row before
         '-' => "{-}", // else two of them would join to a dash
         '…' => "\\ldots{}",
         'Γ' => "$\\Gamma$",
