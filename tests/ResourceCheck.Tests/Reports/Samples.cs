@@ -2,6 +2,7 @@ using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Studies;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Resources;
 using ResourceCheck.Timeline;
 
@@ -73,6 +74,35 @@ internal static class Samples
         Hint = "Most is lost while Ada waits for Dov's message (0.061).",
         Timeline = Timeline,
         Warnings = [Warning],
+    };
+
+    private static FigureBand Band(FigureKind kind, string name, double value, double uncertainty, SampledBand? sampled) => new(
+        kind, FigureBand.Honest, name, Estimate.Exact(value), uncertainty, value - (1.96 * uncertainty), value + (1.96 * uncertainty), sampled,
+        [new("levels.decay[0].lifetime", 0.0009, 1e-9, false, 0.9 * uncertainty, 0.81), new("detection.efficiency", -0.2, 2e-9, true, -0.4358898943540674 * uncertainty, 0.19)]);
+
+    /// <summary>A goal in doubt; figures with and without draws, one that does not move, one that is not defined somewhere.</summary>
+    public static RunResult Uncertain { get; } = Full with
+    {
+        Goals = [Full.Goals[1] with { Text = "success >= 0.93", Threshold = 0.93, Margin = 0.01123456789, Band = Band(FigureKind.Goal, "success >= 0.93", 0.94123456789, 0.0123, null), Undecided = true }],
+        Verdict = Verdict.Undecided,
+        VerdictText = "Goal undecided: success is 0.9412 ± 0.012, within 0.9171 to 0.9653 at 95 %, the goal is at least 0.93.",
+        Uncertainty = new()
+        {
+            Inputs = [new("levels.decay[0].lifetime", 80, 10, "us"), new("detection.efficiency", 1, 0.01, "")],
+            Figures =
+            [
+                Band(FigureKind.Metric, "success", 0.94123456789, 0.0123, new(0.9406, 0.0131, 0.913, 0.962, 0)),
+                Band(FigureKind.Metric, "abort", 0, 0, null),
+                Band(FigureKind.Checkpoint, "after removal", 0.871267, double.NaN, new(0.87, 0.02, 0.83, 0.91, 3)),
+                Band(FigureKind.Time, "duration", 6.4e-5, 4.2e-7, null),
+                Band(FigureKind.Goal, "success >= 0.93", 0.94123456789, 0.0123, new(0.9406, 0.0131, 0.913, 0.962, 0)),
+            ],
+            Leading = Band(FigureKind.Goal, "success >= 0.93", 0.94123456789, 0.0123, null),
+            Samples = 200,
+            Redrawn = 97,
+            Seed = 1,
+            LeftOut = ["mean of k: sampled itself, so that differences of it are mostly chance"],
+        },
     };
 
     /// <summary>No goals, no metrics, no checkpoints, ideal conditions.</summary>
