@@ -123,7 +123,7 @@ internal static class JudgementMessages
         "P033",
         Severity.Note,
         $"{Words.And(uncertain.Select(u => $"`{u.Path}`"))} {(uncertain.Count == 1 ? "carries an uncertainty" : "carry uncertainties")}: figures are of the central values.",
-        "carry uncertainties through with run --uncertainty",
+        "carry uncertainties through with --uncertainty, which run, budget, sweep and tolerance know",
         Place.Of("conditions"));
 
     public static Diagnostic FigureOfDiscussion(Place at) => new(

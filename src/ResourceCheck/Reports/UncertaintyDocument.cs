@@ -35,6 +35,7 @@ internal static class UncertaintyDocument
         FigureKind.Yield => "yield",
         FigureKind.Time => "time",
         FigureKind.Goal => "goal",
+        FigureKind.Tolerance => "tolerance",
         _ => "loss",
     };
 

@@ -35,6 +35,8 @@ internal static class UncertaintyReport
         FigureKind.Goal => $"the figure of {figure.Name}",
         FigureKind.Time => figure.Name == "duration" ? "time per copy" : "time until the next kept copy",
         FigureKind.Yield => "copies kept",
+        FigureKind.Loss => $"the loss of {figure.Name}",
+        FigureKind.Tolerance => $"the tolerated {figure.Name}",
         _ => figure.Case == FigureBand.Honest ? figure.Name : $"{figure.Name} \"{figure.Case}\"",
     };
 

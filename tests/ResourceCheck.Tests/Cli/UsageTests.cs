@@ -81,10 +81,10 @@ public sealed partial class UsageTests : IDisposable
 
     [Theory]
     [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift --uncertainty --samples")]
-    [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads")]
+    [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --uncertainty")]
     [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm")]
-    [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until")]
-    [InlineData("sweep", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary")]
+    [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until --uncertainty")]
+    [InlineData("sweep", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --uncertainty")]
     [InlineData("verify", "--parameter --memory --format --out --quiet --seed --threads")]
     [InlineData("inspect", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads")]
     [InlineData("state", "--mend --format --out --quiet")]

@@ -1,6 +1,7 @@
 using System.Globalization;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Judgement;
+using ResourceCheck.Judgement.Studies;
 using ResourceCheck.Judgement.Uncertain;
 using Xunit;
 
@@ -155,6 +156,41 @@ public sealed class UncertaintyTests
         Diagnostic finding = Assert.Single(refused.Findings);
         Assert.Equal("P045", finding.Code);
         Assert.Contains("`detection.confusion[0][0]`", finding.Message, StringComparison.Ordinal);
+    }
+
+    /// <summary>F = exp(-t/T) at each t: u = F t/T² u(T), and the point where the band reaches the goal only in part is undecided.</summary>
+    [Fact]
+    public void A_sweep_carries_bands_at_every_point_and_through_its_journal()
+    {
+        string journal = Path.GetTempFileName();
+        try
+        {
+            SweepRequest request = new(
+                Request(Removal.Replace("GOAL", "0.9", StringComparison.Ordinal), Decay("80(10) us", "8.0(5) us")) with { Uncertainty = new UncertaintyRequest(0) }, [new("flight.time", "2 us..14 us:3")], journal, null);
+            SweepResult computed = Judge.Sweep(request).Value!, read = Judge.Sweep(request).Value!;
+            Assert.Equal([2.0, 8, 14], computed.Points.Select(p => p.Values[0]), (a, b) => Math.Abs(a - b) < 1e-12);
+            Assert.All(computed.Points, p => Assert.Equal(Math.Exp(-p.Values[0] / 80) * p.Values[0] / 640, p.Bands.Single(b => b.Name == "fidelity after").StandardUncertainty, 1e-8));
+            Assert.Equal([(true, false), (true, true), (false, false)], computed.Points.Select(p => (p.GoalsMet!.Value, p.Undecided)));
+            Assert.Equal(computed.Points.SelectMany(p => p.Bands), read.Points.SelectMany(p => p.Bands));
+            Assert.Equal(computed.Points.Select(p => p.Undecided), read.Points.Select(p => p.Undecided));
+            Assert.Equal("J007", Assert.Single(Judge.Sweep(request with { Run = request.Run with { Uncertainty = null } }).Findings).Code);
+        }
+        finally
+        {
+            File.Delete(journal);
+        }
+    }
+
+    /// <summary>With one source every part is the whole loss, and moves like the fidelity.</summary>
+    [Fact]
+    public void A_budget_of_one_source_has_the_uncertainty_of_the_fidelity()
+    {
+        RunRequest request = Request(Pair + "goal \"arrived\" >= 0.5\n", """{ "flight": { "A": { "depolarising": "0.10(1)" } } }""") with { Uncertainty = new UncertaintyRequest(0) };
+        BudgetResult budget = Judge.Budget(request).Value!;
+        SourceShare only = Assert.Single(budget.Shares);
+        Assert.Equal(0.0075, budget.Uncertainty!.Leading!.StandardUncertainty, 1e-9);
+        Assert.All([only.AloneUncertainty, only.RemovedUncertainty, only.ShareUncertainty], u => Assert.Equal(0.0075, u!.Value, 1e-9));
+        Assert.Null(Judge.Budget(request with { Uncertainty = null }).Value!.Uncertainty);
     }
 
     /// <summary>Both kinds of stencil are exact for cubics, and their error vanishes for parabolas.</summary>

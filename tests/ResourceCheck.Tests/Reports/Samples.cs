@@ -229,7 +229,17 @@ internal static class Samples
         At = "n = 4",
         Figures = (0.7828, 1),
         Loss = 0.2172,
-        Shares = [new(Source.FlightNoise, 0.2172, 0.2172, 0.2172), new(Source.Loss, 0, 1e-17, 0)],
+        Shares = [new(Source.FlightNoise, 0.2172, 0.2172, 0.2172) { AloneUncertainty = 0.01, RemovedUncertainty = 0.011, ShareUncertainty = 0.0105 }, new(Source.Loss, 0, 1e-17, 0)],
+        Uncertainty = new()
+        {
+            Inputs = Uncertain.Uncertainty!.Inputs,
+            Figures = [Band(FigureKind.Loss, "fidelity \"after removal\"", 0.2172, 0.0105, null) with { Case = "loss" }],
+            Leading = Band(FigureKind.Loss, "fidelity \"after removal\"", 0.2172, 0.0105, null) with { Case = "loss" },
+            Samples = 0,
+            Redrawn = 0,
+            Seed = 1,
+            LeftOut = [],
+        },
         Advice = "Improve first what is lost to noise in flight: without it fidelity \"after removal\" would be 1 (exact), with half of it 0.8914 (exact).",
         Warnings = [Warning],
     };
@@ -245,7 +255,7 @@ internal static class Samples
         Varied = [new("flight.default.length", false, 1, 3, "km", 3, false, false)],
         Points =
         [
-            new([1], [new("success", Estimate.Exact(0.9)), new("Bell value", Estimate.AtLeast(2.4312))], true, null),
+            new([1], [new("success", Estimate.Exact(0.9)), new("Bell value", Estimate.AtLeast(2.4312))], true, null) { Bands = [new("success", 0.0123, 0.876, 0.924)], Undecided = true },
             new([2], [new("success", Estimate.Exact(double.NaN)), new("Bell value", Estimate.AtLeast(2.1))], false, null),
             new([3], [], null, "No copy is kept. (E003)"),
         ],
@@ -282,8 +292,23 @@ internal static class Samples
         Varied = new("flight.Dov.length", false, 0, 60, "km", null, false, false),
         Goal = "\"after removal\" >= 0.75",
         Engine = Engine,
-        Crossings = [new(12.345678, true, Estimate.Exact(0.75), (12345.678, 6.05e-5)), new(40, false, Estimate.AtLeast(0.75), null)],
+        Crossings =
+        [
+            new(12.345678, true, Estimate.Exact(0.75), (12345.678, 6.05e-5)) { FromToday = 6.345678, Relative = 1.057613, Band = Band(FigureKind.Tolerance, "flight.Dov.length", 12.345678, 1.23, null) },
+            new(40, false, Estimate.AtLeast(0.75), null) { FromToday = 34, Relative = 5.666667 },
+        ],
         MetAt = (true, true),
+        Today = new(6, true, Estimate.Exact(0.7828)),
+        Uncertainty = new()
+        {
+            Inputs = Uncertain.Uncertainty!.Inputs,
+            Figures = [Band(FigureKind.Tolerance, "flight.Dov.length", 12.345678, 1.23, null)],
+            Leading = Band(FigureKind.Tolerance, "flight.Dov.length", 12.345678, 1.23, null),
+            Samples = 0,
+            Redrawn = 0,
+            Seed = 1,
+            LeftOut = [],
+        },
         Evaluations = 58,
         Warnings = [Warning],
     };

@@ -1,6 +1,7 @@
 using System.Diagnostics;
 using System.Text.Json;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Scripts;
 using ResourceCheck.Scripts.Syntax;
 
@@ -88,6 +89,6 @@ internal static class SweepJudgement
         Overrides = request.Run.Overrides,
         Varied = variations,
         Points = points,
-        Warnings = [.. setup.Notes],
+        Warnings = request.Run.Uncertainty is not null && UncertainInputs.Of(setup.Document).Count == 0 ? [.. setup.Notes, UncertaintyMessages.NothingUncertain()] : [.. setup.Notes],
     };
 }

@@ -32,6 +32,7 @@ internal static class UncertaintyMessages
     {
         FigureKind.Checkpoint => $"Fidelity \"{figure.Name}\"",
         FigureKind.Goal => $"The figure of the goal {figure.Name}",
+        FigureKind.Tolerance => $"The tolerated {figure.Name}",
         _ => figure.Name,
     };
 

@@ -73,6 +73,9 @@ public enum FigureKind
 
     /// <summary>A loss of a budget.</summary>
     Loss,
+
+    /// <summary>A tolerated value, in the unit varied.</summary>
+    Tolerance,
 }
 
 /// <summary>
