@@ -6,7 +6,7 @@ internal static class ExitCodes
     /// <summary>Computed; goals met, or none set.</summary>
     public const int Done = 0;
 
-    /// <summary>Computed; a goal is not met, a claim is refuted, or a script is not in its one shape.</summary>
+    /// <summary>Computed; a goal is not met or undecided, a claim is refuted, or a script is not in its one shape.</summary>
     public const int NotMet = 1;
 
     /// <summary>The input is wrong.</summary>

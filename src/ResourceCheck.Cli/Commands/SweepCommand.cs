@@ -3,6 +3,7 @@ using ResourceCheck.Diagnostics;
 using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Studies;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Reports;
 
 namespace ResourceCheck.Cli.Commands;
@@ -17,10 +18,11 @@ internal static class SweepCommand
     {
         Target target = Work.TargetOf(use, o);
         IReadOnlyList<KeyValuePair<string, string>> vary = use.Pairs(o.Vary, "flight.default.length=\"1 km..20 km:20\"");
+        UncertaintyRequest? uncertainty = Work.Uncertainty(use, o);
         if (Work.Request(use, o) is not { } request)
             return Work.Refuse(use);
         string? journal = target.File is { } file ? file + JournalEnding : null;
-        SweepRequest sweep = new(request with { Cancellation = token }, vary, journal, target.Quiet ? null : new Teller(use.Session.Terminal));
+        SweepRequest sweep = new(request with { Cancellation = token, Uncertainty = uncertainty }, vary, journal, target.Quiet ? null : new Teller(use.Session.Terminal));
         Outcome<SweepResult> outcome = await Work.Compute(() => Judge.Sweep(sweep), token);
         int code = Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => FigureBuilder.Of(result));
         if (journal is not null && outcome.Succeeded && code == ExitCodes.Done)

@@ -5,6 +5,7 @@ using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Reports;
 
 namespace ResourceCheck.Cli.Commands;
@@ -52,6 +53,17 @@ internal static class Work
 
     /// <summary>More threads than any machine has cores would only cost memory.</summary>
     private const int MostThreads = 4096;
+
+    /// <summary>Whether and how uncertainties are carried through; null where that is not asked for.</summary>
+    public static UncertaintyRequest? Uncertainty(Invocation use, Options o)
+    {
+        bool drawn = use.Command.Options.Contains(o.Draws);
+        int samples = drawn ? (int)use.Whole(o.Draws, 0, MostSamples, otherwise: UncertaintyRequest.DefaultSamples) : 0;
+        return use.Has(o.Uncertainty) ? new UncertaintyRequest(samples) : null;
+    }
+
+    /// <summary>More draws than this tell nothing more about conditions.</summary>
+    private const int MostSamples = 1_000_000;
 
     /// <summary>Computes apart from the waiting task, so that an interruption is answered at once; what still runs ends with the process.</summary>
     public static Task<Outcome<T>> Compute<T>(Func<Outcome<T>> compute, CancellationToken token)

@@ -48,6 +48,8 @@ internal sealed class Options
 
     public Option<string[]> Drift { get; } = Value("--drift", "FRACTION:FILE", "A fraction of runs under worse conditions, such as 0.01:worse.conditions.json: what failure and harms become, and the floor under them.");
 
+    public Option<bool> Uncertainty { get; } = new("--uncertainty") { Description = "Carry the standard uncertainties of the conditions, as in \"80(10) us\", through to the figures." };
+
     public Option<string[]> Failure { get; } = Value("--failure", "PROBABILITY", "What honest failure must not exceed, such as 1e-6.");
 
     public Option<string[]> Harm { get; } = Value("--harm", "PROBABILITY", "What every harm must not exceed; the same as --failure unless said, and with 1 harms are not looked at.");
@@ -57,6 +59,8 @@ internal sealed class Options
     public Option<string[]> Points { get; } = Value("--points", "NUMBER", "Number of times from 0 on. Default 41.");
 
     public Option<string[]> Samples { get; } = Value("--samples", "NUMBER", "Number of trajectories where figures must be sampled. Default 1000.");
+
+    public Option<string[]> Draws { get; } = Value("--samples", "NUMBER", "Draws that check first-order uncertainties; 0 for none. Default 200.");
 
     public Option<bool> Quiet { get; } = new("--quiet") { Description = "Show no warnings on standard error; documents still hold them." };
 

@@ -41,4 +41,11 @@ public sealed record NumericPath(string Path, double Value, string Unit);
 /// <param name="Path">Path in the conditions file, such as <c>levels.decay[0].lifetime</c>.</param>
 /// <param name="Value">Value in SI units.</param>
 /// <param name="StandardUncertainty">Standard uncertainty in SI units.</param>
-public sealed record UncertainQuantity(string Path, double Value, double StandardUncertainty);
+public sealed record UncertainQuantity(string Path, double Value, double StandardUncertainty)
+{
+    /// <summary>Unit as written, such as <c>us</c>; empty for a plain number.</summary>
+    public string Unit { get; init; } = "";
+
+    /// <summary>SI unit of <see cref="Value"/>, such as <c>s</c>; empty for a plain number.</summary>
+    public string BaseUnit { get; init; } = "";
+}

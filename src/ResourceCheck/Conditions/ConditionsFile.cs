@@ -5,6 +5,7 @@ using ResourceCheck.Conditions.Json;
 using ResourceCheck.Conditions.Keys;
 using ResourceCheck.Conditions.Resolving;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Quantities;
 using ResourceCheck.Scripts;
 using ResourceCheck.Scripts.Binding;
 
@@ -32,7 +33,7 @@ public static class ConditionsFile
             Name = name,
             Sha256 = Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(text))),
             Overrides = [.. overrides],
-            Uncertainties = [.. SettingWalk.NumbersOf(settings).Where(n => n.Uncertainty is not null).Select(n => new UncertainQuantity(n.Path, n.Value, n.Uncertainty!.Value))],
+            Uncertainties = [.. SettingWalk.NumbersOf(settings).Where(n => n.Uncertainty is not null).Select(n => new UncertainQuantity(n.Path, n.Value, n.Uncertainty!.Value) { Unit = n.UnitText, BaseUnit = UnitTable.BaseSymbolOf(n.Dimension) })],
             Root = settings,
             Matrices = new MatrixFiles(FolderOf(name), findings).ReadAll(settings),
         };

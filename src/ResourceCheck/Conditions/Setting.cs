@@ -15,7 +15,8 @@ internal abstract record Setting(Spot Spot, string Path);
 /// <param name="Value">Value.</param>
 /// <param name="Uncertainty">Standard uncertainty; null when none was given.</param>
 /// <param name="Dimension">What it measures.</param>
-internal sealed record NumberSetting(Spot Spot, string Path, double Value, double? Uncertainty, Dimension Dimension) : Setting(Spot, Path);
+/// <param name="UnitText">Unit as written; empty for a plain number.</param>
+internal sealed record NumberSetting(Spot Spot, string Path, double Value, double? Uncertainty, Dimension Dimension, string UnitText) : Setting(Spot, Path);
 
 /// <summary>A level.</summary>
 /// <param name="Spot">Where it stands.</param>

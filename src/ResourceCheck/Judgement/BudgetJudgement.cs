@@ -1,5 +1,6 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Quantities;
 using ResourceCheck.Resources;
 using ResourceCheck.Scripts.Binding;
@@ -14,6 +15,13 @@ internal static class BudgetJudgement
     private const double Nothing = 1e-12;
 
     public static Outcome<BudgetResult> Of(Setup setup)
+    {
+        Outcome<BudgetResult> shared = Shared(setup);
+        return shared.Value is { } budget && setup.Request.Uncertainty is not null ? BudgetUncertainty.Of(setup, budget) : shared;
+    }
+
+    /// <summary>The budget at the values of a setup.</summary>
+    public static Outcome<BudgetResult> Shared(Setup setup)
     {
         List<Diagnostic> findings = [];
         List<Evaluated> all = RunJudgement.All(setup, findings, cheats: false);

@@ -1,5 +1,6 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Timeline;
 
 namespace ResourceCheck.Judgement;
@@ -43,6 +44,9 @@ public sealed record BudgetResult
     /// <summary>One entry per source present, greatest share first.</summary>
     public required IReadOnlyList<SourceShare> Shares { get; init; }
 
+    /// <summary>What the uncertain values make of the whole loss; null when that was not asked for.</summary>
+    public UncertaintyResult? Uncertainty { get; init; }
+
     /// <summary>What to improve first, in words; null when nothing is lost.</summary>
     public required string? Advice { get; init; }
 
@@ -55,4 +59,14 @@ public sealed record BudgetResult
 /// <param name="Alone">Loss with this source only.</param>
 /// <param name="Removed">Loss that goes away when this source alone is removed.</param>
 /// <param name="Share">Shapley share: the mean, over all orders of adding sources, of what this one adds (L. S. Shapley, in Contributions to the Theory of Games II, 307 (1953)). Shares add up to the whole loss.</param>
-public sealed record SourceShare(Source Source, double Alone, double Removed, double Share);
+public sealed record SourceShare(Source Source, double Alone, double Removed, double Share)
+{
+    /// <summary>Standard uncertainty of <see cref="Alone"/> from the uncertain values, to first order; null when uncertainties are not carried through.</summary>
+    public double? AloneUncertainty { get; init; }
+
+    /// <summary>Standard uncertainty of <see cref="Removed"/>.</summary>
+    public double? RemovedUncertainty { get; init; }
+
+    /// <summary>Standard uncertainty of <see cref="Share"/>.</summary>
+    public double? ShareUncertainty { get; init; }
+}

@@ -35,6 +35,9 @@ internal static class JudgementCatalogue
         new("P030", "figure of a discussion", "A report or claim of a list protocol asks for the probability of something that a discussion made once for all copies.", "Let `success` or the harm of a dishonest case ask for it."),
         new("P031", "interception that knows too much", "An interception happens in flight, when no message has been sent yet, so a conditional block around it can use only the outsider's own values and hold only the outsider's lines.", "Condition it on the outsider's own picks."),
         new("P032", "choices out of reach", "On single copies every combination of a cheat's choices is tried; here there are none, or too many.", "Narrow the ranges, or make a case for each part."),
-        new("P033", "uncertainties are not carried through", "Values of the conditions are given with a standard uncertainty. Figures are computed from the central values; this is a note.", "Try the ends with --set, or sweep over the value."),
+        new("P033", "uncertainties are not carried through", "Values of the conditions are given with a standard uncertainty. Figures are computed from the central values; this is a note.", "Add --uncertainty to run, budget, sweep or tolerance."),
+        new("P045", "uncertain value that cannot be moved", "Uncertainties are carried through by moving each uncertain value a little while the others stay. Here the conditions allow that on no side, most often because numbers must add up to 1.", "Give the uncertainty to a value that others do not depend on.", "\"confusion\": [[\"0.98(1)\", 0.02], [0.02, 0.98]]"),
+        new("P046", "figure that bends", "To first order a figure is taken to change in proportion to each uncertain value. Here draws give another uncertainty, or the slope depends on how far one looks.", "Go by the sampled band; a sweep over the value shows the bend."),
+        new("P047", "nothing uncertain", "--uncertainty was asked for, but no value of the conditions carries one.", "Write the standard uncertainty behind a value, in units of its last digits.", "\"lifetime\": \"80(10) us\""),
     ];
 }

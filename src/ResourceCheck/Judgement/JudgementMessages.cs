@@ -125,8 +125,8 @@ internal static class JudgementMessages
     public static Diagnostic CentralValues(IReadOnlyList<Conditions.UncertainQuantity> uncertain) => new(
         "P033",
         Severity.Note,
-        $"{Words.And(uncertain.Select(u => $"`{u.Path}`"))} {(uncertain.Count == 1 ? "carries an uncertainty" : "carry uncertainties")}: figures are of the central values, and no uncertainty is carried through to them.",
-        null,
+        $"{Words.And(uncertain.Select(u => $"`{u.Path}`"))} {(uncertain.Count == 1 ? "carries an uncertainty" : "carry uncertainties")}: figures are of the central values.",
+        "carry uncertainties through with --uncertainty, which run, budget, sweep and tolerance know",
         Place.Of("conditions"));
 
     public static Diagnostic FigureOfDiscussion(Place at) => new(

@@ -1,6 +1,7 @@
 using ResourceCheck.Conditions;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Timeline;
 
@@ -15,7 +16,10 @@ internal static class RunJudgement
         List<Evaluated> all = All(setup, findings, cheats: true);
         if (findings.Any(f => f.Severity == Severity.Error))
             return Outcome<RunResult>.Failed([.. findings.Distinct()]);
-        RunResult result = Conclude(setup with { Notes = [.. setup.Notes, .. findings.Distinct()] }, all);
+        Outcome<UncertaintyResult>? uncertainty = Uncertainty(setup, all);
+        if (uncertainty is { Succeeded: false })
+            return Outcome<RunResult>.Failed([.. findings.Concat(uncertainty.Findings).Distinct()]);
+        RunResult result = Conclude(setup with { Notes = [.. setup.Notes, .. findings.Concat(uncertainty?.Findings ?? []).Distinct()] }, all, uncertainty?.Value);
         if (setup.Request.Drift is { } drift)
         {
             Outcome<DriftResult> drifted = DriftJudgement.Of(setup.Request, drift, result.Cases);
@@ -28,16 +32,20 @@ internal static class RunJudgement
     }
 
     /// <summary>Every setting and assignment of the private inputs, evaluated; what went wrong is added to the findings.</summary>
-    public static List<Evaluated> All(Setup setup, List<Diagnostic> findings, bool cheats) =>
-        [.. setup.Settings.SelectMany(s => Evaluate(s, setup.Request, findings, cheats))];
+    /// <param name="setup">What is evaluated.</param>
+    /// <param name="findings">Takes what went wrong.</param>
+    /// <param name="cheats">Whether cheating strategies are evaluated too.</param>
+    /// <param name="besideIdeal">Whether the same under ideal conditions is evaluated too; else the actual stands in its place.</param>
+    public static List<Evaluated> All(Setup setup, List<Diagnostic> findings, bool cheats, bool besideIdeal = true) =>
+        [.. setup.Settings.SelectMany(s => Evaluate(s, setup.Request, findings, cheats, besideIdeal))];
 
-    private static IEnumerable<Evaluated> Evaluate(Setting setting, RunRequest request, List<Diagnostic> findings, bool withCheats)
+    private static IEnumerable<Evaluated> Evaluate(Setting setting, RunRequest request, List<Diagnostic> findings, bool withCheats, bool besideIdeal)
     {
         Outcome<IReadOnlyList<Evaluation>> actual = Evaluator.Evaluate(setting, request);
         findings.AddRange(actual.Findings);
         if (actual.Value is not { } evaluations)
             return [];
-        Outcome<IReadOnlyList<Evaluation>> ideal = setting.IsIdeal ? actual : Evaluator.Evaluate(setting.Idealised(), request, mayKeepNothing: true);
+        Outcome<IReadOnlyList<Evaluation>> ideal = setting.IsIdeal || !besideIdeal ? actual : Evaluator.Evaluate(setting.Idealised(), request, mayKeepNothing: true);
         findings.AddRange(ideal.Succeeded ? [] : ideal.Findings);
         Outcome<IReadOnlyList<CheatEvaluation>> cheats = withCheats ? Evaluator.Cheats(setting, evaluations, request) : Outcome<IReadOnlyList<CheatEvaluation>>.Of([]);
         findings.AddRange(cheats.Findings);
@@ -45,11 +53,34 @@ internal static class RunJudgement
             ? evaluations.Zip(best, (a, i) => new Evaluated(setting, a, i) { Cheats = strategies }) : [];
     }
 
-    private static RunResult Conclude(Setup setup, IReadOnlyList<Evaluated> all)
+    /// <summary>Seconds per kept copy at the preparation rate, of every evaluation; empty when no rate is given.</summary>
+    public static IEnumerable<double> Paces(IReadOnlyList<Evaluated> all) => all.Select(e => SecondsPerKeptCopy(e.Setting, e.Actual.Yield)).OfType<double>();
+
+    /// <summary>Null when uncertainties are not asked for. Harms on lists are left out: each is a search of its own at every value.</summary>
+    private static Outcome<UncertaintyResult>? Uncertainty(Setup setup, IReadOnlyList<Evaluated> all)
     {
-        IReadOnlyList<(Goal Goal, GoalResult Result)> goals = GoalJudgement.Goals(all);
+        if (setup.Request.Uncertainty is not { } asked)
+            return null;
+        bool cheats = setup.Settings.All(s => s.Protocol.Lists is null);
+        IReadOnlyList<NamedFigure> centre = RunFigures.Of(cheats ? all : [.. all.Select(e => e with { Cheats = [] })]);
+        Outcome<UncertaintyResult> found = UncertaintyJudgement.Of(setup, centre, LeadingOf(all), asked.Samples, s => RunFigures.Of(s, cheats));
+        return cheats || found.Value is not { } result || all.All(e => e.Cheats.Count == 0) ? found
+            : found with { Value = result with { LeftOut = [.. result.LeftOut, "harms, each of which is a search of its own on lists; goals on them are judged at the central values"] } };
+    }
+
+    private static FigureKey LeadingOf(IReadOnlyList<Evaluated> all)
+    {
+        (Goal Goal, GoalResult Result)[] goals = [.. GoalJudgement.Goals(all).OrderBy(g => g.Result.Margin)];
+        return goals.Length > 0 ? new(FigureKind.Goal, FigureBand.Honest, goals[0].Result.Text)
+            : MetricChoice.Of([], all) is { Kind: MetricKind.Checkpoint, Label: var label } ? new(FigureKind.Checkpoint, FigureBand.Honest, label)
+            : new(FigureKind.Metric, FigureBand.Honest, "success");
+    }
+
+    private static RunResult Conclude(Setup setup, IReadOnlyList<Evaluated> all, UncertaintyResult? uncertainty)
+    {
+        IReadOnlyList<(Goal Goal, GoalResult Result)> goals = GoalJudgement.WithBands(GoalJudgement.Goals(all), uncertainty);
         YieldResult yield = MetricGathering.Yield(all);
-        double[] paces = [.. all.Select(e => SecondsPerKeptCopy(e.Setting, e.Actual.Yield)).OfType<double>()];
+        double[] paces = [.. Paces(all)];
         Setting longest = setup.Settings.MaxBy(s => s.Plan.Duration.Seconds)!;
         return new RunResult
         {
@@ -73,7 +104,8 @@ internal static class RunJudgement
             SecondsPerKeptCopy = paces.Length == 0 ? null : paces.Max(),
             SecondsPerKeptCopyRange = MetricGathering.Range(paces),
             Goals = [.. goals.Select(g => g.Result)],
-            Verdict = goals.Count == 0 ? Verdict.NoGoals : goals.All(g => g.Result.Met) ? Verdict.Met : Verdict.NotMet,
+            Verdict = GoalJudgement.VerdictOf(goals),
+            Uncertainty = uncertainty,
             VerdictText = GoalJudgement.Sentence(goals, all) + Outside(setup.Settings),
             Hint = Limits.Hint(goals, all, setup.Request),
             Parties = longest.Protocol.Parties,

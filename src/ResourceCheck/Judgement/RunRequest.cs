@@ -1,3 +1,5 @@
+using ResourceCheck.Judgement.Uncertain;
+
 namespace ResourceCheck.Judgement;
 
 /// <summary>What a user asks for: texts and choices, nothing checked yet.</summary>
@@ -29,6 +31,9 @@ public sealed record RunRequest
 
     /// <summary>A fraction of runs that are under worse conditions without anybody noticing; null for none.</summary>
     public Drift? Drift { get; init; }
+
+    /// <summary>How the uncertainties of the conditions are carried through to the figures; null leaves them out.</summary>
+    public UncertaintyRequest? Uncertainty { get; init; }
 
     /// <summary>Most memory an engine may take, bytes; null uses what the machine has free.</summary>
     public double? MemoryLimit { get; init; }

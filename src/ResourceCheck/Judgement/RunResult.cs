@@ -1,5 +1,6 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Timeline;
 
 namespace ResourceCheck.Judgement;
@@ -48,6 +49,9 @@ public sealed record RunResult
 
     /// <summary>What a drift does to failure and harms; null when none was asked for.</summary>
     public DriftResult? Drift { get; init; }
+
+    /// <summary>What the uncertainties of the conditions make of the figures; null when that was not asked for.</summary>
+    public UncertaintyResult? Uncertainty { get; init; }
 
     /// <summary>Checkpoints in order.</summary>
     public required IReadOnlyList<CheckpointResult> Checkpoints { get; init; }
@@ -167,9 +171,16 @@ public sealed record YieldResult(Estimate Value, double Heralded, double Seen, d
 /// <param name="Text">The goal as written.</param>
 /// <param name="Value">The figure compared.</param>
 /// <param name="Threshold">What it is compared with.</param>
-/// <param name="Met">Whether it is met.</param>
+/// <param name="Met">Whether it is met at the central values.</param>
 /// <param name="Margin">How far inside (positive) or outside (negative) the goal the figure lies.</param>
-public sealed record GoalResult(string Text, Estimate Value, double Threshold, bool Met, double Margin);
+public sealed record GoalResult(string Text, Estimate Value, double Threshold, bool Met, double Margin)
+{
+    /// <summary>The figure's band; null when no uncertainties were carried through, or not to this figure.</summary>
+    public FigureBand? Band { get; init; }
+
+    /// <summary>Whether the goal is met at one end of the band and missed at the other: the conditions are not known well enough to tell.</summary>
+    public bool Undecided { get; init; }
+}
 
 /// <summary>A line of the schedule with names in place of indices.</summary>
 /// <param name="Start">s.</param>
@@ -191,4 +202,7 @@ public enum Verdict
 
     /// <summary>Some goal is not met.</summary>
     NotMet,
+
+    /// <summary>No goal is missed throughout its band, but some is met at one end of it and missed at the other.</summary>
+    Undecided,
 }

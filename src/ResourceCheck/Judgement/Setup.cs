@@ -31,7 +31,7 @@ internal sealed record Setup(
             AddSetting(tree, assignment, document, settings, findings);
         findings.AddRange(document?.Findings ?? []);
         findings.AddRange(choiceFindings);
-        if (document?.Value is { Uncertainties: { Count: > 0 } uncertain })
+        if (request.Uncertainty is null && document?.Value is { Uncertainties: { Count: > 0 } uncertain })
             findings.Add(JudgementMessages.CentralValues(uncertain));
         IReadOnlyList<Diagnostic> told = [.. findings.Distinct()];
         return Outcome<Setup>.From(new Setup(request, choices, document?.Value, settings, told), told);

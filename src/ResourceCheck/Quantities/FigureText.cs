@@ -56,6 +56,19 @@ internal static class FigureText
     public static string Difference(double value, Rounding rounding = Rounding.Nearest) =>
         Math.Abs(value) < RoundOff ? "0" : Number(rounding == Rounding.Nearest && Math.Abs(value) < 1 ? Math.Round(value, RoundOffDecimals) : value, rounding);
 
+    /// <summary>A standard uncertainty: two significant digits, since the third says nothing (JCGM 100:2008, 7.2.6).</summary>
+    public static string Uncertainty(double value)
+    {
+        if (!double.IsFinite(value) || value == 0)
+            return Number(value);
+        string text = value.ToString("E1", CultureInfo.InvariantCulture);
+        double rounded = double.Parse(text, CultureInfo.InvariantCulture);
+        int exponent = int.Parse(text[(text.IndexOf('E', StringComparison.Ordinal) + 1)..], CultureInfo.InvariantCulture);
+        return Math.Abs(rounded) is < LeastFixed or >= GreatestFixed
+            ? $"{text[..text.IndexOf('E', StringComparison.Ordinal)]}e{exponent.ToString(CultureInfo.InvariantCulture)}"
+            : rounded.ToString($"F{Math.Max(0, 1 - exponent)}", CultureInfo.InvariantCulture);
+    }
+
     /// <summary>A rough size, such as an estimated amount of work.</summary>
     public static string About(double value) =>
         double.IsFinite(value) ? value.ToString(Math.Abs(value) < GreatestFixed ? "0.##" : "0.#e0", CultureInfo.InvariantCulture) : NonFinite(value);

@@ -24,7 +24,11 @@ internal static class BudgetDocument
             JsonParts.Number(json, "alone", s.Alone);
             JsonParts.Number(json, "removed", s.Removed);
             JsonParts.Number(json, "share", s.Share);
+            JsonParts.Number(json, "aloneUncertainty", s.AloneUncertainty);
+            JsonParts.Number(json, "removedUncertainty", s.RemovedUncertainty);
+            JsonParts.Number(json, "shareUncertainty", s.ShareUncertainty);
         });
+        UncertaintyDocument.Write(json, budget.Uncertainty);
         json.WriteString("advice", budget.Advice);
         JsonParts.Warnings(json, budget.Warnings);
     });

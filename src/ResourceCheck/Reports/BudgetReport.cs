@@ -16,7 +16,9 @@ internal static class BudgetReport
             null,
             [new Section(null, shares, [
                 "Alone: lost when this source acts by itself. Removed: regained when it alone goes. Share: its Shapley share, the mean of what it adds over all orders of adding sources; shares add up to the whole loss.",
-                .. budget.Advice is { } advice ? [advice] : Array.Empty<string>()])],
+                .. budget.Uncertainty is { Inputs.Count: > 0 } ? ["± is the standard uncertainty of a share from the uncertain values, to first order (linear)."] : Array.Empty<string>(),
+                .. budget.Advice is { } advice ? [advice] : Array.Empty<string>()]),
+                .. budget.Uncertainty is { Leading: { Moves: true } leading } uncertainty ? [UncertaintyReport.Ranking(leading, uncertainty)] : Array.Empty<Section>()],
             shares,
             Provenance.Of(budget),
             budget.Warnings);
@@ -45,10 +47,10 @@ internal static class BudgetReport
     }
 
     private static Table Shares(BudgetResult budget) => new(
-        [new("source", "Source"), new("alone", "Alone"), new("removed", "Removed"), new("share", "Share"), new("label", "Label")],
+        [new("source", "Source"), new("alone", "Alone"), new("removed", "Removed"), new("share", "Share"), new("shareUncertainty", "±"), new("label", "Label")],
         [
-            .. budget.Shares.Select(s => (IReadOnlyList<Cell>)[Cell.Of(Name(s.Source)), Lost(s.Alone), Lost(s.Removed), Lost(s.Share), Cell.Of("exact")]),
-            .. budget.Shares.Count == 0 ? [] : new[] { (IReadOnlyList<Cell>)[Cell.Of("together"), Cell.Empty, Cell.Empty, Lost(budget.Loss), Cell.Of("exact")] },
+            .. budget.Shares.Select(s => (IReadOnlyList<Cell>)[Cell.Of(Name(s.Source)), Lost(s.Alone), Lost(s.Removed), Lost(s.Share), Cell.Of(s.ShareUncertainty), Cell.Of("exact")]),
+            .. budget.Shares.Count == 0 ? [] : new[] { (IReadOnlyList<Cell>)[Cell.Of("together"), Cell.Empty, Cell.Empty, Lost(budget.Loss), Cell.Of(budget.Uncertainty?.Leading?.StandardUncertainty), Cell.Of("exact")] },
         ]);
 
     private static DifferenceCell Lost(double value) => new(value, Rounding.Nearest, "");

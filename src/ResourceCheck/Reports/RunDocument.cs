@@ -37,6 +37,7 @@ internal static class RunDocument
         JsonParts.Number(json, "duration", run.Duration);
         Range(json, run.DurationRange, "durationRange");
         JsonParts.Objects(json, "goals", run.Goals, g => Goal(json, g));
+        UncertaintyDocument.Write(json, run.Uncertainty);
         JsonParts.Objects<object>(json, "claims", [], _ => { });
         JsonParts.Objects<object>(json, "sources", [], _ => { });
         JsonParts.Timeline(json, run.Timeline);
@@ -47,6 +48,7 @@ internal static class RunDocument
     {
         Verdict.Met => "met",
         Verdict.NotMet => "not met",
+        Verdict.Undecided => "undecided",
         _ => "no goals",
     };
 
@@ -149,6 +151,7 @@ internal static class RunDocument
         JsonParts.EstimateFields(json, goal.Value);
         JsonParts.Number(json, "threshold", goal.Threshold);
         json.WriteBoolean("met", goal.Met);
+        json.WriteBoolean("undecided", goal.Undecided);
         JsonParts.Number(json, "margin", goal.Margin);
     }
 }

@@ -1,5 +1,6 @@
 using ResourceCheck.Engines;
 using ResourceCheck.Judgement;
+using ResourceCheck.Judgement.Uncertain;
 
 namespace ResourceCheck.Reports;
 
@@ -26,6 +27,7 @@ internal static class RunReport
             [
                 new Section(null, Short(figures, run), Remarks(run)),
                 .. Goals(run),
+                .. UncertaintyReport.Sections(run.Uncertainty, f => IsShown(f, run)),
                 .. Attacks(run.Attacks, a => Noticed(run, a), run.List is not null),
                 .. Drift(run),
                 .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
@@ -35,6 +37,15 @@ internal static class RunReport
             Provenance.Of(run),
             run.Warnings);
     }
+
+    /// <summary>Uncertainties are shown of what the short table shows; goals stand there under the name of their figure.</summary>
+    private static bool IsShown(FigureBand band, RunResult run) => band.Kind switch
+    {
+        FigureKind.Goal => false,
+        FigureKind.Checkpoint => run.Checkpoints.Any(c => !c.BuiltIn && c.Name == band.Name),
+        FigureKind.Metric => band.Case == HonestCase || band.Name == "harm",
+        _ => true,
+    };
 
     private static Table Short(IReadOnlyList<Figure> figures, RunResult run) => new(
         [
@@ -79,6 +90,7 @@ internal static class RunReport
             .. figures.Select(LongRow),
             .. run.Checkpoints.SelectMany(c => c.Branches.Where(b => b.Outcomes.Count > 0).SelectMany(b => OfBranch(c, b))),
             .. run.Goals.SelectMany(OfGoal),
+            .. (run.Uncertainty?.Figures ?? []).SelectMany(OfBand),
             .. run.Parameters.Select(p => Row($"parameter {p.Name}", p.IsDefault ? $"{string.Join(", ", p.Values)} (default)" : string.Join(", ", p.Values))),
             Row("verdict", run.VerdictText),
         ]);
@@ -93,9 +105,39 @@ internal static class RunReport
 
     private static IEnumerable<IReadOnlyList<Cell>> OfGoal(GoalResult goal)
     {
-        yield return Row($"goal {goal.Text}", goal.Met ? "met" : "not met", goal.Value);
+        yield return Row($"goal {goal.Text}", Standing(goal), goal.Value);
         yield return Row($"margin of goal {goal.Text}", "", goal.Value with { Value = goal.Margin, Low = double.NaN, High = double.NaN });
     }
+
+    private static string Standing(GoalResult goal) => (goal.Undecided, goal.Met) switch
+    {
+        (true, true) => "undecided (met at the central values)",
+        (true, false) => "undecided (not met at the central values)",
+        (_, true) => "met",
+        _ => "not met",
+    };
+
+    // The label column tells how the band was found.
+    private static IEnumerable<IReadOnlyList<Cell>> OfBand(FigureBand band)
+    {
+        string unit = band.Kind == FigureKind.Time ? "s" : "", name = UncertaintyReport.Name(band);
+        yield return BandRow(band, $"standard uncertainty of {name}", unit, band.StandardUncertainty, "linear", null, null);
+        yield return BandRow(band, $"band of {name}", unit, band.Value.Value, "linear", band.Low, band.High);
+        if (band.Sampled is { } sampled)
+        {
+            yield return BandRow(band, $"standard uncertainty of {name}", unit, sampled.StandardUncertainty, "sampled", null, null);
+            yield return BandRow(band, $"band of {name}", unit, sampled.Mean, "sampled", sampled.Low, sampled.High);
+        }
+
+        foreach (Sensitivity s in band.Sensitivities)
+            yield return BandRow(band, $"share of the variance of {name} from {s.Path}", "", s.Share, "linear", null, null);
+    }
+
+    private static IReadOnlyList<Cell> BandRow(FigureBand band, string quantity, string unit, double value, string method, double? low, double? high) =>
+    [
+        Cell.Of(band.Case), Cell.Of(quantity), Cell.Of(unit), Cell.Of(value, unit), Cell.Of(method), Cell.Of(low, unit), Cell.Of(high, unit),
+        low is null ? Cell.Empty : Cell.Of(UncertaintyResult.Confidence), Cell.Empty, Cell.Empty,
+    ];
 
     private static IReadOnlyList<Cell> Row(string quantity, string note, Estimate? value = null) => value is null
         ? [Cell.Of(HonestCase), Cell.Of(quantity), .. Enumerable.Repeat(Cell.Empty, EmptyCells), Cell.Of(note)]
@@ -143,7 +185,7 @@ internal static class RunReport
             [new("goal", "Goal"), new("met", "Met"), new("value", "Value"), new("label", "Label"), new("margin", "Margin", Lead: "margin ")],
             [.. run.Goals.Select(g => (IReadOnlyList<Cell>)
             [
-                Cell.Of(g.Text), Cell.Of(g.Met ? "met" : "not met"), Truth.CellOf(g.Value), Cell.Of(Truth.Describe(g.Value)), Margin(g),
+                Cell.Of(g.Text), Cell.Of(Standing(g)), Truth.CellOf(g.Value), Cell.Of(Truth.Describe(g.Value)), Margin(g),
             ])],
             Headed: false), []),
     ];

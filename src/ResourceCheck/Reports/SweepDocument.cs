@@ -18,11 +18,16 @@ internal static class SweepDocument
             {
                 json.WriteString("name", f.Key);
                 JsonParts.EstimateFields(json, f.Value);
+                PointBand? band = p.Bands.FirstOrDefault(b => b.Name == f.Key);
+                JsonParts.Number(json, "standardUncertainty", band?.StandardUncertainty);
+                JsonParts.Number(json, "bandLow", band?.Low);
+                JsonParts.Number(json, "bandHigh", band?.High);
             });
             if (p.GoalsMet is { } met)
                 json.WriteBoolean("goalsMet", met);
             else
                 json.WriteNull("goalsMet");
+            json.WriteBoolean("undecided", p.Undecided);
             json.WriteString("failure", p.Failure);
         });
         JsonParts.Warnings(json, sweep.Warnings);

@@ -17,6 +17,7 @@ public sealed class ExitCodeTests : IDisposable
     [InlineData(Verdict.Met, 0)]
     [InlineData(Verdict.NoGoals, 0)]
     [InlineData(Verdict.NotMet, 1)]
+    [InlineData(Verdict.Undecided, 1)]
     public async Task Run_exits_by_its_verdict(Verdict verdict, int code)
     {
         _tool.Run = Outcome<RunResult>.Of(Samples.Full with { Verdict = verdict });

@@ -41,6 +41,17 @@ public sealed class FigureTextTests
     public void Times_carry_a_unit_that_suits_them(double seconds, string shown) => Assert.Equal(shown, FigureText.Time(seconds));
 
     [Theory]
+    [InlineData(0, "0")]
+    [InlineData(0.0126, "0.013")]
+    [InlineData(0.00401, "0.0040")]
+    [InlineData(0.0996, "0.10")]
+    [InlineData(12.34, "12")]
+    [InlineData(123.4, "120")]
+    [InlineData(3.21e-7, "3.2e-7")]
+    [InlineData(double.NaN, "undefined")]
+    public void Uncertainties_show_two_digits(double value, string shown) => Assert.Equal(shown, FigureText.Uncertainty(value));
+
+    [Theory]
     [InlineData(512, "512 B")]
     [InlineData(1_250_000, "1.25 MB")]
     [InlineData(6.4e10, "64 GB")]

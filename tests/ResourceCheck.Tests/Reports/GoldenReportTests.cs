@@ -16,7 +16,7 @@ public sealed class GoldenReportTests
         [ReportFormat.Latex] = "tex",
     };
 
-    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies"];
+    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "run-uncertain", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies"];
 
     public static TheoryData<string, ReportFormat> All()
     {
@@ -109,7 +109,7 @@ public sealed class GoldenReportTests
                 ReportWriter.Write(Samples.State, "0.1.0", format, writer);
                 break;
             default:
-                RunResult run = name switch { "run-full" => Samples.Full, "run-bare" => Samples.Bare, _ => Samples.Odd };
+                RunResult run = name switch { "run-full" => Samples.Full, "run-bare" => Samples.Bare, "run-uncertain" => Samples.Uncertain, _ => Samples.Odd };
                 ReportWriter.Write(run, format, writer);
                 break;
         }

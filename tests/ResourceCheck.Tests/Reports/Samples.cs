@@ -2,6 +2,7 @@ using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Studies;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Resources;
 using ResourceCheck.Timeline;
 
@@ -73,6 +74,35 @@ internal static class Samples
         Hint = "Most is lost while Ada waits for Dov's message (0.061).",
         Timeline = Timeline,
         Warnings = [Warning],
+    };
+
+    private static FigureBand Band(FigureKind kind, string name, double value, double uncertainty, SampledBand? sampled) => new(
+        kind, FigureBand.Honest, name, Estimate.Exact(value), uncertainty, value - (1.96 * uncertainty), value + (1.96 * uncertainty), sampled,
+        [new("levels.decay[0].lifetime", 0.0009, 1e-9, false, 0.9 * uncertainty, 0.81), new("detection.efficiency", -0.2, 2e-9, true, -0.4358898943540674 * uncertainty, 0.19)]);
+
+    /// <summary>A goal in doubt; figures with and without draws, one that does not move, one that is not defined somewhere.</summary>
+    public static RunResult Uncertain { get; } = Full with
+    {
+        Goals = [Full.Goals[1] with { Text = "success >= 0.93", Threshold = 0.93, Margin = 0.01123456789, Band = Band(FigureKind.Goal, "success >= 0.93", 0.94123456789, 0.0123, null), Undecided = true }],
+        Verdict = Verdict.Undecided,
+        VerdictText = "Goal undecided: success is 0.9412 ± 0.012, within 0.9171 to 0.9653 at 95 %, the goal is at least 0.93.",
+        Uncertainty = new()
+        {
+            Inputs = [new("levels.decay[0].lifetime", 80, 10, "us"), new("detection.efficiency", 1, 0.01, "")],
+            Figures =
+            [
+                Band(FigureKind.Metric, "success", 0.94123456789, 0.0123, new(0.9406, 0.0131, 0.913, 0.962, 0)),
+                Band(FigureKind.Metric, "abort", 0, 0, null),
+                Band(FigureKind.Checkpoint, "after removal", 0.871267, double.NaN, new(0.87, 0.02, 0.83, 0.91, 3)),
+                Band(FigureKind.Time, "duration", 6.4e-5, 4.2e-7, null),
+                Band(FigureKind.Goal, "success >= 0.93", 0.94123456789, 0.0123, new(0.9406, 0.0131, 0.913, 0.962, 0)),
+            ],
+            Leading = Band(FigureKind.Goal, "success >= 0.93", 0.94123456789, 0.0123, null),
+            Samples = 200,
+            Redrawn = 97,
+            Seed = 1,
+            LeftOut = ["mean of k: sampled itself, so that differences of it are mostly chance"],
+        },
     };
 
     /// <summary>No goals, no metrics, no checkpoints, ideal conditions.</summary>
@@ -199,7 +229,17 @@ internal static class Samples
         At = "n = 4",
         Figures = (0.7828, 1),
         Loss = 0.2172,
-        Shares = [new(Source.FlightNoise, 0.2172, 0.2172, 0.2172), new(Source.Loss, 0, 1e-17, 0)],
+        Shares = [new(Source.FlightNoise, 0.2172, 0.2172, 0.2172) { AloneUncertainty = 0.01, RemovedUncertainty = 0.011, ShareUncertainty = 0.0105 }, new(Source.Loss, 0, 1e-17, 0)],
+        Uncertainty = new()
+        {
+            Inputs = Uncertain.Uncertainty!.Inputs,
+            Figures = [Band(FigureKind.Loss, "fidelity \"after removal\"", 0.2172, 0.0105, null) with { Case = "loss" }],
+            Leading = Band(FigureKind.Loss, "fidelity \"after removal\"", 0.2172, 0.0105, null) with { Case = "loss" },
+            Samples = 0,
+            Redrawn = 0,
+            Seed = 1,
+            LeftOut = [],
+        },
         Advice = "Improve first what is lost to noise in flight: without it fidelity \"after removal\" would be 1 (exact), with half of it 0.8914 (exact).",
         Warnings = [Warning],
     };
@@ -215,7 +255,7 @@ internal static class Samples
         Varied = [new("flight.default.length", false, 1, 3, "km", 3, false, false)],
         Points =
         [
-            new([1], [new("success", Estimate.Exact(0.9)), new("Bell value", Estimate.AtLeast(2.4312))], true, null),
+            new([1], [new("success", Estimate.Exact(0.9)), new("Bell value", Estimate.AtLeast(2.4312))], true, null) { Bands = [new("success", 0.0123, 0.876, 0.924)], Undecided = true },
             new([2], [new("success", Estimate.Exact(double.NaN)), new("Bell value", Estimate.AtLeast(2.1))], false, null),
             new([3], [], null, "No copy is kept. (E003)"),
         ],
@@ -256,8 +296,23 @@ internal static class Samples
         Threshold = 0.75,
         Scan = [new(0, Estimate.Exact(0.9)), new(12.345678, Estimate.Exact(0.75)), new(25, Estimate.Exact(0.6)), new(40, Estimate.AtLeast(0.75)), new(60, Estimate.Exact(0.8))],
         Engine = Engine,
-        Crossings = [new(12.345678, true, Estimate.Exact(0.75), (12345.678, 6.05e-5)), new(40, false, Estimate.AtLeast(0.75), null)],
+        Crossings =
+        [
+            new(12.345678, true, Estimate.Exact(0.75), (12345.678, 6.05e-5)) { FromToday = 6.345678, Relative = 1.057613, Band = Band(FigureKind.Tolerance, "flight.Dov.length", 12.345678, 1.23, null) },
+            new(40, false, Estimate.AtLeast(0.75), null) { FromToday = 34, Relative = 5.666667 },
+        ],
         MetAt = (true, true),
+        Today = new(6, true, Estimate.Exact(0.7828)),
+        Uncertainty = new()
+        {
+            Inputs = Uncertain.Uncertainty!.Inputs,
+            Figures = [Band(FigureKind.Tolerance, "flight.Dov.length", 12.345678, 1.23, null)],
+            Leading = Band(FigureKind.Tolerance, "flight.Dov.length", 12.345678, 1.23, null),
+            Samples = 0,
+            Redrawn = 0,
+            Seed = 1,
+            LeftOut = [],
+        },
         Evaluations = 58,
         Warnings = [Warning],
     };

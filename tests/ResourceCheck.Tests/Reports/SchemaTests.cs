@@ -11,6 +11,7 @@ public sealed class SchemaTests
     [InlineData("run-full", "result")]
     [InlineData("run-bare", "result")]
     [InlineData("run-odd", "result")]
+    [InlineData("run-uncertain", "result")]
     [InlineData("verification", "verification")]
     [InlineData("inspection", "inspection")]
     [InlineData("state", "state")]

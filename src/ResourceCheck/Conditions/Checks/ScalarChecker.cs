@@ -77,7 +77,7 @@ internal sealed class ScalarChecker(Findings findings)
             _ => true,
         };
         if (fits)
-            return new NumberSetting(node.Spot, path, parsed.Value, parsed.Uncertainty, dimension);
+            return new NumberSetting(node.Spot, path, parsed.Value, parsed.Uncertainty, dimension, parsed.UnitText);
         findings.Add(ConditionsMessages.OutOfBounds(node.Spot, path, Written(node), bounds, shape));
         return null;
     }

@@ -1,5 +1,6 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Scripts.Binding;
 
 namespace ResourceCheck.Judgement.Studies;
@@ -15,8 +16,9 @@ internal static class PointFigures
         List<Evaluated> all = setup.Value is { } read ? RunJudgement.All(read, findings, cheats: false) : [];
         if (findings.FirstOrDefault(f => f.Severity == Severity.Error) is { } error)
             return new SweepPoint(values, [], null, $"{error.Message} ({error.Code})");
-        bool[] met = [.. GoalJudgement.Goals(all).Where(g => g.Goal.Metric.Kind != MetricKind.Harm).Select(g => g.Result.Met)];
-        return new SweepPoint(values, [.. Figures(all)], met.Length == 0 ? null : met.All(m => m), null);
+        (Goal Goal, GoalResult Result)[] goals = [.. GoalJudgement.Goals(all).Where(g => g.Goal.Metric.Kind != MetricKind.Harm)];
+        SweepPoint point = new(values, [.. Figures(all)], goals.Length == 0 ? null : goals.All(g => g.Result.Met), null);
+        return request.Uncertainty is null ? point : WithBands(point, setup.Value!, all, goals);
     }
 
     /// <summary>Name of a metric among the figures of a point.</summary>
@@ -25,6 +27,24 @@ internal static class PointFigures
         MetricKind.Checkpoint => $"fidelity {metric.Label}",
         MetricKind.Report => metric.Label,
         _ => metric.ToString(),
+    };
+
+    private static SweepPoint WithBands(SweepPoint point, Setup setup, IReadOnlyList<Evaluated> all, IReadOnlyList<(Goal Goal, GoalResult Result)> goals)
+    {
+        Outcome<UncertaintyResult> found = UncertaintyJudgement.Of(setup, RunFigures.Of(all), null, samples: 0, s => RunFigures.Of(s, cheats: false));
+        return found.Value is not { } uncertainty ? new SweepPoint(point.Values, [], null, $"{found.Findings[0].Message} ({found.Findings[0].Code})") : point with
+        {
+            Bands = [.. uncertainty.Figures.Where(f => point.Figures.Any(p => p.Key == NameOf(f))).Select(f => new PointBand(NameOf(f), f.StandardUncertainty, f.Low, f.High))],
+            Undecided = GoalJudgement.VerdictOf(GoalJudgement.WithBands(goals, uncertainty)) == Verdict.Undecided,
+        };
+    }
+
+    /// <summary>The name under which a point shows a figure; that of a goal is shown nowhere.</summary>
+    private static string NameOf(FigureBand figure) => figure.Kind switch
+    {
+        FigureKind.Checkpoint => $"fidelity {figure.Name}",
+        FigureKind.Metric or FigureKind.Yield => figure.Name,
+        _ => "",
     };
 
     private static IEnumerable<KeyValuePair<string, Estimate>> Figures(IReadOnlyList<Evaluated> all)

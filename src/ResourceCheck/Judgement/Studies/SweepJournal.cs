@@ -27,7 +27,7 @@ internal sealed class SweepJournal : IDisposable
     /// <summary>What a sweep is told apart by: everything that its points depend on.</summary>
     public static string Identity(RunRequest request, IEnumerable<Variation> varied)
     {
-        string all = string.Join('\n', new[] { Provenance.Version, request.Script.Sha256, request.Script.Text, request.Conditions?.Sha256, request.Conditions?.Text, request.Engine }
+        string all = string.Join('\n', new[] { Provenance.Version, request.Script.Sha256, request.Script.Text, request.Conditions?.Sha256, request.Conditions?.Text, request.Engine, request.Uncertainty is null ? null : "with uncertainties" }
             .Concat(request.Overrides.Concat(request.Parameters).Select(p => $"{p.Key}={p.Value}")).Concat(varied.Select(v => v.ToString())));
         return Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(all)));
     }
@@ -67,7 +67,9 @@ internal sealed class SweepJournal : IDisposable
         [.. point.Values.Select(Exact)],
         [.. point.Figures.Select(f => new Entry(f.Key, Exact(f.Value.Value), f.Value.Label, Exact(f.Value.Low), Exact(f.Value.High), Exact(f.Value.Confidence), Exact(f.Value.Present)))],
         point.GoalsMet,
-        point.Failure)));
+        point.Failure,
+        [.. point.Bands.Select(b => new BandEntry(b.Name, Exact(b.StandardUncertainty), Exact(b.Low), Exact(b.High)))],
+        point.Undecided)));
 
     public void Dispose() => _file.Dispose();
 
@@ -78,7 +80,11 @@ internal sealed class SweepJournal : IDisposable
             [.. line.Values.Select(Number)],
             [.. line.Figures.Select(f => KeyValuePair.Create(f.Name, new Estimate(Number(f.Value), f.Label, Number(f.Low), Number(f.High), Number(f.Confidence), Number(f.Present))))],
             line.GoalsMet,
-            line.Failure));
+            line.Failure)
+        {
+            Bands = [.. (line.Bands ?? []).Select(b => new PointBand(b.Name, Number(b.StandardUncertainty), Number(b.Low), Number(b.High)))],
+            Undecided = line.Undecided,
+        });
     }
 
     private void Write(string line)
@@ -95,7 +101,9 @@ internal sealed class SweepJournal : IDisposable
 
     private static double Number(string text) => double.Parse(text, NumberStyles.Float, CultureInfo.InvariantCulture);
 
-    private sealed record Line(int Index, string[] Values, Entry[] Figures, bool? GoalsMet, string? Failure);
+    private sealed record Line(int Index, string[] Values, Entry[] Figures, bool? GoalsMet, string? Failure, BandEntry[]? Bands, bool Undecided);
+
+    private sealed record BandEntry(string Name, string StandardUncertainty, string Low, string High);
 
     private sealed record Entry(string Name, string Value, TruthLabel Label, string Low, string High, string Confidence, string Present);
 }

@@ -1,6 +1,7 @@
 using System.Diagnostics;
 using System.Text.Json;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Scripts;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Scripts.Syntax;
@@ -90,6 +91,6 @@ internal static class SweepJudgement
         Varied = variations,
         Points = points,
         Goals = [.. setup.Settings[0].Protocol.Goals.Where(g => g.Metric.Kind != MetricKind.Harm).Select(g => new SweepGoal(PointFigures.Name(g.Metric), g.Text, g.Threshold))],
-        Warnings = [.. setup.Notes],
+        Warnings = request.Run.Uncertainty is not null && UncertainInputs.Of(setup.Document).Count == 0 ? [.. setup.Notes, UncertaintyMessages.NothingUncertain()] : [.. setup.Notes],
     };
 }

@@ -45,7 +45,21 @@ public sealed record SweepGoal(string Figure, string Text, double Threshold);
 /// <param name="Figures">Figures by name, the worst over inputs; empty when the point failed.</param>
 /// <param name="GoalsMet">Whether all goals are met; null when there are none or the point failed.</param>
 /// <param name="Failure">What stood against the point, with its code; null when it was computed.</param>
-public sealed record SweepPoint(IReadOnlyList<double> Values, IReadOnlyList<KeyValuePair<string, Estimate>> Figures, bool? GoalsMet, string? Failure);
+public sealed record SweepPoint(IReadOnlyList<double> Values, IReadOnlyList<KeyValuePair<string, Estimate>> Figures, bool? GoalsMet, string? Failure)
+{
+    /// <summary>Bands of figures from the uncertain values, to first order; empty when uncertainties are not carried through.</summary>
+    public IReadOnlyList<PointBand> Bands { get; init; } = [];
+
+    /// <summary>Whether no goal is missed throughout its band, but some is missed at one end of it.</summary>
+    public bool Undecided { get; init; }
+}
+
+/// <summary>The band of a figure at one point.</summary>
+/// <param name="Name">Name of the figure.</param>
+/// <param name="StandardUncertainty">Standard uncertainty to first order; not a number where a derivative is not defined.</param>
+/// <param name="Low">Lower end of the 95 % band.</param>
+/// <param name="High">Upper end.</param>
+public sealed record PointBand(string Name, double StandardUncertainty, double Low, double High);
 
 /// <summary>State of a sweep.</summary>
 /// <param name="Done">Points finished.</param>

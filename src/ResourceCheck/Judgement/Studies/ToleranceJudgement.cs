@@ -1,6 +1,7 @@
 using MathNet.Numerics.RootFinding;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Scripts.Syntax;
 
@@ -47,7 +48,8 @@ internal sealed class ToleranceJudgement
             return Outcome<ToleranceResult>.Failed([StudyMessages.GoalOnHarm()]);
         try
         {
-            return Outcome<ToleranceResult>.Of(new ToleranceJudgement(run, variation, goal).Conclude(first, request));
+            ToleranceJudgement judgement = new(run, variation, goal);
+            return judgement.WithBands(judgement.Conclude(first, request), first);
         }
         catch (PointFailedException failure)
         {
@@ -76,6 +78,7 @@ internal sealed class ToleranceJudgement
                 crossings.Add(Crossing(scan[i], scan[i + 1], below));
         }
 
+        TodaysValue? today = FindToday();
         return new ToleranceResult
         {
             Version = Provenance.Version,
@@ -89,7 +92,8 @@ internal sealed class ToleranceJudgement
             Threshold = _goal.Threshold,
             Scan = [.. _known.OrderBy(p => p.Key).Select(p => new ScanPoint(p.Key, p.Value.Figure))],
             Engine = At(scan[0]).Engine,
-            Crossings = crossings,
+            Crossings = [.. crossings.Select(c => c with { FromToday = c.Value - today?.Value, Relative = today is { Value: not 0 } now ? (c.Value - now.Value) / Math.Abs(now.Value) : null })],
+            Today = today,
             MetAt = (At(scan[0]).Met, At(scan[^1]).Met),
             Evaluations = _known.Count,
             Warnings = first.Notes,
@@ -102,6 +106,46 @@ internal sealed class ToleranceJudgement
         Point at = At(value);
         return new Crossing(value, metBelow, at.Figure, at.Flight);
     }
+
+    /// <summary>Today's value with its figure, evaluated as the conditions stand; null when there is none, or an inherited one that does not act.</summary>
+    private TodaysValue? FindToday()
+    {
+        if (Setup.From(_request).Value is not { } setup || Today.Of(setup, _varied) is not { } today || PointOf(setup, []) is not { } now)
+            return null;
+        bool acts = today.Own || (TryAt(today.Value) is { } put && Math.Abs(put.Margin - now.Margin) < SameMargin);
+        return acts ? new TodaysValue(today.Value, now.Met, now.Figure) : null;
+    }
+
+    private Outcome<ToleranceResult> WithBands(ToleranceResult result, Setup first)
+    {
+        if (_request.Uncertainty is null)
+            return Outcome<ToleranceResult>.Of(result);
+        IReadOnlyList<UncertainInput> inputs = UncertainInputs.Of(first.Document);
+        Crossing[] smooth = [.. result.Crossings.Where(c => !_varied.WholeOnly && c.Figure.Label != TruthLabel.Sampled)];
+        Outcome<FigureBand>[] found = [.. smooth.Select(c => CrossingUncertainty.Of(
+            _varied.Into(_request, c.Value), inputs, _varied, c.Value, s => PointOf(s, [])?.Margin, v => TryAt(v)?.Margin))];
+        if (found.Any(f => !f.Succeeded))
+            return Outcome<ToleranceResult>.Failed([.. found.SelectMany(f => f.Findings).Distinct()]);
+        FigureBand[] bands = [.. found.Select(f => f.Value!)];
+        return Outcome<ToleranceResult>.Of(result with
+        {
+            Crossings = [.. result.Crossings.Select(c => c with { Band = bands.ElementAtOrDefault(Array.IndexOf(smooth, c)) })],
+            Uncertainty = new UncertaintyResult
+            {
+                Inputs = inputs,
+                Figures = bands,
+                Leading = bands.FirstOrDefault(),
+                Samples = 0,
+                Redrawn = 0,
+                Seed = _request.Seed,
+                LeftOut = smooth.Length == result.Crossings.Count ? [] : [_varied.WholeOnly ? "tolerated whole numbers, which do not move smoothly" : "crossings of sampled figures"],
+            },
+            Warnings = inputs.Count == 0 ? [.. result.Warnings, UncertaintyMessages.NothingUncertain()] : result.Warnings,
+        });
+    }
+
+    /// <summary>Margins closer than this are of the same conditions.</summary>
+    private const double SameMargin = 1e-12;
 
     /// <summary>One value evaluated.</summary>
     private sealed record Point(double Margin, bool Met, Estimate Figure, EngineChoice Engine, (double Metres, double Seconds)? Flight);
@@ -117,13 +161,24 @@ internal sealed class ToleranceJudgement
     {
         List<Diagnostic> findings = [];
         Outcome<Setup> setup = Setup.From(_varied.Into(_request, value));
-        List<Evaluated> all = setup.Value is { } read ? RunJudgement.All(read, findings, cheats: false) : [];
+        Point? point = setup.Value is { } read ? PointOf(read, findings) : null;
         Diagnostic[] errors = [.. setup.Findings.Concat(findings).Where(f => f.Severity == Severity.Error).Distinct()];
-        if (errors.Length > 0)
-            throw new PointFailedException(errors);
+        return errors.Length > 0 ? throw new PointFailedException(errors)
+            : point ?? throw new PointFailedException([StudyMessages.UndefinedGoal(_varied.Path, _varied.Text(value))]);
+    }
+
+    /// <summary>A value evaluated, wherever it lies; null where that cannot be done.</summary>
+    private Point? TryAt(double value) => Setup.From(_varied.Into(_request, value)).Value is { } setup ? PointOf(setup, []) : null;
+
+    /// <summary>A setup evaluated; null where the goal's figure is not defined.</summary>
+    private Point? PointOf(Setup setup, List<Diagnostic> findings)
+    {
+        List<Evaluated> all = RunJudgement.All(setup, findings, cheats: false, besideIdeal: false);
+        if (findings.Any(f => f.Severity == Severity.Error))
+            return null;
         GoalResult result = GoalJudgement.Goals(all).Single(g => g.Goal.Text == _goal.Text).Result;
         if (double.IsNaN(result.Margin))
-            throw new PointFailedException([StudyMessages.UndefinedGoal(_varied.Path, _varied.Text(value))]);
+            return null;
         Setting setting = all[0].Setting;
         var flights = setting.Protocol.Holders.Select(p => setting.World.Parties[p].Flight).Select(f => (Metres: f.Length.Metres, f.Time.Seconds)).Where(f => f.Metres > 0 && f.Seconds > 0).ToArray();
         return new Point(result.Margin, result.Met, result.Value, all[0].Actual.Engine, flights.Length == 0 ? null : flights.MaxBy(f => f.Seconds));

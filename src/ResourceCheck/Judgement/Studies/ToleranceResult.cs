@@ -1,5 +1,6 @@
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
+using ResourceCheck.Judgement.Uncertain;
 
 namespace ResourceCheck.Judgement.Studies;
 
@@ -45,6 +46,12 @@ public sealed record ToleranceResult
     /// <summary>Whether the goal is met at the ends of the range.</summary>
     public required (bool From, bool To) MetAt { get; init; }
 
+    /// <summary>The value that the conditions, or the script for a parameter, give today; null when they give none.</summary>
+    public TodaysValue? Today { get; init; }
+
+    /// <summary>What the other uncertain values make of the crossings, a figure each, in their order; null when that was not asked for.</summary>
+    public UncertaintyResult? Uncertainty { get; init; }
+
     /// <summary>Number of evaluations.</summary>
     public required int Evaluations { get; init; }
 
@@ -60,7 +67,23 @@ public sealed record ScanPoint(double Value, Estimate Figure);
 /// <param name="MetBelow">Whether the goal is met below it and missed above, rather than the reverse.</param>
 /// <param name="Figure">The goal's figure there.</param>
 /// <param name="Flight">Longest flight there: distance in m and time in s; null where nothing flies.</param>
-public sealed record Crossing(double Value, bool MetBelow, Estimate Figure, (double Metres, double Seconds)? Flight);
+public sealed record Crossing(double Value, bool MetBelow, Estimate Figure, (double Metres, double Seconds)? Flight)
+{
+    /// <summary>How far it lies above today's value (below: negative), in the unit varied; null when there is none today.</summary>
+    public double? FromToday { get; init; }
+
+    /// <summary>The same relative to today's value; null when there is none today or it is 0.</summary>
+    public double? Relative { get; init; }
+
+    /// <summary>Its band from the other uncertain values; null when uncertainties are not carried through, or for whole numbers.</summary>
+    public FigureBand? Band { get; init; }
+}
+
+/// <summary>The value that is varied, as it is without being varied.</summary>
+/// <param name="Value">The value, in the unit varied.</param>
+/// <param name="Met">Whether it meets the goal.</param>
+/// <param name="Figure">The goal's figure there.</param>
+public sealed record TodaysValue(double Value, bool Met, Estimate Figure);
 
 /// <summary>What <c>tolerance</c> is asked.</summary>
 /// <param name="Run">Script, conditions and what holds at every value.</param>
