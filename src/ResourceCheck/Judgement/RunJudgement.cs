@@ -96,10 +96,11 @@ internal static class RunJudgement
             Cases = [new CaseResult("honest", [], MetricGathering.Metrics(all)), .. CaseGathering.Cases(all)],
             Attacks = CaseGathering.Attacks(all),
             ListMethod = all.Select(e => e.Actual.ListMethod).FirstOrDefault(m => m is not null),
-            List = ListOf(longest, yield),
+            List = ListOf(longest, yield.Value.Value),
             DurationRange = MetricGathering.Range(setup.Settings.Select(s => s.Plan.Duration.Seconds)),
             Checkpoints = MetricGathering.Checkpoints(all),
             Yield = yield,
+            Rates = RateChainJudgement.Of(all),
             Duration = longest.Plan.Duration.Seconds,
             SecondsPerKeptCopy = paces.Length == 0 ? null : paces.Max(),
             SecondsPerKeptCopyRange = MetricGathering.Range(paces),
@@ -129,15 +130,17 @@ internal static class RunJudgement
         }
     }
 
-    internal static (int Copies, double? Seconds)? ListOf(Setting setting, YieldResult yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
-        : (copies, SecondsPerKeptCopy(setting, yield.Value.Value) is { } each ? (copies * each) + setting.Plan.Duration.Seconds : null);
+    internal static (int Copies, double? Seconds)? ListOf(Setting setting, double yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
+        : (copies, SecondsPerKeptCopy(setting, yield) is { } each ? (copies * each) + setting.Plan.Duration.Seconds : null);
 
     /// <summary>Preparation and use of copies overlap, so the slower of the two sets the pace.</summary>
-    private static double? SecondsPerKeptCopy(Setting setting, double yield)
+    internal static double? SecondsPerKeptCopy(Setting setting, double yield)
     {
         if (setting.World.Preparation is not { } preparation)
             return null;
-        double period = 1 / (preparation.Attempts.PerSecond * preparation.Success.Value);
-        return Math.Max(period, setting.Plan.Duration.Seconds) / yield;
+        return Math.Max(PreparationPeriod(preparation), setting.Plan.Duration.Seconds) / yield;
     }
+
+    /// <summary>Mean time between two prepared copies, s.</summary>
+    internal static double PreparationPeriod(PreparationModel preparation) => 1 / (preparation.Attempts.PerSecond * preparation.Success.Value);
 }

@@ -59,6 +59,9 @@ public sealed record RunResult
     /// <summary>Kept fraction of prepared copies, with its factors.</summary>
     public required YieldResult Yield { get; init; }
 
+    /// <summary>What becomes of attempts stage by stage, with rates where the conditions give a preparation rate.</summary>
+    public RateChain? Rates { get; init; }
+
     /// <summary>Time of one copy, s; the longest over listed parameter values.</summary>
     public required double Duration { get; init; }
 

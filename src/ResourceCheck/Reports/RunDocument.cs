@@ -34,6 +34,7 @@ internal static class RunDocument
             JsonParts.Number(json, "list", run.List?.Copies);
             JsonParts.Number(json, "secondsPerList", run.List?.Seconds);
         });
+        RateTable.Write(json, run.Rates);
         JsonParts.Number(json, "duration", run.Duration);
         Range(json, run.DurationRange, "durationRange");
         JsonParts.Objects(json, "goals", run.Goals, g => Goal(json, g));

@@ -28,6 +28,7 @@ internal static class RunReport
                 new Section(null, Short(figures, run), Remarks(run)),
                 .. Goals(run),
                 .. UncertaintyReport.Sections(run.Uncertainty, f => IsShown(f, run)),
+                .. RateTable.Sections(run.Rates),
                 .. Attacks(run.Attacks, a => Noticed(run, a), run.List is not null),
                 .. Drift(run),
                 .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
@@ -91,6 +92,7 @@ internal static class RunReport
             .. run.Checkpoints.SelectMany(c => c.Branches.Where(b => b.Outcomes.Count > 0).SelectMany(b => OfBranch(c, b))),
             .. run.Goals.SelectMany(OfGoal),
             .. (run.Uncertainty?.Figures ?? []).SelectMany(OfBand),
+            .. (run.Rates?.Stages ?? []).SelectMany(OfStage),
             .. run.Parameters.Select(p => Row($"parameter {p.Name}", p.IsDefault ? $"{string.Join(", ", p.Values)} (default)" : string.Join(", ", p.Values))),
             Row("verdict", run.VerdictText),
         ]);
@@ -107,6 +109,14 @@ internal static class RunReport
     {
         yield return Row($"goal {goal.Text}", Standing(goal), goal.Value);
         yield return Row($"margin of goal {goal.Text}", "", goal.Value with { Value = goal.Margin, Low = double.NaN, High = double.NaN });
+    }
+
+    private static IEnumerable<IReadOnlyList<Cell>> OfStage(RateStage stage)
+    {
+        if (stage.Probability is { } probability)
+            yield return Row($"probability of {stage.Name}", stage.Note, probability);
+        if (stage.Rate is { } rate)
+            yield return LongRow(new Figure(HonestCase, $"rate behind {stage.Name}", "", "", "1/s", (stage.Probability ?? Estimate.Exact(1)) with { Value = rate, Low = double.NaN, High = double.NaN }, null, null, "", false));
     }
 
     private static string Standing(GoalResult goal) => (goal.Undecided, goal.Met) switch

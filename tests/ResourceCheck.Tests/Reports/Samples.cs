@@ -66,6 +66,20 @@ internal static class Samples
             ], false),
         ],
         Yield = new(Estimate.Exact(0.8123), 0.85, 0.9556470588235294, 1, true),
+        Rates = new()
+        {
+            Stages =
+            [
+                new("attempts", null, 10000, "attempts to prepare a copy"),
+                new("preparation", Estimate.Exact(0.2), 2000, "an attempt gives a copy"),
+                new("flight", Estimate.Exact(0.85), 1700, "all heralded qudits arrive"),
+                new("verdict", new(0.95, TruthLabel.Sampled, 0.94, 0.96, 0.99), 1615, "success"),
+            ],
+            PreparationPeriod = 5e-4,
+            Occupied = 6.4e-5,
+            Pace = "A copy is prepared every 500 us and occupies the parties for 64 us: preparation sets the pace.",
+            At = "x = 1",
+        },
         Duration = 6.4e-5,
         SecondsPerKeptCopy = 0.000615536,
         Goals = [new("\"after removal\" >= 0.90", Estimate.AtLeast(0.871267), 0.9, false, -0.028733), new("success >= 0.9", Estimate.Exact(0.94123456789), 0.9, true, 0.04123456789)],
@@ -115,6 +129,7 @@ internal static class Samples
         Cases = [new("honest", [], [])],
         Checkpoints = [],
         Yield = new(Estimate.Exact(1), 1, 1, 1, false),
+        Rates = null,
         Duration = 0,
         SecondsPerKeptCopy = null,
         Goals = [],

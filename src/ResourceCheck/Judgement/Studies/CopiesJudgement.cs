@@ -173,7 +173,7 @@ internal sealed class CopiesJudgement
             CheckedUpTo = CheckedUpTo(copies),
             Steps = [.. _steps.Values.Where(s => s.Harm is not null || s.Copies == copies || s.Copies == copies - 1)],
             Attacks = CaseGathering.Attacks(all),
-            Seconds = RunJudgement.ListOf(all[0].Setting, yield)?.Seconds,
+            Seconds = RunJudgement.ListOf(all[0].Setting, yield.Value.Value)?.Seconds,
             Warnings = setup.Notes,
         };
     }
