@@ -1,5 +1,6 @@
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Reports;
@@ -17,6 +18,6 @@ internal static class BudgetCommand
         if (Work.Request(use, o) is not { } request)
             return Work.Refuse(use);
         Outcome<BudgetResult> outcome = await Work.Compute(() => Judge.Budget(request with { Cancellation = token, Uncertainty = uncertainty }), token);
-        return Work.Finish(use, target, outcome, (budget, writer, colour) => ReportWriter.Write(budget, target.Format, writer, colour), _ => ExitCodes.Done, budget => budget.Warnings);
+        return Work.Finish(use, target, outcome, (budget, writer, colour) => ReportWriter.Write(budget, target.Format, writer, colour), _ => ExitCodes.Done, budget => budget.Warnings, budget => FigureBuilder.Of(budget) is { } f ? [f] : []);
     }
 }

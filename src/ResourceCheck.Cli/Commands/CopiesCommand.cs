@@ -1,6 +1,7 @@
 using System.Globalization;
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Studies;
 using ResourceCheck.Reports;
@@ -21,7 +22,7 @@ internal static class CopiesCommand
             return Work.Refuse(use);
         CopiesRequest copies = new(request with { Cancellation = token }, failure, harm, target.Quiet ? null : new Teller(use.Session.Terminal));
         Outcome<CopiesResult> outcome = await Work.Compute(() => Judge.Copies(copies), token);
-        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings);
+        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => [FigureBuilder.Of(result)]);
     }
 
     /// <summary>Tells each number whose harms were searched, which takes seconds to minutes.</summary>

@@ -11,7 +11,7 @@ internal static class ExplainCommand
     public static Task<int> Execute(Invocation use, Options o, CancellationToken token)
     {
         bool markdown = use.Choice(o.PageFormat, Options.PageFormats) == "markdown";
-        string? file = Work.FileOf(use, o);
+        string? file = Work.FileOf(use, o, o.Out);
         string? code = use.Only("a code", optional: true);
         Explanation? found = Catalogue.All.FirstOrDefault(e => string.Equals(e.Code, code, StringComparison.OrdinalIgnoreCase));
         if (code is not null && found is null)

@@ -18,7 +18,7 @@ internal static class FormatCommand
         string? name = use.Only("a script");
         use.Exclude(o.Check, o.Write);
         use.Exclude(o.Write, o.Out);
-        string? target = Work.FileOf(use, o);
+        string? target = Work.FileOf(use, o, o.Out);
         InputText? script = use.Read(name);
         return Task.FromResult(script is null || use.Findings.Count > 0 ? Work.Refuse(use, NothingFormatted) : Format(use, o, name!, script, target));
     }

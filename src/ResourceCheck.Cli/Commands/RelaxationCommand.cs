@@ -1,5 +1,6 @@
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Reports;
 
@@ -27,6 +28,6 @@ internal static class RelaxationCommand
             return Work.Refuse(use);
         RelaxationRequest request = new(conditions, overrides, emitters, until, points, samples, seed, token);
         Outcome<RelaxationResult> outcome = await Work.Compute(() => Judge.Relaxation(request), token);
-        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings);
+        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => [FigureBuilder.Of(result)]);
     }
 }

@@ -1,5 +1,6 @@
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Reports;
@@ -19,7 +20,7 @@ internal static class RunCommand
             return Work.Refuse(use);
         RunRequest request = asked with { Drift = drift, Uncertainty = uncertainty };
         Outcome<RunResult> outcome = await Work.Compute(() => use.Session.Library.Run(request), token);
-        return Work.Finish(use, target, outcome, (run, writer, colour) => ReportWriter.Write(run, target.Format, writer, colour), CodeOf, run => run.Warnings);
+        return Work.Finish(use, target, outcome, (run, writer, colour) => ReportWriter.Write(run, target.Format, writer, colour), CodeOf, run => run.Warnings, run => FigureBuilder.Of(run) is { } f ? [f] : []);
     }
 
     private static int CodeOf(RunResult run) => run.Verdict is Verdict.NotMet or Verdict.Undecided ? ExitCodes.NotMet : ExitCodes.Done;

@@ -13,7 +13,7 @@ internal static class SchemaCommand
         string? schema = name is null ? null : Schemas.Find(name);
         if (name is not null && schema is null)
             use.Findings.Add(Findings.UnknownSchema(name, Schemas.Names));
-        string? file = Work.FileOf(use, o);
+        string? file = Work.FileOf(use, o, o.Out);
         return Task.FromResult(use.Findings.Count > 0
             ? Work.Refuse(use, "nothing was written")
             : Work.Deliver(use, file, schema!.TrimEnd('\n') + "\n", ExitCodes.Done));

@@ -1,5 +1,6 @@
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Reports;
 
@@ -26,7 +27,7 @@ internal static class StorageCommand
             return Work.Refuse(use);
         StorageRequest request = new(conditions, overrides, emitters, until, points);
         Outcome<StorageResult> outcome = await Work.Compute(() => Judge.Storage(request), token);
-        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings);
+        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => [FigureBuilder.Of(result)]);
     }
 
     /// <summary>Number of emitters, number of times and last time (s) of a curve.</summary>

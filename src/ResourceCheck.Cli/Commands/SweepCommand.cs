@@ -1,5 +1,6 @@
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Studies;
 using ResourceCheck.Judgement.Uncertain;
@@ -23,7 +24,7 @@ internal static class SweepCommand
         string? journal = target.File is { } file ? file + JournalEnding : null;
         SweepRequest sweep = new(request with { Cancellation = token, Uncertainty = uncertainty }, vary, journal, target.Quiet ? null : new Teller(use.Session.Terminal));
         Outcome<SweepResult> outcome = await Work.Compute(() => Judge.Sweep(sweep), token);
-        int code = Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings);
+        int code = Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => FigureBuilder.Of(result));
         if (journal is not null && outcome.Succeeded && code == ExitCodes.Done)
             File.Delete(journal);
         return code;

@@ -6,4 +6,5 @@ namespace ResourceCheck.Cli.Commands;
 /// <param name="Format">How.</param>
 /// <param name="File">The file; null for standard output.</param>
 /// <param name="Quiet">Whether warnings stay off standard error.</param>
-internal sealed record Target(ReportFormat Format, string? File, bool Quiet);
+/// <param name="Figure">SVG file for the figure; null for none.</param>
+internal sealed record Target(ReportFormat Format, string? File, bool Quiet, string? Figure = null);

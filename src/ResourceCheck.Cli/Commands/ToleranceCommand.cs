@@ -1,5 +1,6 @@
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Studies;
 using ResourceCheck.Judgement.Uncertain;
@@ -19,6 +20,6 @@ internal static class ToleranceCommand
         if (Work.Request(use, o) is not { } request)
             return Work.Refuse(use);
         Outcome<ToleranceResult> outcome = await Work.Compute(() => Judge.Tolerance(new ToleranceRequest(request with { Cancellation = token, Uncertainty = uncertainty }, vary, use.Text(o.Goal))), token);
-        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings);
+        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => [FigureBuilder.Of(result)]);
     }
 }

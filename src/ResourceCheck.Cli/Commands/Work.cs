@@ -1,7 +1,9 @@
 using System.CommandLine;
+using System.Globalization;
 using ResourceCheck.Cli.Files;
 using ResourceCheck.Cli.Usage;
 using ResourceCheck.Diagnostics;
+using ResourceCheck.Figures;
 using ResourceCheck.Judgement;
 using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Reports;
@@ -47,6 +49,8 @@ internal static class Work
         bool Uses(Option option) => use.Command.Options.Contains(option);
     }
 
+    private const string FigureEnding = ".svg", DataEnding = ".dat";
+
     /// <summary>More threads than any machine has cores would only cost memory.</summary>
     private const int MostThreads = 4096;
 
@@ -74,19 +78,29 @@ internal static class Work
             "json" => ReportFormat.Json,
             "csv" => ReportFormat.Csv,
             "markdown" => ReportFormat.Markdown,
+            "latex" => ReportFormat.Latex,
             _ => ReportFormat.Text,
-        }, FileOf(use, o), use.Has(o.Quiet));
+        }, FileOf(use, o, o.Out), use.Has(o.Quiet), use.Command.Options.Contains(o.Figure) ? FigureOf(use, o) : null);
     }
 
-    /// <summary>The file that <c>--out</c> names, checked as far as can be before writing; null for standard output.</summary>
-    public static string? FileOf(Invocation use, Options o)
+    /// <summary>The file that an option names, checked as far as can be before writing; null for standard output.</summary>
+    public static string? FileOf(Invocation use, Options o, Option<string[]> option)
     {
-        string? file = use.Text(o.Out) is "-" ? null : use.Text(o.Out);
+        string? file = use.Text(option) is "-" ? null : use.Text(option);
         if (file is not null && OutputFile.Check(file) is { } finding)
             use.Findings.Add(finding);
         else if (file is not null && Inputs(use, o).Any(input => Path.GetFullPath(input) == Path.GetFullPath(file)))
-            use.Findings.Add(Findings.OverInput(file));
+            use.Findings.Add(Findings.OverInput(option.Name, file));
         return file;
+    }
+
+    private static string? FigureOf(Invocation use, Options o)
+    {
+        if (use.Text(o.Figure) is not { } file)
+            return null;
+        if (!file.EndsWith(FigureEnding, StringComparison.OrdinalIgnoreCase) || file.Length == FigureEnding.Length)
+            use.Findings.Add(Findings.NoSvg(file));
+        return FileOf(use, o, o.Figure);
     }
 
     private static IEnumerable<string> Inputs(Invocation use, Options o)
@@ -100,7 +114,7 @@ internal static class Work
         use.Session.Terminal.Fail(use.Findings, ExitCodes.WrongInput, closing);
 
     /// <summary>Shows an outcome's findings and writes its value, if there is one.</summary>
-    public static int Finish<T>(Invocation use, Target target, Outcome<T> outcome, Action<T, TextWriter, bool> write, Func<T, int> code, Func<T, IReadOnlyList<Diagnostic>> warnings)
+    public static int Finish<T>(Invocation use, Target target, Outcome<T> outcome, Action<T, TextWriter, bool> write, Func<T, int> code, Func<T, IReadOnlyList<Diagnostic>> warnings, Func<T, IReadOnlyList<FigureImage>>? figures = null)
         where T : class
     {
         Terminal terminal = use.Session.Terminal;
@@ -112,17 +126,28 @@ internal static class Work
             terminal.Show(told);
         using StringWriter text = new();
         write(value, text, target.File is null && terminal.Host.Colour);
-        return Deliver(use, target.File, text.ToString(), code(value));
+        return Deliver(use, target.File, text.ToString(), code(value), target.Figure is { } file && figures is not null ? Files(file, figures(value), terminal) : []);
     }
 
-    /// <summary>Writes a text to a file or to standard output.</summary>
-    public static int Deliver(Invocation use, string? file, string text, int code)
+    /// <summary>A figure's drawing and data; further figures of the same result get a number behind the name.</summary>
+    private static IReadOnlyList<(string Name, string Text)> Files(string file, IReadOnlyList<FigureImage> figures, Terminal terminal)
     {
-        if (file is null)
-            return use.Session.Terminal.Write(text, code);
-        return OutputFile.Write([(file, text)]) is { } finding
-            ? use.Session.Terminal.Fail([finding], ExitCodes.WrongInput, "nothing was written")
-            : code;
+        if (figures.Count == 0)
+            terminal.Note("there is nothing to draw, so no figure was written");
+        return [.. figures.SelectMany((figure, i) =>
+        {
+            string name = file[..^FigureEnding.Length] + (i == 0 ? "" : string.Create(CultureInfo.InvariantCulture, $"-{i + 1}"));
+            return new[] { (name + FigureEnding, figure.Svg + "\n"), (name + DataEnding, figure.Data) };
+        })];
+    }
+
+    /// <summary>Writes a text to a file or to standard output, and files beside it: all or none.</summary>
+    public static int Deliver(Invocation use, string? file, string text, int code, IReadOnlyList<(string Name, string Text)>? beside = null)
+    {
+        (string, string)[] files = [.. beside ?? [], .. file is null ? [] : new[] { (file, text) }];
+        if (files.Length > 0 && OutputFile.Write(files) is { } finding)
+            return use.Session.Terminal.Fail([finding], ExitCodes.WrongInput, "nothing was written");
+        return file is null ? use.Session.Terminal.Write(text, code) : code;
     }
 
     // Only when nothing is wrong with the input does "no trustworthy result" say what to look into.

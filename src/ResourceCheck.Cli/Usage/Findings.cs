@@ -90,8 +90,11 @@ internal static class Findings
     public static Diagnostic UnfitName(string name) =>
         new("U033", Severity.Error, $"`{name}` is no name for new files.", "give a name such as study or work/study.", Place.Of("the command line"));
 
-    public static Diagnostic OverInput(string name) =>
-        new("U035", Severity.Error, $"--out {name} would write over a file that is read here.", "choose another name for the result.", Place.Of("--out"));
+    public static Diagnostic NoSvg(string name) =>
+        new("U047", Severity.Error, $"`{name}` is no name for a figure: a name that ends in .svg fits here.", "write for example --figure loss.svg; its numbers go beside it, into loss.dat.", Place.Of("--figure"));
+
+    public static Diagnostic OverInput(string option, string name) =>
+        new("U035", Severity.Error, $"{option} {name} would write over a file that is read here.", "choose another name for the result.", Place.Of(option));
 
     public static Diagnostic OutputRefused(string reason) =>
         new("U034", Severity.Error, $"Standard output cannot be written: {Sentence(reason)}", "free some space, or send the result elsewhere with --out.", Place.Of("standard output"));

@@ -6,13 +6,13 @@ namespace ResourceCheck.Cli.Usage;
 internal sealed class Options
 {
     /// <summary>Choices of <c>--format</c>.</summary>
-    public static readonly string[] Formats = ["text", "json", "csv", "markdown"];
+    public static readonly string[] Formats = ["text", "json", "csv", "markdown", "latex"];
 
     /// <summary>Choices of <c>explain --format</c>.</summary>
     public static readonly string[] PageFormats = ["text", "markdown"];
 
     /// <summary>Choices of <c>--engine</c>.</summary>
-    public static readonly string[] Engines = ["dense"];
+    public static readonly string[] Engines = ["dense", "product"];
 
     public static Option<bool> Help { get; } = new("--help", "-h") { Description = "Show how a command is used.", Recursive = true };
 
@@ -24,15 +24,17 @@ internal sealed class Options
 
     public Option<string[]> Parameter { get; } = Value("--parameter", "NAME=VALUE", "Set a parameter: a number, a fraction, a list 3,4, a range 3..8, or all. May be repeated.");
 
-    public Option<string[]> Engine { get; } = Value("--engine", "NAME", "Evaluate with this engine (dense) instead of letting the program choose.", Engines);
+    public Option<string[]> Engine { get; } = Value("--engine", "NAME", "Evaluate with this engine (dense, product) instead of letting the program choose.", Engines);
 
     public Option<string[]> Memory { get; } = Value("--memory", "SIZE", "Most memory an engine may take, such as \"4 GB\".");
 
-    public Option<string[]> Format { get; } = Value("--format", "FORMAT", "Write text, json, csv or markdown.", Formats);
+    public Option<string[]> Format { get; } = Value("--format", "FORMAT", "Write text, json, csv, markdown or latex.", Formats);
 
     public Option<string[]> PageFormat { get; } = Value("--format", "FORMAT", "Write text or markdown.", PageFormats);
 
     public Option<string[]> Out { get; } = Value("--out", "FILE", "Write the result to a file, whole or not at all, instead of standard output.");
+
+    public Option<string[]> Figure { get; } = Value("--figure", "FILE.svg", "Draw the result as SVG, with its numbers for pgfplots in FILE.dat beside it.");
 
     public Option<string[]> Seed { get; } = Value("--seed", "NUMBER", "Seed of sampled figures; the same seed gives the same figures. Default 1.");
 

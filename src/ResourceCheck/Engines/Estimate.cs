@@ -9,6 +9,9 @@ namespace ResourceCheck.Engines;
 /// <param name="Present">For means: fraction of copies in which the value was present; 1 otherwise.</param>
 public sealed record Estimate(double Value, TruthLabel Label, double Low, double High, double Confidence, double Present = 1)
 {
+    /// <summary>Estimated round-off of an exact number, absolute; 0 where it is far below what anybody would notice.</summary>
+    public double RoundOff { get; init; }
+
     /// <summary>An exact number.</summary>
     public static Estimate Exact(double value) => new(value, TruthLabel.Exact, value, value, 1);
 

@@ -47,21 +47,21 @@ internal static class BudgetJudgement
     private static double[] Figures(Evaluated worst, MetricName metric, IReadOnlyList<Source> sources, RunRequest request)
     {
         double[] figures = new double[1 << sources.Count];
-        PreparedState prepared = Prepare(worst.Setting.Plan);
+        PreparedState prepared = Prepare(worst.Setting.Plan, worst.Actual.Engine);
         ParallelOptions options = new() { CancellationToken = request.Cancellation, MaxDegreeOfParallelism = request.Threads > 0 ? request.Threads : -1 };
         Parallel.For(0, figures.Length, options, subset =>
         {
             Plan plan = worst.Setting.Plan;
             for (int i = 0; i < sources.Count; i++)
                 plan = (subset & (1 << i)) == 0 ? PlanWithout.Of(plan, sources[i]) : plan;
-            PreparedState state = ReferenceEquals(plan.World, worst.Setting.Plan.World) ? prepared : Prepare(plan);
+            PreparedState state = ReferenceEquals(plan.World, worst.Setting.Plan.World) ? prepared : Prepare(plan, worst.Actual.Engine);
             Evaluation evaluation = Evaluator.Evaluate(worst.Setting, plan, state, worst.Actual.Inputs, worst.Actual.Engine, request);
             figures[subset] = (worst with { Actual = evaluation }).Figure(metric)?.Value ?? double.NaN;
         });
         return figures;
     }
 
-    private static PreparedState Prepare(Plan plan) => Resource.Prepare(plan.World.Resource, plan.Protocol.Holders.Count).Value!; // was prepared once already
+    private static PreparedState Prepare(Plan plan, EngineChoice engine) => Evaluator.Prepare(plan, engine).Value!; // was prepared once already
 
     private static BudgetResult Conclude(
         Setup setup, Evaluated worst, MetricName metric, int sign, IReadOnlyList<Source> sources, double[] figures, IReadOnlyList<Diagnostic> notes)
@@ -96,7 +96,7 @@ internal static class BudgetJudgement
         string without = $"Improve first what is lost {Limits.Words(first.Source)}: without it {name} would be {FigureText.Number(value + (sign * first.Removed))} (exact)";
         if (PlanHalved.Of(worst.Setting.Plan, first.Source) is not { } halved)
             return $"{without}.";
-        Evaluation evaluation = Evaluator.Evaluate(worst.Setting, halved, Prepare(halved), worst.Actual.Inputs, worst.Actual.Engine, request);
+        Evaluation evaluation = Evaluator.Evaluate(worst.Setting, halved, Prepare(halved, worst.Actual.Engine), worst.Actual.Inputs, worst.Actual.Engine, request);
         return (worst with { Actual = evaluation }).Figure(metric) is { Value: not double.NaN } better ? $"{without}, with half of it {FigureText.Number(better.Value)} (exact)." : $"{without}.";
     }
 }

@@ -9,7 +9,7 @@ internal static class InspectJudgement
 {
     public static Outcome<InspectResult> Of(Setup setup)
     {
-        Setting setting = setup.Settings.MaxBy(s => Engines.Dense.DenseEngine.Estimate(s.Plan, "").MemoryBytes)!;
+        Setting setting = setup.Settings.MaxBy(s => Engines.Dense.DenseEngine.Estimate(s.Plan, "").MemoryBytes)!; // the largest, whichever engine takes it
         Outcome<EngineChoice> choice = Evaluator.Choose(setting, setup.Request);
         EngineChoice engine = choice.Value ?? Engines.Dense.DenseEngine.Estimate(setting.Plan, choice.Findings[0].Message);
         return Outcome<InspectResult>.Of(new InspectResult

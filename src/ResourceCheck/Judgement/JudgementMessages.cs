@@ -47,15 +47,18 @@ internal static class JudgementMessages
     public static Diagnostic NotUnitary(Place at, string file, double defect) => new(
         "P013", Severity.Error, $"The matrix in {file} is not unitary: U†U differs from 1 by {FigureText.Number(defect)}, more than 1e-9.", "give every entry with all its digits", at);
 
-    public static Diagnostic DoesNotFit(EngineChoice choice, double limit, bool asked, bool hasSink) => new(
+    public static Diagnostic DoesNotFit(EngineChoice choice, double limit, bool asked, bool hasSink, string? others) => new(
         "E001",
         Severity.Error,
-        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {Allowed(limit, asked)}.",
-        $"{(asked && choice.MemoryBytes < DenseEngine.LargestMemory ? "allow more with --memory if the machine has it, " : "")}lower the number of parties{(hasSink ? ", or herald losses (one that is not adds a level)" : "")}",
+        $"The {choice.Name} evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {Allowed(limit, asked)}.{(others is null ? "" : $" Nor does another engine serve: {others}.")}",
+        $"{(asked && choice.MemoryBytes < DenseEngine.LargestMemory ? "allow more with --memory if the machine has it, " : "")}lower the number of parties{(choice.Name == EngineSelection.Dense ? hasSink ? ", or herald losses (one that is not adds a level)" : "" : ", or leave --engine out")}",
         Place.Of("engine"));
 
     public static Diagnostic UnknownEngine(string name) => new(
-        "E002", Severity.Error, $"`{name}` is no engine: dense fits here.", "leave --engine out and the program chooses", Place.Of("--engine"));
+        "E002", Severity.Error, $"`{name}` is no engine: {Words.Or(EngineSelection.Names)} fits here.", "leave --engine out and the program chooses", Place.Of("--engine"));
+
+    public static Diagnostic DoesNotApply(string name, string reason) => new(
+        "E019", Severity.Error, $"The {name} engine does not apply here: {reason}.", "leave --engine out and the program chooses", Place.Of("--engine"));
 
     public static Diagnostic NothingKept(string at) => new(
         "E003",

@@ -23,19 +23,19 @@ internal static class Limits
         Evaluated? worst = all.Where(e => e.Figure(metric) is not null).MinBy(e => sign * e.Figure(metric)!.Value);
         if (worst is null || worst.Setting.IsIdeal || worst.Actual.Engine.Work > MostWork || !double.IsFinite(worst.Figure(metric)!.Value))
             return null;
-        PreparedState prepared = Prepare(worst.Setting.Plan);
+        PreparedState prepared = Prepare(worst.Setting.Plan, worst.Actual.Engine);
         Func<Source, int?, double> without = (source, party) => Without(worst, prepared, metric, source, party, request);
         double now = worst.Figure(metric)!.Value;
         (Source source, double best) = Enum.GetValues<Source>().Select(s => (s, without(s, null))).MaxBy(pair => sign * pair.Item2);
         return sign * (best - now) < Noticeable ? null : Sentence(metric, now, source, best, WorstParty(worst, source, metric, sign, without));
     }
 
-    private static PreparedState Prepare(Plan plan) => Resource.Prepare(plan.World.Resource, plan.Protocol.Holders.Count).Value!; // was prepared once already
+    private static PreparedState Prepare(Plan plan, EngineChoice engine) => Evaluator.Prepare(plan, engine).Value!; // was prepared once already
 
     private static double Without(Evaluated worst, PreparedState prepared, MetricName metric, Source source, int? party, RunRequest request)
     {
         Plan plan = PlanWithout.Of(worst.Setting.Plan, source, party);
-        PreparedState state = source == Source.Preparation ? Prepare(plan) : prepared;
+        PreparedState state = source == Source.Preparation ? Prepare(plan, worst.Actual.Engine) : prepared;
         Evaluation evaluation = Evaluator.Evaluate(worst.Setting, plan, state, worst.Actual.Inputs, worst.Actual.Engine, request);
         double value = (worst with { Actual = evaluation }).Figure(metric)?.Value ?? double.NaN; // a checkpoint may never be reached without the source
         return double.IsNaN(value) ? worst.Figure(metric)!.Value : value;

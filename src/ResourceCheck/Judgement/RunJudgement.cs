@@ -109,6 +109,7 @@ internal static class RunJudgement
             Uncertainty = uncertainty,
             VerdictText = GoalJudgement.Sentence(goals, all) + Outside(setup.Settings),
             Hint = Limits.Hint(goals, all, setup.Request),
+            Parties = longest.Protocol.Parties,
             Timeline = Provenance.Schedule(longest),
             Warnings = [.. setup.Notes, .. Notes(all), .. longest.World.Storage is { } storage ? StorageAdvice.Of(storage, storage.Time.Seconds) : [], .. StorageAdvice.OfError(all.Max(e => e.Actual.IntegrationError))],
         };

@@ -86,6 +86,9 @@ public sealed record RunResult
     /// <summary>What limits the result, in words; null when nothing does.</summary>
     public required string? Hint { get; init; }
 
+    /// <summary>All parties in the script's order.</summary>
+    public IReadOnlyList<string> Parties { get; init; } = [];
+
     /// <summary>The schedule.</summary>
     public required IReadOnlyList<ScheduleLine> Timeline { get; init; }
 

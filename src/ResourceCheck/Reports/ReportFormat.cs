@@ -14,4 +14,7 @@ public enum ReportFormat
 
     /// <summary>Tables for notes and issues.</summary>
     Markdown,
+
+    /// <summary>Tables for papers: booktabs and siunitx.</summary>
+    Latex,
 }

@@ -64,6 +64,9 @@ public static class ReportWriter
             case ReportFormat.Markdown:
                 MarkdownReport.Write(build(), writer);
                 break;
+            case ReportFormat.Latex:
+                LatexReport.Write(build(), writer);
+                break;
             default:
                 TextReport.Write(build(), writer, colour);
                 break;

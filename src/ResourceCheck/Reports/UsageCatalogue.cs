@@ -32,11 +32,12 @@ public static class UsageCatalogue
         new("U032", "file exists", "new writes no file over another.", "Choose another name, or add --force to replace the files."),
         new("U033", "unfit name for new files", "The name is empty or ends with a separator.", "Give a name such as study or work/study.", "resourcecheck new work/"),
         new("U034", "standard output cannot be written", "The system refused to take the result, most likely for lack of space.", "Free some space, or send the result elsewhere with --out."),
-        new("U035", "output over an input", "The file named with --out is the script, conditions or state that the command reads.", "Choose another name for the result.", "resourcecheck run removal.protocol --out removal.protocol"),
+        new("U035", "output over an input", "The file named with --out or --figure is the script, conditions or state that the command reads.", "Choose another name for the result.", "resourcecheck run removal.protocol --out removal.protocol"),
         new("U040", "unknown code", "There is no message with this code.", "resourcecheck explain lists all codes.", "resourcecheck explain S999"),
         new("U041", "unknown schema", "There is no schema of this name.", "Use one of the names that the message lists.", "resourcecheck schema results"),
         new("U042", "no probability", "A target is a number above 0 and up to 1.", "Write for example 1e-6 or 0.001.", "resourcecheck copies protocols/liar-detection.protocol --failure 2"),
         new("U043", "no drift", "A drift is a fraction of runs and the conditions that they are under.", "Write the fraction, a colon and the name of a conditions file.", "resourcecheck run protocols/removal.protocol --drift 1%"),
+        new("U047", "no name for a figure", "Figures are written as SVG, and their numbers beside them in a file that ends in .dat.", "Give a name that ends in .svg.", "resourcecheck sweep protocols/removal.protocol --vary flight.depolarising=0..0.1 --figure curve.png"),
         new("U090", "out of memory", "The work needs more memory than there is.", "Use a smaller case, or set --memory so that a leaner engine is chosen."),
         new("U099", "mistake of the program", "The program met a state that its authors thought impossible. Your input need not be wrong.", "Report it with the command line, the input files and the version. RESOURCECHECK_TRACE=1 in the environment shows details for the report."),
     ];

@@ -4,7 +4,7 @@ namespace ResourceCheck.Resources;
 
 /// <summary>
 /// A state of several qudits with as many levels each as the state has qudits or as told. First qudit is the most significant index.
-/// Exactly one of <see cref="Ket"/> and <see cref="Density"/> is set.
+/// At most one of <see cref="Ket"/> and <see cref="Density"/> is set; none for the antisymmetric state where nobody needs its amplitudes.
 /// </summary>
 public sealed record PreparedState
 {

@@ -80,11 +80,11 @@ public sealed partial class UsageTests : IDisposable
     }
 
     [Theory]
-    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift --uncertainty --samples")]
-    [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --uncertainty")]
-    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm")]
-    [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until --uncertainty")]
-    [InlineData("sweep", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --uncertainty")]
+    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift --uncertainty --samples --figure")]
+    [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --uncertainty --figure")]
+    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm --figure")]
+    [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until --uncertainty --figure")]
+    [InlineData("sweep", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --uncertainty --figure")]
     [InlineData("verify", "--parameter --memory --format --out --quiet --seed --threads")]
     [InlineData("inspect", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads")]
     [InlineData("state", "--mend --format --out --quiet")]

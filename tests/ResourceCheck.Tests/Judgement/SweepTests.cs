@@ -38,7 +38,7 @@ public sealed class SweepTests : IDisposable
     public void Points_that_cannot_be_computed_are_told_and_the_others_stand()
     {
         RunRequest request = ProtocolLibraryTests.Request("leader-draw.protocol", conditions: false, parameters: false);
-        SweepResult sweep = Value(Judge.Sweep(new SweepRequest(request with { MemoryLimit = 1e6 }, [new("n", "3..5")], null, null)));
+        SweepResult sweep = Value(Judge.Sweep(new SweepRequest(request with { MemoryLimit = 1e6, Engine = "dense" }, [new("n", "3..5")], null, null)));
         Assert.Equal([3, 4, 5], sweep.Points.Select(p => p.Values[0]));
         Assert.Equal([false, true, true], sweep.Points.Select(p => p.Failure is not null));
         Assert.EndsWith("(E001)", sweep.Points[2].Failure, StringComparison.Ordinal);

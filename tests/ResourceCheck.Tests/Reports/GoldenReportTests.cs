@@ -13,6 +13,7 @@ public sealed class GoldenReportTests
         [ReportFormat.Json] = "json",
         [ReportFormat.Csv] = "csv",
         [ReportFormat.Markdown] = "md",
+        [ReportFormat.Latex] = "tex",
     };
 
     private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "run-uncertain", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies"];

@@ -274,6 +274,7 @@ internal static class Samples
             new([2], [new("success", Estimate.Exact(double.NaN)), new("Bell value", Estimate.AtLeast(2.1))], false, null),
             new([3], [], null, "No copy is kept. (E003)"),
         ],
+        Goals = [new("success", "success >= 0.8", 0.8)],
         Warnings = [],
     };
 
@@ -306,6 +307,9 @@ internal static class Samples
         Overrides = [],
         Varied = new("flight.Dov.length", false, 0, 60, "km", null, false, false),
         Goal = "\"after removal\" >= 0.75",
+        Figure = "fidelity after removal",
+        Threshold = 0.75,
+        Scan = [new(0, Estimate.Exact(0.9)), new(12.345678, Estimate.Exact(0.75)), new(25, Estimate.Exact(0.6)), new(40, Estimate.AtLeast(0.75)), new(60, Estimate.Exact(0.8))],
         Engine = Engine,
         Crossings =
         [

@@ -13,10 +13,14 @@ internal sealed class LocalModels(OperatorBasis basis, IReadOnlyDictionary<strin
 {
     private readonly Dictionary<SiteNoise, SiteMap> _noise = new(ReferenceEqualityComparer.Instance as IEqualityComparer<SiteNoise>);
     private readonly Dictionary<(UnitaryKey Key, OperationModel Model), SiteMap?> _unitaries = [];
+    private readonly Dictionary<(UnitaryKey Key, OperationModel Model), Complex[,]?> _matrices = [];
     private readonly Dictionary<(BasisValue Basis, DetectionModel Model), double[][]> _effects = [];
     private readonly Dictionary<BasisValue, SiteMap[]> _projections = [];
 
     public OperatorBasis Basis { get; } = basis;
+
+    /// <summary>Drops lost qudits; one object, so that histories can share what follows.</summary>
+    public SiteMap Herald { get; } = basis.DropSink();
 
     public SiteMap Noise(SiteNoise noise)
     {
@@ -33,6 +37,16 @@ internal sealed class LocalModels(OperatorBasis basis, IReadOnlyDictionary<strin
         if (!_unitaries.TryGetValue((key, model), out SiteMap? map))
             _unitaries[(key, model)] = map = BuildUnitary(key, model);
         return map;
+    }
+
+    /// <summary>The matrix of an applied unitary as it was meant to be, over-rotation included and depolarising not; null when there is nothing to apply.</summary>
+    public Complex[,]? UnitaryMatrix(BoundUnitary unitary, OperationModel model, Value[] slots)
+    {
+        if (UnitaryKey.From(unitary, slots, Basis.Levels) is not { } key)
+            return null;
+        if (!_matrices.TryGetValue((key, model), out Complex[,]? matrix))
+            _matrices[(key, model)] = matrix = Turned(key, model);
+        return matrix;
     }
 
     /// <summary>Functionals of the outcomes 0 … d-1 and, last, of no click. Confusion first, then efficiency, then dark counts.</summary>
@@ -57,13 +71,14 @@ internal sealed class LocalModels(OperatorBasis basis, IReadOnlyDictionary<strin
 
     private SiteMap? BuildUnitary(UnitaryKey key, OperationModel model)
     {
-        if (Matrix(key) is not { } unitary)
+        if (Turned(key, model) is not { } unitary)
             return null;
-        if (model.OverRotation != 0)
-            unitary = UnitaryPower.Of(unitary, 1 + model.OverRotation);
         SiteMap map = Basis.FromUnitary(unitary);
         return model.Depolarising > 0 ? LocalNoise.Depolarising(Basis, model.Depolarising).After(map) : map;
     }
+
+    private Complex[,]? Turned(UnitaryKey key, OperationModel model) =>
+        Matrix(key) is { } unitary && model.OverRotation != 0 ? UnitaryPower.Of(unitary, 1 + model.OverRotation) : Matrix(key);
 
     private Complex[,]? Matrix(UnitaryKey key) => key.Kind switch
     {

@@ -1,3 +1,5 @@
+using ResourceCheck.Scripts.Binding;
+
 namespace ResourceCheck.Engines.Dense;
 
 /// <summary>A checkpoint's sums over branches.</summary>
@@ -15,11 +17,11 @@ internal sealed class Look(string label, double at, History history)
     /// <summary>Probability of getting here, so far.</summary>
     public double Weight { get; private set; }
 
-    public void Add(Branch branch, double weight, double overlap)
+    public void Add(Value[] slots, double weight, double overlap)
     {
         Weight += weight;
         _overlap += overlap;
-        history.Add(branch.Slots, weight, overlap);
+        history.Add(slots, weight, overlap);
     }
 
     /// <summary>An overlap of nothing is the round-off of a sum of terms of order one.</summary>

@@ -54,7 +54,7 @@ internal sealed class Tally
             waited = waited.Acting(wait.Party, models.Noise(wait.Noise));
         SiteTensor state = waited.Reduced(step.Parties, _basis.Trace);
         double weight = branch.Weight(_basis.Trace);
-        LookOf(step).Add(branch, weight, branch.Factor * Overlap(state, waited, step.Parties));
+        LookOf(step).Add(branch.Slots, weight, branch.Factor * Overlap(state, waited, step.Parties));
         _bell.Look(step, waited);
     }
 
@@ -95,7 +95,7 @@ internal sealed class Tally
         CopyType[] copies = [.. _copies.OrderBy(c => c.Key, StringComparer.Ordinal).Select(c => c.Value with { Probability = c.Value.Probability / kept })];
         ListEvaluation? verdicts = kept > 0 ? lists?.Invoke(copies) : null;
         Metrics metrics = new(verdicts?.Success ?? Of(_success), verdicts?.Failure ?? Of(_failure), verdicts?.Abort ?? Of(_abort), kept, checkpoints);
-        FigureValues figures = new(_plan.Protocol, metrics, _figures, _bell);
+        FigureValues figures = new(_plan.Protocol, metrics, _figures.Of, _bell.Of);
         return new Evaluation
         {
             Engine = choice,

@@ -27,14 +27,32 @@ internal sealed class BellTally
     /// <summary>Adds a branch's contribution at a checkpoint, if both parties still hold their qudits.</summary>
     public void Look(CheckpointPlanStep step, Branch waited)
     {
-        foreach ((BellFigure figure, Dictionary<string, double[]> byLabel) in _states)
+        foreach (BellFigure figure in _states.Keys)
         {
-            if (!waited.Tensor.Parties.Contains(figure.First) || !waited.Tensor.Parties.Contains(figure.Second))
-                continue;
-            if (!byLabel.TryGetValue(step.Label, out double[]? sum))
-                byLabel[step.Label] = sum = new double[_observables.Length * _observables.Length];
-            AddCorrelations(waited, figure, sum);
+            if (waited.Tensor.Parties.Contains(figure.First) && waited.Tensor.Parties.Contains(figure.Second))
+                AddCorrelations(waited, figure, SumOf(figure, step.Label));
         }
+    }
+
+    /// <summary>The pairs whose value is asked for.</summary>
+    public IEnumerable<BellFigure> Pairs => _states.Keys;
+
+    /// <summary>Adds expectation values of products of observables, the first party's and the second's by their functionals, at a checkpoint at which both hold their qudits.</summary>
+    public void Look(BellFigure figure, string label, Func<double[], double[], double> expectation)
+    {
+        double[] sum = SumOf(figure, label);
+        for (int i = 0; i < _observables.Length; i++)
+        {
+            for (int j = 0; j < _observables.Length; j++)
+                sum[(i * _observables.Length) + j] += expectation(_observables[i], _observables[j]);
+        }
+    }
+
+    private double[] SumOf(BellFigure figure, string label)
+    {
+        if (!_states[figure].TryGetValue(label, out double[]? sum))
+            _states[figure][label] = sum = new double[_observables.Length * _observables.Length];
+        return sum;
     }
 
     /// <summary>The CHSH value at the last checkpoint at which both held their qudits; undefined when there was none.</summary>

@@ -4,7 +4,7 @@ using ResourceCheck.Scripts.Syntax;
 namespace ResourceCheck.Engines.Figures;
 
 /// <summary>Values of reports and claims from metrics, sums and CHSH values.</summary>
-internal sealed class FigureValues(Protocol protocol, Metrics metrics, FigureTally sums, BellTally bell)
+internal sealed class FigureValues(Protocol protocol, Metrics metrics, Func<Figure, Estimate> sums, Func<BellFigure, Estimate> bell)
 {
     private readonly Dictionary<string, Estimate> _reports = [];
 
@@ -32,8 +32,8 @@ internal sealed class FigureValues(Protocol protocol, Metrics metrics, FigureTal
         ArithmeticFigure arithmetic => Arithmetic(arithmetic),
         MetricFigure { Metric.Kind: MetricKind.Report } metric => _reports[metric.Metric.Label],
         MetricFigure metric => metrics.Of(metric.Metric),
-        BellFigure pair => bell.Of(pair),
-        _ => sums.Of(figure),
+        BellFigure pair => bell(pair),
+        _ => sums(figure),
     };
 
     private Estimate Arithmetic(ArithmeticFigure figure)

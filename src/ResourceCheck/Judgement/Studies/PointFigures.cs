@@ -39,6 +39,14 @@ internal static class PointFigures
         _ => "",
     };
 
+    /// <summary>Name of a metric among the figures of a point.</summary>
+    public static string Name(MetricName metric) => metric.Kind switch
+    {
+        MetricKind.Checkpoint => $"fidelity {metric.Label}",
+        MetricKind.Report => metric.Label,
+        _ => metric.ToString(),
+    };
+
     private static IEnumerable<KeyValuePair<string, Estimate>> Figures(IReadOnlyList<Evaluated> all)
     {
         foreach (MetricResult metric in MetricGathering.Metrics(all))

@@ -3,6 +3,7 @@ using System.Text.Json;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Judgement.Uncertain;
 using ResourceCheck.Scripts;
+using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Judgement.Studies;
@@ -89,6 +90,7 @@ internal static class SweepJudgement
         Overrides = request.Run.Overrides,
         Varied = variations,
         Points = points,
+        Goals = [.. setup.Settings[0].Protocol.Goals.Where(g => g.Metric.Kind != MetricKind.Harm).Select(g => new SweepGoal(PointFigures.Name(g.Metric), g.Text, g.Threshold))],
         Warnings = request.Run.Uncertainty is not null && UncertainInputs.Of(setup.Document).Count == 0 ? [.. setup.Notes, UncertaintyMessages.NothingUncertain()] : [.. setup.Notes],
     };
 }

@@ -27,9 +27,18 @@ public sealed record SweepResult
     /// <summary>The points, the first variation slowest.</summary>
     public required IReadOnlyList<SweepPoint> Points { get; init; }
 
+    /// <summary>Goals on figures of the points; those on harms are left out.</summary>
+    public required IReadOnlyList<SweepGoal> Goals { get; init; }
+
     /// <summary>Warnings and notes.</summary>
     public required IReadOnlyList<Diagnostic> Warnings { get; init; }
 }
+
+/// <summary>A goal that points are held against.</summary>
+/// <param name="Figure">Name of the figure, as in the points.</param>
+/// <param name="Text">The goal as written.</param>
+/// <param name="Threshold">What the figure is compared with.</param>
+public sealed record SweepGoal(string Figure, string Text, double Threshold);
 
 /// <summary>One point of a sweep.</summary>
 /// <param name="Values">Values varied, in their units.</param>

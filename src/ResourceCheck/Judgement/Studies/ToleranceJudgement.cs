@@ -23,10 +23,10 @@ internal sealed class ToleranceJudgement
 
     private readonly RunRequest _request;
     private readonly Variation _varied;
-    private readonly string _goal;
+    private readonly Goal _goal;
     private readonly Dictionary<double, Point> _known = [];
 
-    private ToleranceJudgement(RunRequest request, Variation varied, string goal)
+    private ToleranceJudgement(RunRequest request, Variation varied, Goal goal)
     {
         _request = request;
         _varied = varied;
@@ -48,7 +48,7 @@ internal sealed class ToleranceJudgement
             return Outcome<ToleranceResult>.Failed([StudyMessages.GoalOnHarm()]);
         try
         {
-            ToleranceJudgement judgement = new(run, variation, goal.Text);
+            ToleranceJudgement judgement = new(run, variation, goal);
             return judgement.WithBands(judgement.Conclude(first, request), first);
         }
         catch (PointFailedException failure)
@@ -87,7 +87,10 @@ internal sealed class ToleranceJudgement
             Conditions = Provenance.Conditions(first),
             Overrides = request.Run.Overrides,
             Varied = _varied,
-            Goal = _goal,
+            Goal = _goal.Text,
+            Figure = PointFigures.Name(_goal.Metric),
+            Threshold = _goal.Threshold,
+            Scan = [.. _known.OrderBy(p => p.Key).Select(p => new ScanPoint(p.Key, p.Value.Figure))],
             Engine = At(scan[0]).Engine,
             Crossings = [.. crossings.Select(c => c with { FromToday = c.Value - today?.Value, Relative = today is { Value: not 0 } now ? (c.Value - now.Value) / Math.Abs(now.Value) : null })],
             Today = today,
@@ -173,7 +176,7 @@ internal sealed class ToleranceJudgement
         List<Evaluated> all = RunJudgement.All(setup, findings, cheats: false, besideIdeal: false);
         if (findings.Any(f => f.Severity == Severity.Error))
             return null;
-        GoalResult result = GoalJudgement.Goals(all).Single(g => g.Goal.Text == _goal).Result;
+        GoalResult result = GoalJudgement.Goals(all).Single(g => g.Goal.Text == _goal.Text).Result;
         if (double.IsNaN(result.Margin))
             return null;
         Setting setting = all[0].Setting;

@@ -28,6 +28,15 @@ public sealed record ToleranceResult
     /// <summary>The goal held.</summary>
     public required string Goal { get; init; }
 
+    /// <summary>Name of the goal's figure.</summary>
+    public required string Figure { get; init; }
+
+    /// <summary>What the goal compares it with.</summary>
+    public required double Threshold { get; init; }
+
+    /// <summary>All values that were evaluated, ascending, with the goal's figure.</summary>
+    public required IReadOnlyList<ScanPoint> Scan { get; init; }
+
     /// <summary>Engine used.</summary>
     public required EngineChoice Engine { get; init; }
 
@@ -49,6 +58,9 @@ public sealed record ToleranceResult
     /// <summary>Warnings and notes.</summary>
     public required IReadOnlyList<Diagnostic> Warnings { get; init; }
 }
+
+/// <summary>The goal's figure at one value, in the unit varied.</summary>
+public sealed record ScanPoint(double Value, Estimate Figure);
 
 /// <summary>A value at which the goal is just met.</summary>
 /// <param name="Value">The value, in the unit varied; for whole numbers the last one that meets the goal.</param>
