@@ -17,12 +17,23 @@ internal static class CopiesCommand
     public static async Task<int> Execute(Invocation use, Options o, CancellationToken token)
     {
         Target target = Work.TargetOf(use, o);
-        double failure = use.Probability(o.Failure) ?? DefaultFailure, harm = use.Probability(o.Harm) ?? failure;
+        IReadOnlyList<double> failures = use.Probabilities(o.Failure);
+        double? harms = use.Probability(o.Harm);
+        IReadOnlyList<KeyValuePair<string, string>> vary = use.Pairs(o.Vary, "flight.default.depolarising=0..0.05:6");
+        double failure = failures.Count > 0 ? failures[0] : DefaultFailure, harm = harms ?? failure;
         if (Work.Request(use, o) is not { } request)
             return Work.Refuse(use);
         CopiesRequest copies = new(request with { Cancellation = token }, failure, harm, target.Quiet ? null : new Teller(use.Session.Terminal));
+        if (failures.Count > 1 || vary.Count > 0)
+            return await Table(use, target, new CopiesTableRequest(copies, failures.Count > 0 ? failures : [DefaultFailure], harms, vary), token);
         Outcome<CopiesResult> outcome = await Work.Compute(() => Judge.Copies(copies), token);
         return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => [FigureBuilder.Of(result)]);
+    }
+
+    private static async Task<int> Table(Invocation use, Target target, CopiesTableRequest request, CancellationToken token)
+    {
+        Outcome<CopiesTable> outcome = await Work.Compute(() => Judge.Copies(request), token);
+        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, _ => []);
     }
 
     /// <summary>Tells each number whose harms were searched, which takes seconds to minutes.</summary>

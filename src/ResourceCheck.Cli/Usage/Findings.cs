@@ -81,8 +81,8 @@ internal static class Findings
     public static Diagnostic Exists(string name) =>
         new("U032", Severity.Error, $"`{name}` exists already, and new writes no file over another.", "choose another name, or add --force to replace it.", Place.Of(name));
 
-    public static Diagnostic NoProbability(Words words, string option, string text) =>
-        new("U042", Severity.Error, $"`{text}` is no probability for {option}: a number above 0 and up to 1, such as 1e-6, fits here.", "write for example 1e-6 or 0.001.", words.PlaceOf(text, option));
+    public static Diagnostic NoProbability(Words words, string option, string text, string? list = null) =>
+        new("U042", Severity.Error, $"`{text}` is no probability for {option}: a number above 0 and up to 1, such as 1e-6, fits here.", "write for example 1e-6 or 0.001.", words.PlaceOf(list ?? text, option));
 
     public static Diagnostic NoDrift(Words words, string text) =>
         new("U043", Severity.Error, $"`{text}` is no drift: a fraction above 0 and up to 1, a colon and a conditions file fit here.", "write for example --drift 0.01:worse.conditions.json.", words.PlaceOf(text, "--drift"));

@@ -84,11 +84,28 @@ internal sealed class Invocation
     {
         if (Text(option) is not { } text)
             return null;
-        if (double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out double value) && value is > 0 and <= 1)
-            return value;
-        Findings.Add(Usage.Findings.NoProbability(_words, option.Name, text));
-        return null;
+        double? value = ProbabilityOf(text);
+        if (value is null)
+            Findings.Add(Usage.Findings.NoProbability(_words, option.Name, text));
+        return value;
     }
+
+    /// <summary>An option's probabilities, separated by commas; empty when it is not given.</summary>
+    public IReadOnlyList<double> Probabilities(Option<string[]> option)
+    {
+        List<double> probabilities = [];
+        foreach (string part in Text(option)?.Split(',', StringSplitOptions.TrimEntries) ?? [])
+        {
+            if (ProbabilityOf(part) is { } value)
+                probabilities.Add(value);
+            else
+                Findings.Add(Usage.Findings.NoProbability(_words, option.Name, part, Text(option)));
+        }
+
+        return probabilities;
+    }
+
+    private static double? ProbabilityOf(string text) => double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out double value) && value is > 0 and <= 1 ? value : null;
 
     /// <summary>An option's memory size in bytes, or null when it is not given.</summary>
     public double? Memory(Option<string[]> option)

@@ -50,7 +50,7 @@ internal sealed class Options
 
     public Option<bool> Uncertainty { get; } = new("--uncertainty") { Description = "Carry the standard uncertainties of the conditions, as in \"80(10) us\", through to the figures." };
 
-    public Option<string[]> Failure { get; } = Value("--failure", "PROBABILITY", "What honest failure must not exceed, such as 1e-6.");
+    public Option<string[]> Failure { get; } = Value("--failure", "PROBABILITY", "What honest failure must not exceed, such as 1e-6; several, separated by commas, make a table.");
 
     public Option<string[]> Harm { get; } = Value("--harm", "PROBABILITY", "What every harm must not exceed; the same as --failure unless said, and with 1 harms are not looked at.");
 

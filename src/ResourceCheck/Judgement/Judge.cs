@@ -33,6 +33,9 @@ public static class Judge
     /// <summary>Finds the least number of copies that holds targets of failure and harm.</summary>
     public static Outcome<CopiesResult> Copies(CopiesRequest request) => CopiesJudgement.Of(request);
 
+    /// <summary>Finds numbers of copies for several targets and, if asked for, values.</summary>
+    public static Outcome<CopiesTable> Copies(CopiesTableRequest request) => CopiesTableJudgement.Of(request);
+
     /// <summary>Finds the values at which a goal is just met.</summary>
     public static Outcome<ToleranceResult> Tolerance(ToleranceRequest request) => ToleranceJudgement.Of(request);
 

@@ -36,6 +36,9 @@ internal static class Provenance
     /// <summary>Of a sweep.</summary>
     public static IReadOnlyList<string> Of(Judgement.Studies.SweepResult sweep) => Of(sweep.Version, sweep.Title, sweep.Protocol, sweep.Conditions, sweep.Overrides);
 
+    /// <summary>Of a table of copies.</summary>
+    public static IReadOnlyList<string> Of(Judgement.Studies.CopiesTable copies) => Of(copies.Version, copies.Title, copies.Protocol, copies.Conditions, copies.Overrides);
+
     /// <summary>Of a number of copies.</summary>
     public static IReadOnlyList<string> Of(Judgement.Studies.CopiesResult copies) => Of(copies.Version, copies.Title, copies.Protocol, copies.Conditions, copies.Overrides);
 

@@ -51,6 +51,10 @@ public static class ReportWriter
     public static void Write(CopiesResult result, ReportFormat format, TextWriter writer, bool colour = false) =>
         Write(format, writer, colour, () => CopiesReport.From(result), () => CopiesDocument.Write(result, writer));
 
+    /// <summary>Writes the result of <c>copies</c> for several targets; parameters as for <see cref="Write(RunResult, ReportFormat, TextWriter, bool)"/>.</summary>
+    public static void Write(CopiesTable result, ReportFormat format, TextWriter writer, bool colour = false) =>
+        Write(format, writer, colour, () => CopiesTableReport.From(result), () => CopiesTableDocument.Write(result, writer));
+
     private static void Write(ReportFormat format, TextWriter writer, bool colour, Func<Report> build, Action writeDocument)
     {
         switch (format)

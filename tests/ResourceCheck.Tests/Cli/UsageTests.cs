@@ -82,7 +82,7 @@ public sealed partial class UsageTests : IDisposable
     [Theory]
     [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift --uncertainty --samples --figure")]
     [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --uncertainty --figure")]
-    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm --figure")]
+    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm --vary --figure")]
     [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until --uncertainty --figure")]
     [InlineData("sweep", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --uncertainty --figure")]
     [InlineData("verify", "--parameter --memory --format --out --quiet --seed --threads")]

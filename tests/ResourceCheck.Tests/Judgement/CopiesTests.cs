@@ -39,6 +39,20 @@ public sealed class CopiesTests
         Assert.Equal(["J012"], single.Findings.Select(f => f.Code));
     }
 
+    /// <summary>Every row is what a single target gives; smaller failure costs more, and noise beyond the thresholds is told in its row.</summary>
+    [Fact]
+    public void A_table_holds_the_single_numbers_against_failure_and_noise()
+    {
+        CopiesRequest request = new(Broadcast(), 1, 1, null);
+        CopiesTable table = Value(Judge.Copies(new CopiesTableRequest(request, [0.1, 0.02], 1, [new("flight.depolarising", "0..0.3:2")])));
+        Assert.Equal([(0.0, 0.1), (0.0, 0.02), (0.3, 0.1), (0.3, 0.02)], table.Rows.Select(r => (r.Value!.Value, r.Targets.Failure)));
+        Assert.Equal([.. new[] { 0.1, 0.02 }.Select(f => (int?)Value(Judge.Copies(request with { Failure = f })).Copies), null, null], table.Rows.Select(r => r.Copies));
+        Assert.True(table.Rows[0].Copies < table.Rows[1].Copies);
+        Assert.All(table.Rows.Take(2), r => Assert.True(r.Failure!.Value <= r.Targets.Failure && r.Harm is null && r.Refusal is null));
+        Assert.All(table.Rows.Skip(2), r => Assert.EndsWith("(E010)", r.Refusal, StringComparison.Ordinal));
+        Assert.Equal(["J012"], Judge.Copies(new CopiesTableRequest(request with { Run = ProtocolLibraryTests.Request("removal.protocol", conditions: false) }, [0.1, 0.2], null, [])).Findings.Select(f => f.Code));
+    }
+
     private static double Failure(int copies)
     {
         RunRequest request = Broadcast() with { Script = Broadcast().Script with { Text = Broadcast().Script.Text.Split("\ndishonest")[0].Replace("goal harm", "# goal harm", StringComparison.Ordinal) }, Parameters = [new("M", $"{copies}")] };

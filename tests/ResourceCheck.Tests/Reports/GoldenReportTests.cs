@@ -16,7 +16,7 @@ public sealed class GoldenReportTests
         [ReportFormat.Latex] = "tex",
     };
 
-    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "run-uncertain", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies"];
+    private static readonly string[] Names = ["run-full", "run-bare", "run-odd", "run-uncertain", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies", "copies-table"];
 
     public static TheoryData<string, ReportFormat> All()
     {
@@ -101,6 +101,9 @@ public sealed class GoldenReportTests
                 break;
             case "copies":
                 ReportWriter.Write(Samples.Copies, format, writer);
+                break;
+            case "copies-table":
+                ReportWriter.Write(Samples.CopiesTable, format, writer);
                 break;
             case "tolerance":
                 ReportWriter.Write(Samples.Tolerance, format, writer);

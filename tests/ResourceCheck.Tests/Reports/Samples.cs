@@ -297,6 +297,25 @@ internal static class Samples
         Warnings = [Warning],
     };
 
+    /// <summary>Two values and two targets, one of which is not reached.</summary>
+    public static CopiesTable CopiesTable { get; } = new()
+    {
+        Version = "0.1.0",
+        Protocol = Script,
+        Title = "Detectable broadcast",
+        Conditions = new("winter.conditions.json", Hash),
+        Overrides = [],
+        Parameter = "M",
+        Varied = new("flight.default.length", false, 1, 2, "km", 2, false, false),
+        Rows =
+        [
+            new(1, (0.001, 0.05), 410, Estimate.Exact(9.8e-4), Estimate.AtMost(0.04994), 1.02, null) { Thresholds = [new("a", "1/4")] },
+            new(1, (1e-6, 1), 905, Estimate.Exact(9.9e-7), null, 2.25, null),
+            new(2, (0.001, 0.05), null, null, null, null, "No number of copies up to 20000 holds the targets. (E010)"),
+        ],
+        Warnings = [Warning],
+    };
+
     /// <summary>A curve that is crossed twice.</summary>
     public static ToleranceResult Tolerance { get; } = new()
     {

@@ -21,6 +21,7 @@ public sealed class SchemaTests
     [InlineData("sweep", "sweep")]
     [InlineData("tolerance", "tolerance")]
     [InlineData("copies", "copies")]
+    [InlineData("copies-table", "copies-table")]
     public async Task Documents_fit_their_published_schema(string name, string schema)
     {
         JsonSchema published = await JsonSchema.FromJsonAsync(Schemas.Find(schema)!, TestContext.Current.CancellationToken);
