@@ -25,6 +25,7 @@ internal static class CommandTree
         Add("tolerance", "SCRIPT", "Find up to which value a goal is met.", ToleranceCommand.Execute, [o.Vary, o.Goal, o.Uncertainty, .. judging, .. writing, o.Figure, .. computing]);
         Add("sweep", "SCRIPT", "Evaluate at every point of one or two ranges; interrupted sweeps go on.", SweepCommand.Execute, [o.Vary, o.Uncertainty, .. judging, .. writing, o.Figure, .. computing]);
         Add("copies", "SCRIPT", "Find how many copies a failure probability costs, honest and with the cheats listed.", CopiesCommand.Execute, [o.Failure, o.Harm, o.Vary, .. judging, .. writing, o.Figure, .. computing]);
+        Add("report", "STUDY", "Write a feasibility section from a study file: verdicts, tolerances, budgets, rates, copies, figures, tables.", ReportCommand.Execute, [o.Folder, o.Quiet, .. computing]);
         Add("state", "FILE", "Tell what a prepared state is: validity, fidelity, purity, negativity, populations.", StateCommand.Execute, [o.Mend, .. writing]);
         Add("storage", "CONDITIONS", "Tell how long emitters side by side keep the antisymmetric state, beside its symmetric counterpart and independent decay.", StorageCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, .. writing, o.Figure]);
         Add("relaxation", "CONDITIONS", "Tell what shared decay makes of a start: fidelity, populations and yield against time.", RelaxationCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, o.Samples, o.Seed, .. writing, o.Figure]);

@@ -33,7 +33,7 @@ internal static class CopiesCommand
     private static async Task<int> Table(Invocation use, Target target, CopiesTableRequest request, CancellationToken token)
     {
         Outcome<CopiesTable> outcome = await Work.Compute(() => Judge.Copies(request), token);
-        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, _ => []);
+        return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings, result => FigureBuilder.Of(result) is { } f ? [f] : []);
     }
 
     /// <summary>Tells each number whose harms were searched, which takes seconds to minutes.</summary>

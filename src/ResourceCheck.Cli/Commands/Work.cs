@@ -52,7 +52,7 @@ internal static class Work
     private const string FigureEnding = ".svg", DataEnding = ".dat";
 
     /// <summary>More threads than any machine has cores would only cost memory.</summary>
-    private const int MostThreads = 4096;
+    public const int MostThreads = 4096;
 
     /// <summary>Whether and how uncertainties are carried through; null where that is not asked for.</summary>
     public static UncertaintyRequest? Uncertainty(Invocation use, Options o)
@@ -112,6 +112,9 @@ internal static class Work
     /// <summary>Tells wrong usage.</summary>
     public static int Refuse(Invocation use, string closing = NothingComputed) =>
         use.Session.Terminal.Fail(use.Findings, ExitCodes.WrongInput, closing);
+
+    /// <summary>Tells why there is no result.</summary>
+    public static int Refuse(Invocation use, IReadOnlyList<Diagnostic> findings) => use.Session.Terminal.Fail(findings, CodeOf(findings), NothingComputed);
 
     /// <summary>Shows an outcome's findings and writes its value, if there is one.</summary>
     public static int Finish<T>(Invocation use, Target target, Outcome<T> outcome, Action<T, TextWriter, bool> write, Func<T, int> code, Func<T, IReadOnlyList<Diagnostic>> warnings, Func<T, IReadOnlyList<FigureImage>>? figures = null)

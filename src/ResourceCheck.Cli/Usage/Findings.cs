@@ -90,6 +90,9 @@ internal static class Findings
     public static Diagnostic UnfitName(string name) =>
         new("U033", Severity.Error, $"`{name}` is no name for new files.", "give a name such as study or work/study.", Place.Of("the command line"));
 
+    public static Diagnostic NotAFolder(string name) =>
+        new("U048", Severity.Error, $"{name} is a file: the report needs a folder.", "name another with --folder.", Place.Of("--folder"));
+
     public static Diagnostic NoSvg(string name) =>
         new("U047", Severity.Error, $"`{name}` is no name for a figure: a name that ends in .svg fits here.", "write for example --figure loss.svg; its numbers go beside it, into loss.dat.", Place.Of("--figure"));
 

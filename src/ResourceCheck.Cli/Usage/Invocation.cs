@@ -160,6 +160,9 @@ internal sealed class Invocation
         return Positional.Count > 0 ? Positional[0] : null;
     }
 
+    /// <summary>Reads a file that an input file names; null when it cannot be read, with the reason added to the findings given.</summary>
+    public InputText? ReadBeside(string name, List<Diagnostic> findings) => _files.Read(name, findings);
+
     /// <summary>Reads an input file; null when there is none or it cannot be read.</summary>
     public InputText? Read(string? name)
     {

@@ -34,6 +34,8 @@ internal sealed class Options
 
     public Option<string[]> Out { get; } = Value("--out", "FILE", "Write the result to a file, whole or not at all, instead of standard output.");
 
+    public Option<string[]> Folder { get; } = Value("--folder", "FOLDER", "Where the report goes; made when absent. Without it STUDY-report, beside the study.");
+
     public Option<string[]> Figure { get; } = Value("--figure", "FILE.svg", "Draw the result as SVG, with its numbers for pgfplots in FILE.dat beside it.");
 
     public Option<string[]> Seed { get; } = Value("--seed", "NUMBER", "Seed of sampled figures; the same seed gives the same figures. Default 1.");

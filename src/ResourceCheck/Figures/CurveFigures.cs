@@ -47,6 +47,27 @@ internal static class CurveFigures
             ]));
     }
 
+    /// <summary>Numbers of copies against a varied value.</summary>
+    public static FigureImage? Of(CopiesTable copies, string id)
+    {
+        CopiesRow[] found = [.. copies.Rows.Where(r => r.Copies is not null)];
+        if (copies.Varied is not { } varied || found.Length == 0)
+            return null;
+        return ChartPlot.Of(new Chart(
+            id,
+            $"{copies.Title}: copies against {varied.Path}",
+            $"From {SweepFigures.Value(varied, varied.From)} to {SweepFigures.Value(varied, varied.To)} of {varied.Path}, "
+                + $"{string.Join("; ", found.GroupBy(r => r.Targets).Select(g => $"a failure of at most {FigureText.Number(g.Key.Failure)} takes {g.First().Copies} to {g.Last().Copies} copies"))}."
+                + (found.Length < copies.Rows.Count ? " Where points are missing no number of copies was found." : ""),
+            new ChartAxis(SweepFigures.AxisTitle(varied), varied.IsLogarithmic, varied.WholeOnly),
+            new ChartAxis($"copies kept, {copies.Parameter}", IsLogarithmic: true),
+            [
+                .. copies.Rows.GroupBy(r => r.Targets).Take(PlotStyle.MostSeries).Select(g => new ChartSeries(
+                    $"failure at most {FigureText.Number(g.Key.Failure)}", [.. g.Select(r => new ChartPoint(r.Value!.Value, r.Copies ?? double.NaN))])),
+            ],
+            []));
+    }
+
     /// <summary>Storage side by side against time.</summary>
     public static FigureImage Of(StorageResult storage, string id)
     {

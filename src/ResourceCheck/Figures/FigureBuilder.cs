@@ -21,6 +21,9 @@ public static class FigureBuilder
     /// <summary>Failure against the number of copies.</summary>
     public static FigureImage Of(CopiesResult copies, string id = "copies") => CurveFigures.Of(copies, id);
 
+    /// <summary>Numbers of copies against a varied value, one series for each target; null when nothing is varied or no number was found.</summary>
+    public static FigureImage? Of(CopiesTable copies, string id = "copies") => CurveFigures.Of(copies, id);
+
     /// <summary>Parties and messages against time; null when nothing takes time.</summary>
     public static FigureImage? Of(RunResult run, string id = "timeline") => TimelineFigure.Of(run, id);
 

@@ -39,6 +39,9 @@ public static class Judge
     /// <summary>Finds the values at which a goal is just met.</summary>
     public static Outcome<ToleranceResult> Tolerance(ToleranceRequest request) => ToleranceJudgement.Of(request);
 
+    /// <summary>Works a study off.</summary>
+    public static Outcome<ResourceCheck.Studies.StudyResult> Study(ResourceCheck.Studies.StudyRequest request) => ResourceCheck.Studies.StudyJudgement.Of(request);
+
     /// <summary>Follows storage side by side against time.</summary>
     public static Outcome<StorageResult> Storage(StorageRequest request) => StorageJudgement.Of(request);
 

@@ -26,6 +26,7 @@ public static class Catalogue
             StateCatalogue.All,
             JudgementCatalogue.All,
             StudyCatalogue.All,
+            ResourceCheck.Studies.StudyFileMessages.Explanations,
             UsageCatalogue.All,
         ];
         return [.. steps.SelectMany(s => s).OrderBy(e => e.Code, StringComparer.Ordinal)];

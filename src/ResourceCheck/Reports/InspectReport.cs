@@ -69,7 +69,8 @@ internal static class InspectReport
         [.. timeline.Where(l => l.Kind == TimelineKind.Message).Select(l => (IReadOnlyList<Cell>)
             [Cell.Of(l.Start, "s"), Cell.Of(l.End, "s"), Cell.Of(l.Party), Cell.Of(l.To ?? "all"), Cell.Of(l.Text)])]);
 
-    private static Table Schedule(IEnumerable<ScheduleLine> timeline) => new(
+    /// <summary>The schedule as a table.</summary>
+    public static Table Schedule(IEnumerable<ScheduleLine> timeline) => new(
         [
             new("start", "From", "s"),
             new("end", "Until", "s"),

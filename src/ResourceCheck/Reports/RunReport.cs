@@ -27,17 +27,28 @@ internal static class RunReport
             [
                 new Section(null, Short(figures, run), Remarks(run)),
                 .. Goals(run),
-                .. UncertaintyReport.Sections(run.Uncertainty, f => IsShown(f, run)),
+                .. Uncertainties(run),
                 .. RateTable.Sections(run.Rates),
-                .. Attacks(run.Attacks, a => Noticed(run, a), run.List is not null),
-                .. Drift(run),
-                .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
-                .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
+                .. Rest(run),
             ],
             Long(figures, run),
             Provenance.Of(run),
             run.Warnings);
     }
+
+    /// <summary>Figures and goals, strategies, outcomes and what limits the result, for a page that shows uncertainties and rates elsewhere.</summary>
+    public static IReadOnlyList<Section> Judged(RunResult run) => [new Section(null, Short(Figure.AllOf(run), run) with { Headed = true }, Remarks(run)), .. Goals(run), .. Rest(run)];
+
+    /// <summary>What uncertain values do to the figures shown.</summary>
+    public static IReadOnlyList<Section> Uncertainties(RunResult run) => UncertaintyReport.Sections(run.Uncertainty, f => IsShown(f, run));
+
+    private static IEnumerable<Section> Rest(RunResult run) =>
+    [
+        .. Attacks(run.Attacks, a => Noticed(run, a), run.List is not null),
+        .. Drift(run),
+        .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
+        .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
+    ];
 
     /// <summary>Uncertainties are shown of what the short table shows; goals stand there under the name of their figure.</summary>
     private static bool IsShown(FigureBand band, RunResult run) => band.Kind switch
@@ -119,7 +130,8 @@ internal static class RunReport
             yield return LongRow(new Figure(HonestCase, $"rate behind {stage.Name}", "", "", "1/s", (stage.Probability ?? Estimate.Exact(1)) with { Value = rate, Low = double.NaN, High = double.NaN }, null, null, "", false));
     }
 
-    private static string Standing(GoalResult goal) => (goal.Undecided, goal.Met) switch
+    /// <summary>Whether a goal is met, in words.</summary>
+    public static string Standing(GoalResult goal) => (goal.Undecided, goal.Met) switch
     {
         (true, true) => "undecided (met at the central values)",
         (true, false) => "undecided (not met at the central values)",

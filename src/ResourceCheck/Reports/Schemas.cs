@@ -8,7 +8,7 @@ public static class Schemas
     private const string Conditions = "conditions";
 
     /// <summary>Names of all schemas.</summary>
-    public static IReadOnlyList<string> Names { get; } = [Conditions, "result", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies", "copies-table"];
+    public static IReadOnlyList<string> Names { get; } = [Conditions, "result", "verification", "inspection", "state", "storage", "relaxation", "budget", "sweep", "tolerance", "copies", "copies-table", "study"];
 
     /// <summary>A schema's text; null for an unknown name.</summary>
     public static string? Find(string name) =>

@@ -38,6 +38,7 @@ public static class UsageCatalogue
         new("U042", "no probability", "A target is a number above 0 and up to 1.", "Write for example 1e-6 or 0.001.", "resourcecheck copies protocols/liar-detection.protocol --failure 2"),
         new("U043", "no drift", "A drift is a fraction of runs and the conditions that they are under.", "Write the fraction, a colon and the name of a conditions file.", "resourcecheck run protocols/removal.protocol --drift 1%"),
         new("U047", "no name for a figure", "Figures are written as SVG, and their numbers beside them in a file that ends in .dat.", "Give a name that ends in .svg.", "resourcecheck sweep protocols/removal.protocol --vary flight.depolarising=0..0.1 --figure curve.png"),
+        new("U048", "a file where a folder is needed", "A report is a folder of files.", "Name another folder with --folder.", "resourcecheck report winter.study.json --folder winter.study.json"),
         new("U090", "out of memory", "The work needs more memory than there is.", "Use a smaller case, or set --memory so that a leaner engine is chosen."),
         new("U099", "mistake of the program", "The program met a state that its authors thought impossible. Your input need not be wrong.", "Report it with the command line, the input files and the version. RESOURCECHECK_TRACE=1 in the environment shows details for the report."),
     ];
