@@ -65,9 +65,13 @@ internal static class SweepFigures
 
     private static IEnumerable<Estimate> Values(SweepResult sweep, string name) => sweep.Points.Select(p => FigureOf(p, name)).OfType<Estimate>().Where(e => double.IsFinite(e.Value));
 
-    private static ChartPoint Point(SweepPoint point, string name) => FigureOf(point, name) is { } e
-        ? e.Label == TruthLabel.Exact ? new ChartPoint(point.Values[0], e.Value) : new ChartPoint(point.Values[0], e.Value, e.Low, e.High)
-        : new ChartPoint(point.Values[0], double.NaN);
+    private static ChartPoint Point(SweepPoint point, string name) => (FigureOf(point, name), point.Bands.FirstOrDefault(b => b.Name == name)) switch
+    {
+        (null, _) => new ChartPoint(point.Values[0], double.NaN),
+        ({ } e, { } band) => new ChartPoint(point.Values[0], e.Value, band.Low, band.High),
+        ({ Label: TruthLabel.Exact } e, _) => new ChartPoint(point.Values[0], e.Value),
+        var (e, _) => new ChartPoint(point.Values[0], e.Value, e.Low, e.High),
+    };
 
     private static string Label(SweepResult sweep, string name)
     {
@@ -86,6 +90,7 @@ internal static class SweepFigures
         string failed = sweep.Points.Count(p => p.Failure is not null) is > 0 and var count ? $" {count} points could not be computed." : "";
         return $"From {Value(varied, varied.From)} to {Value(varied, varied.To)} of {varied.Path}, {string.Join("; ", courses)}."
             + string.Concat(goals.Select(g => $" The line at {FigureText.Number(g.Threshold)} is the goal {g.Text}."))
+            + (sweep.Points.Any(p => p.Bands.Count > 0) ? " Shaded bands hold 95 % of what the uncertain conditions allow." : "")
             + (tolerated is { } t ? $" The goal is met up to {Value(varied, t)}." : "") + failed;
     }
 }

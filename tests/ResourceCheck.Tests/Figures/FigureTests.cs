@@ -97,7 +97,7 @@ public sealed class FigureTests
     {
         string[] lines = Kinds["curve"]().Data.Split('\n');
         Assert.Equal("x y1 low1 high1", lines[0]);
-        Assert.Equal("1 0.9 nan nan", lines[1]);
+        Assert.Equal("1 0.9 0.876 0.924", lines[1]);
         Assert.Equal("2 nan nan nan", lines[2]);
         Assert.Equal("3 nan nan nan", lines[3]);
     }

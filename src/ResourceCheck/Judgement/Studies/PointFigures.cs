@@ -21,6 +21,14 @@ internal static class PointFigures
         return request.Uncertainty is null ? point : WithBands(point, setup.Value!, all, goals);
     }
 
+    /// <summary>Name of a metric among the figures of a point.</summary>
+    public static string Name(MetricName metric) => metric.Kind switch
+    {
+        MetricKind.Checkpoint => $"fidelity {metric.Label}",
+        MetricKind.Report => metric.Label,
+        _ => metric.ToString(),
+    };
+
     private static SweepPoint WithBands(SweepPoint point, Setup setup, IReadOnlyList<Evaluated> all, IReadOnlyList<(Goal Goal, GoalResult Result)> goals)
     {
         Outcome<UncertaintyResult> found = UncertaintyJudgement.Of(setup, RunFigures.Of(all), null, samples: 0, s => RunFigures.Of(s, cheats: false));
@@ -37,14 +45,6 @@ internal static class PointFigures
         FigureKind.Checkpoint => $"fidelity {figure.Name}",
         FigureKind.Metric or FigureKind.Yield => figure.Name,
         _ => "",
-    };
-
-    /// <summary>Name of a metric among the figures of a point.</summary>
-    public static string Name(MetricName metric) => metric.Kind switch
-    {
-        MetricKind.Checkpoint => $"fidelity {metric.Label}",
-        MetricKind.Report => metric.Label,
-        _ => metric.ToString(),
     };
 
     private static IEnumerable<KeyValuePair<string, Estimate>> Figures(IReadOnlyList<Evaluated> all)
