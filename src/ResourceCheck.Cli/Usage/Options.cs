@@ -62,7 +62,7 @@ internal sealed class Options
 
     public Option<string[]> Samples { get; } = Value("--samples", "NUMBER", "Number of trajectories where figures must be sampled. Default 1000.");
 
-    public Option<string[]> Draws { get; } = Value("--samples", "NUMBER", "Draws that check first-order uncertainties; 0 for none. Default 200.");
+    public Option<string[]> Draws { get; } = Value("--draws", "NUMBER", "Draws that check first-order uncertainties; 0 for none. Default 200.");
 
     public Option<bool> Quiet { get; } = new("--quiet") { Description = "Show no warnings on standard error; documents still hold them." };
 

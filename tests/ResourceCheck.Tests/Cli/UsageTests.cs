@@ -80,7 +80,7 @@ public sealed partial class UsageTests : IDisposable
     }
 
     [Theory]
-    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift --uncertainty --samples --figure")]
+    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift --uncertainty --draws --figure")]
     [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --uncertainty --figure")]
     [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm --vary --figure")]
     [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until --uncertainty --figure")]
