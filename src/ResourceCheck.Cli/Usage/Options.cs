@@ -44,6 +44,8 @@ internal sealed class Options
 
     public Option<string[]> Goal { get; } = Value("--until", "GOAL", "Goal to hold, such as \"success >= 0.9\"; without it the script's tightest.");
 
+    public Option<string[]> Choose { get; } = Value("--choose", "CASE: NAME=NUMBER, …", "Numbers for a dishonest case in place of the worst ones that a search finds, such as \"receiver forges: m = 24\". May be repeated.");
+
     public Option<string[]> Drift { get; } = Value("--drift", "FRACTION:FILE", "A fraction of runs under worse conditions, such as 0.01:worse.conditions.json: what failure and harms become, and the floor under them.");
 
     public Option<string[]> Failure { get; } = Value("--failure", "PROBABILITY", "What honest failure must not exceed, such as 1e-6.");
@@ -67,7 +69,7 @@ internal sealed class Options
     public Option<bool> Force { get; } = new("--force") { Description = "Replace files that exist." };
 
     /// <summary>Whether an option may be given several times.</summary>
-    public static bool MayRepeat(Option option) => option.Name is "--set" or "--parameter" or "--vary";
+    public static bool MayRepeat(Option option) => option.Name is "--set" or "--parameter" or "--vary" or "--choose";
 
     private static Option<string[]> Value(string name, string helpName, string description, string[]? choices = null)
     {

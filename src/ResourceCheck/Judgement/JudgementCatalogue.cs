@@ -34,5 +34,8 @@ internal static class JudgementCatalogue
         new("P031", "interception that knows too much", "An interception happens in flight, when no message has been sent yet, so a conditional block around it can use only the outsider's own values and hold only the outsider's lines.", "Condition it on the outsider's own picks."),
         new("P032", "choices out of reach", "On single copies every combination of a cheat's choices is tried; here there are none, or too many.", "Narrow the ranges, or make a case for each part."),
         new("P033", "uncertainties are not carried through", "Values of the conditions are given with a standard uncertainty. Figures are computed from the central values; this is a note.", "Try the ends with --set, or sweep over the value."),
+        new("P040", "unknown case", "--choose names a case that the script does not have, that leaves no number open, or that has its numbers already.", "Name a case of the script whose `choose` lines leave numbers open, once.", "--choose \"sender splits: n = 84, k1 = 0, k2 = 15, o = 7, n1 = 126\""),
+        new("P041", "numbers of a case", "--choose must give every number that the case leaves open, each once.", "Write the case, a colon, and each number as name = value, separated by commas."),
+        new("P042", "number outside its range", "A number given with --choose lies outside the range of its `choose` line, or is not whole where the range is.", "Give a number within the range; ranges may depend on numbers before."),
     ];
 }

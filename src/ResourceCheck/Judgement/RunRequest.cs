@@ -30,6 +30,12 @@ public sealed record RunRequest
     /// <summary>A fraction of runs that are under worse conditions without anybody noticing; null for none.</summary>
     public Drift? Drift { get; init; }
 
+    /// <summary>Numbers for cheats in place of the worst ones that a search finds, such as <c>sender splits: n = 84, k1 = 0</c>.</summary>
+    public IReadOnlyList<string> Choose { get; init; } = [];
+
+    /// <summary>Told about the search for the worst numbers; null for nobody.</summary>
+    public IProgress<SearchNote>? Progress { get; init; }
+
     /// <summary>Most memory an engine may take, bytes; null uses what the machine has free.</summary>
     public double? MemoryLimit { get; init; }
 }

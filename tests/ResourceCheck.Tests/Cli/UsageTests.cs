@@ -80,7 +80,7 @@ public sealed partial class UsageTests : IDisposable
     }
 
     [Theory]
-    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift")]
+    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --choose --drift")]
     [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads")]
     [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm")]
     [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until")]
