@@ -18,7 +18,7 @@ internal static class CommandTree
         Option[] judging = [o.Under, o.Set, o.Parameter, o.Engine, o.Memory];
         Option[] writing = [o.Format, o.Out, o.Quiet];
         Option[] computing = [o.Seed, o.Threads];
-        Add("run", "SCRIPT", "Evaluate a protocol under conditions: success, harm, yield, fidelity, time, verdict.", RunCommand.Execute, [.. judging, o.Choose, o.Drift, .. writing, .. computing]);
+        Add("run", "SCRIPT", "Evaluate a protocol under conditions: success, harm, yield, fidelity, time, verdict.", RunCommand.Execute, [.. judging, o.Choose, o.Drift, o.TryLevels, .. writing, .. computing]);
         Add("verify", "SCRIPT", "Prove or refute what the protocol claims, exactly, under ideal conditions.", VerifyCommand.Execute, [o.Parameter, o.Memory, .. writing, .. computing]);
         Add("inspect", "SCRIPT", "Compute nothing: show who knows what, the timeline, the engine and its cost, and every mistake.", InspectCommand.Execute, [.. judging, .. writing, .. computing]);
         Add("budget", "SCRIPT", "Share a loss out among its sources: each alone, each removed, and its part of the whole.", BudgetCommand.Execute, [.. judging, .. writing, .. computing]);

@@ -17,7 +17,7 @@ internal static class RunCommand
         Drift? drift = use.Drift(o.Drift);
         if (Work.Request(use, o) is not { } asked)
             return Work.Refuse(use);
-        RunRequest request = asked with { Drift = drift, Choose = use.Texts(o.Choose), Cancellation = token, Progress = target.Quiet ? null : new Teller(use.Session.Terminal) };
+        RunRequest request = asked with { Drift = drift, Choose = use.Texts(o.Choose), TryLevels = use.Has(o.TryLevels), Cancellation = token, Progress = target.Quiet ? null : new Teller(use.Session.Terminal) };
         Outcome<RunResult> outcome = await Work.Compute(() => use.Session.Library.Run(request), token);
         return Work.Finish(use, target, outcome, (run, writer, colour) => ReportWriter.Write(run, target.Format, writer, colour), CodeOf, run => run.Warnings);
     }

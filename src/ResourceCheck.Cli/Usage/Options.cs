@@ -46,6 +46,8 @@ internal sealed class Options
 
     public Option<string[]> Choose { get; } = Value("--choose", "CASE: NAME=NUMBER, …", "Numbers for a dishonest case in place of the worst ones that a search finds, such as \"receiver forges: m = 24\". May be repeated.");
 
+    public Option<bool> TryLevels { get; } = new("--try-levels") { Description = "Compare which physical level plays which value of the script." };
+
     public Option<string[]> Drift { get; } = Value("--drift", "FRACTION:FILE", "A fraction of runs under worse conditions, such as 0.01:worse.conditions.json: what failure and harms become, and the floor under them.");
 
     public Option<string[]> Failure { get; } = Value("--failure", "PROBABILITY", "What honest failure must not exceed, such as 1e-6.");

@@ -80,7 +80,7 @@ internal static class CheatEvaluator
 
         AttackOutcome worst = ChosenNumbers.For(cheating.Request.Choose, cheating.Case) is { } given
             ? WorstCase.At(task with { Choices = given }, cheating.Request.Cancellation)
-            : WorstCase.Find(task, new SearchOptions(), SearchTeller.Of(cheating.Request, cheating.Case, cheating.At), cheating.Request.Cancellation);
+            : cheating.Request.Searches.Of(task, () => WorstCase.Find(task, new SearchOptions(), SearchTeller.Of(cheating.Request, cheating.Case, cheating.At), cheating.Request.Cancellation));
         if (worst is not { Choices: { } choices, Evaluation: { } evaluation, Average: { } average })
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.SearchRefused(cheating.Case.Name, worst.Refusal!)]);
         return Outcome<CheatEvaluation>.Of(new CheatEvaluation(

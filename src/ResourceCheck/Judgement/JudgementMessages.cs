@@ -167,6 +167,9 @@ internal static class JudgementMessages
         "look at the ranges in the script; they may depend on the numbers before",
         Place.Of("--choose"));
 
+    public static Diagnostic TooManyLevels(int levels, int most) => new(
+        "P043", Severity.Error, $"All assignments of {levels} levels are too many to compare: one number of levels, up to {most}, fits here.", "leave --try-levels out, and set resource.levels to the assignments that matter", Place.Of("--try-levels"));
+
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
 

@@ -33,6 +33,12 @@ public sealed record RunRequest
     /// <summary>Numbers for cheats in place of the worst ones that a search finds, such as <c>sender splits: n = 84, k1 = 0</c>.</summary>
     public IReadOnlyList<string> Choose { get; init; } = [];
 
+    /// <summary>Whether every assignment of physical levels to the script's values is compared.</summary>
+    public bool TryLevels { get; init; }
+
+    /// <summary>Searches made for this request; requests made from it share them.</summary>
+    internal AttackMemory Searches { get; } = new();
+
     /// <summary>Told about the search for the worst numbers; null for nobody.</summary>
     public IProgress<SearchNote>? Progress { get; init; }
 

@@ -80,7 +80,7 @@ public sealed partial class UsageTests : IDisposable
     }
 
     [Theory]
-    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --choose --drift")]
+    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --choose --drift --try-levels")]
     [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads")]
     [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm")]
     [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until")]
@@ -138,6 +138,6 @@ public sealed partial class UsageTests : IDisposable
     [GeneratedRegex(@"\((U\d\d\d)\)")]
     private static partial Regex CodePattern();
 
-    [GeneratedRegex(@"(?m)(?<=^  (-h, )?)--[a-z]+")]
+    [GeneratedRegex(@"(?m)(?<=^  (-h, )?)--[a-z]+(-[a-z]+)*")]
     private static partial Regex OptionPattern();
 }
