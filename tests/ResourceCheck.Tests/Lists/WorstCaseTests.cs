@@ -26,6 +26,17 @@ public sealed class WorstCaseTests
         Assert.Equal(1.0174065210e-1, found.Evaluation!.Harm.Value, 10);
     }
 
+    /// <summary>Without noise the forger's harm falls exponentially; the best size is found where it is far below what a first comparison leaves out.</summary>
+    [Fact]
+    public void Small_harms_are_searched_with_as_little_left_out_as_they_need()
+    {
+        ListTask task = Broadcast.Forger(1200, Copies.Depolarised(0, 0, 0), 0);
+        AttackOutcome found = WorstCase.Find(task, new SearchOptions(ExhaustiveUpTo: 2000), null, TestContext.Current.CancellationToken);
+        double best = Enumerable.Range(90, 12).Max(size => CountingEngine.Evaluate(task with { Choices = [Value.Of(size)] }, TestContext.Current.CancellationToken).Evaluation!.Harm.Value);
+        Assert.InRange(best, 1e-12, 1e-6);
+        Assert.Equal(1, found.Evaluation!.Harm.Value / best, 9);
+    }
+
     [Fact]
     public void A_saw_toothed_function_with_a_far_peak_is_climbed()
     {

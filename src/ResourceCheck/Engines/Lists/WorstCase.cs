@@ -7,8 +7,11 @@ namespace ResourceCheck.Engines.Lists;
 /// <summary>Worst harm of a cheating strategy over the numbers left to the cheat.</summary>
 public sealed class WorstCase
 {
-    /// <summary>Paths left out while points are compared: of a harm above 1e-3 that hides less than a few parts in a thousand, alike for neighbours.</summary>
+    /// <summary>Paths left out while points are compared, at first: of a harm above 1e-3 that hides less than a few parts in a thousand, alike for neighbours.</summary>
     private const double NegligibleInSearch = 1e-7;
+
+    /// <summary>A harm less than this many times what is left out is not seen well, and the search is made again with less left out.</summary>
+    private const double Visible = 1e4;
 
     /// <summary>The best points of a search, evaluated again with the task's own limit.</summary>
     private const int Finalists = 48;
@@ -22,7 +25,7 @@ public sealed class WorstCase
     private readonly ListTask _task;
     private readonly ListProgram _program;
     private readonly ChoiceRange[] _ranges;
-    private readonly ListLimits _coarse;
+    private ListLimits _coarse;
     private readonly CancellationToken _cancellation;
     private readonly ConcurrentDictionary<string, Attack> _attacks = [];
 
@@ -72,12 +75,25 @@ public sealed class WorstCase
     private AttackOutcome Find(SearchOptions options, IProgress<SearchProgress>? progress)
     {
         (int, int)[] bounds = [.. _ranges.Select(r => (r.First, r.Last))];
-        SearchResult found = AttackSearch.Maximise(bounds, p => Of(p).Harm, options, progress, _cancellation);
+        SearchResult found = Searched(bounds, options, progress);
         if (found.Choices.Count < _ranges.Length)
             throw new ListRefusalException("There is nothing to choose: a range is empty.");
         (Attack worst, ListEvaluation evaluation) = Worst();
         SearchResult fine = found with { Choices = worst.Point, Value = evaluation.Harm.Value };
         return new AttackOutcome(Values(worst.Point), evaluation, fine, null) { Average = Average(worst, bounds, options) };
+    }
+
+    private SearchResult Searched((int, int)[] bounds, SearchOptions options, IProgress<SearchProgress>? progress)
+    {
+        SearchResult found = AttackSearch.Maximise(bounds, p => Of(p).Harm, options, progress, _cancellation);
+        while (found.Choices.Count == _ranges.Length && found.Value < _coarse.Negligible * Visible && _coarse.Negligible > _task.Limits.Negligible)
+        {
+            _coarse = _coarse with { Negligible = Math.Max(_task.Limits.Negligible, _coarse.Negligible / Visible) };
+            _attacks.Clear();
+            found = AttackSearch.Maximise(bounds, p => Of(p).Harm, options, progress, _cancellation);
+        }
+
+        return found;
     }
 
     /// <summary>The best points again without what their comparison left out; among equals the one with the smallest numbers.</summary>
