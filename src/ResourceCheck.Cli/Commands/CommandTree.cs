@@ -24,7 +24,7 @@ internal static class CommandTree
         Add("budget", "SCRIPT", "Share a loss out among its sources: each alone, each removed, and its part of the whole.", BudgetCommand.Execute, [.. judging, .. writing, .. computing]);
         Add("tolerance", "SCRIPT", "Find up to which value a goal is met.", ToleranceCommand.Execute, [o.Vary, o.Goal, .. judging, .. writing, .. computing]);
         Add("sweep", "SCRIPT", "Evaluate at every point of one or two ranges; interrupted sweeps go on.", SweepCommand.Execute, [o.Vary, .. judging, .. writing, .. computing]);
-        Add("copies", "SCRIPT", "Find how many copies a failure probability costs, honest and with the cheats listed.", CopiesCommand.Execute, [o.Failure, o.Harm, .. judging, .. writing, .. computing]);
+        Add("copies", "SCRIPT", "Find how many copies a failure probability costs, honest and with the cheats listed.", CopiesCommand.Execute, [o.Failure, o.Harm, o.Optimise, .. judging, .. writing, .. computing]);
         Add("state", "FILE", "Tell what a prepared state is: validity, fidelity, purity, negativity, populations.", StateCommand.Execute, [o.Mend, .. writing]);
         Add("storage", "CONDITIONS", "Tell how long emitters side by side keep the antisymmetric state, beside its symmetric counterpart and independent decay.", StorageCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, .. writing]);
         Add("relaxation", "CONDITIONS", "Tell what shared decay makes of a start: fidelity, populations and yield against time.", RelaxationCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, o.Samples, o.Seed, .. writing]);

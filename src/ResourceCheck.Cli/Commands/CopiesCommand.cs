@@ -19,7 +19,10 @@ internal static class CopiesCommand
         double failure = use.Probability(o.Failure) ?? DefaultFailure, harm = use.Probability(o.Harm) ?? failure;
         if (Work.Request(use, o) is not { } request)
             return Work.Refuse(use);
-        CopiesRequest copies = new(request with { Cancellation = token }, failure, harm, target.Quiet ? null : new Teller(use.Session.Terminal));
+        CopiesRequest copies = new(request with { Cancellation = token }, failure, harm, target.Quiet ? null : new Teller(use.Session.Terminal))
+        {
+            Optimise = use.Text(o.Optimise)?.Split(',', StringSplitOptions.TrimEntries) ?? [],
+        };
         Outcome<CopiesResult> outcome = await Work.Compute(() => Judge.Copies(copies), token);
         return Work.Finish(use, target, outcome, (result, writer, colour) => ReportWriter.Write(result, target.Format, writer, colour), _ => ExitCodes.Done, result => result.Warnings);
     }

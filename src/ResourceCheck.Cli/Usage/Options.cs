@@ -54,6 +54,8 @@ internal sealed class Options
 
     public Option<string[]> Harm { get; } = Value("--harm", "PROBABILITY", "What every harm must not exceed; the same as --failure unless said, and with 1 harms are not looked at.");
 
+    public Option<string[]> Optimise { get; } = Value("--optimise", "NAMES", "Choose these thresholds (parameters with a real range, separated by commas, or all) so that few copies suffice.");
+
     public Option<string[]> Until { get; } = Value("--until", "TIME", "Last time, such as \"5 ns\"; without it the duration in the conditions.");
 
     public Option<string[]> Points { get; } = Value("--points", "NUMBER", "Number of times from 0 on. Default 41.");

@@ -27,6 +27,10 @@ internal static class CheatEvaluator
         return setting.Protocol.Lists is null ? OnCopies(cheating) : OnLists(cheating);
     }
 
+    /// <summary>What one strategy asks of the lists at some inputs; null when no copy is kept or numbers are used before there are lists.</summary>
+    public static ListTask? ListTaskOf(Setting setting, DishonestCase cheat, PreparedState state, IReadOnlyList<Value> inputs, EngineChoice engine, RunRequest request) =>
+        cheat.ChoosesInRounds ? null : new Cheating(setting, cheat, state, inputs, engine, setting.Words, request).Task();
+
     /// <summary>One strategy with all that its evaluation needs.</summary>
     private sealed record Cheating(Setting Setting, DishonestCase Case, PreparedState State, IReadOnlyList<Value> Inputs, EngineChoice Engine, string At, RunRequest Request)
     {
@@ -34,6 +38,13 @@ internal static class CheatEvaluator
         {
             Plan plan = Planner.Lay(Setting.Protocol.Lists is null ? Case.In(Setting.Protocol, choices) : Case.Rounds(Setting.Protocol), Case.PerfectHardware ? PerfectHardware.Of(Setting.World, Case.By) : Setting.World);
             return Evaluator.Copies(Setting, plan, State, Inputs, Engine, Request);
+        }
+
+        /// <summary>What is asked of the lists; null when no copy is kept.</summary>
+        public ListTask? Task()
+        {
+            Evaluation copies = Copies([]);
+            return copies.Yield > 0 ? new ListTask { Protocol = Setting.Protocol, Copies = copies.Copies, Inputs = Inputs, Case = Case } : null;
         }
 
         public KeyValuePair<string, string>[] Named(IReadOnlyList<Value> choices) => [.. Case.Choices.Zip(choices, (c, v) => KeyValuePair.Create(c.Name, Scripts.Binding.Words.Write(v)))];
@@ -68,10 +79,8 @@ internal static class CheatEvaluator
     {
         if (cheating.Case.ChoosesInRounds)
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.SearchRefused(cheating.Case.Name, "a number is used in a round, before there are lists; make a case for each of its values.")]);
-        Evaluation copies = cheating.Copies([]);
-        if (!(copies.Yield > 0))
+        if (cheating.Task() is not { } task)
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.NothingKept($"case \"{cheating.Case.Name}\"")]);
-        ListTask task = new() { Protocol = cheating.Setting.Protocol, Copies = copies.Copies, Inputs = cheating.Inputs, Case = cheating.Case };
         if (cheating.Case.Choices.Count == 0)
         {
             ListEvaluation verdict = ListVerdicts.Of(task, cheating.Request);

@@ -82,7 +82,7 @@ public sealed partial class UsageTests : IDisposable
     [Theory]
     [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --choose --drift --try-levels")]
     [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads")]
-    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm")]
+    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm --optimise")]
     [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until")]
     [InlineData("sweep", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary")]
     [InlineData("verify", "--parameter --memory --format --out --quiet --seed --threads")]

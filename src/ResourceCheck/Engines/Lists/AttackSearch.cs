@@ -44,6 +44,21 @@ public sealed class AttackSearch
         return points <= options.ExhaustiveUpTo ? search.All() : search.Climb();
     }
 
+    /// <summary>The best point that climbs from some points lead to; quick, and good where the starts were best for a question much like this one.</summary>
+    /// <param name="ranges">Least and greatest value of each number.</param>
+    /// <param name="value">The function; called from several threads.</param>
+    /// <param name="starts">Where to begin; numbers outside their range are moved to its end.</param>
+    /// <param name="step">First step; it is halved down to 1.</param>
+    /// <param name="cancellation">Stops the search.</param>
+    public static (int[] Point, double Value) Nearby(
+        IReadOnlyList<(int From, int To)> ranges, Func<IReadOnlyList<int>, double> value, IEnumerable<int[]> starts, int step, CancellationToken cancellation)
+    {
+        SearchMemory memory = new(value, null, cancellation);
+        AttackSearch search = new(ranges, memory, new SearchOptions());
+        Parallel.ForEach(starts, memory.Parallel, start => search.Descend([.. start.Select((n, i) => Math.Clamp(n, ranges[i].From, ranges[i].To))], step));
+        return memory.Best();
+    }
+
     private SearchResult All()
     {
         _memory.EvaluateAll(Grid(_ranges.Select(r => r.To - r.From + 1).ToArray()));
@@ -153,8 +168,12 @@ public sealed class AttackSearch
 
     private int[] Climb(int[] start, int points)
     {
+        return Descend(start, Math.Max(1, _ranges.Max(r => r.To - r.From) / points));
+    }
+
+    private int[] Descend(int[] start, int step)
+    {
         int[] at = start;
-        int step = Math.Max(1, _ranges.Max(r => r.To - r.From) / points);
         for (; ; step /= 2)
         {
             while (Better(at, step) is { } next)

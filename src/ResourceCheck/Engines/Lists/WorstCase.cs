@@ -55,6 +55,21 @@ public sealed class WorstCase
     public static AttackOutcome At(ListTask task, CancellationToken cancellation) =>
         Guarded(task, cancellation, w => new AttackOutcome(task.Choices, w._program.Evaluate(task.Choices, task.Limits, cancellation), null, null) { Average = w.Plain(task.Choices) });
 
+    /// <summary>Climbs from points that were worst in much the same task, and from these with one number at its least; a quick look that a search of its own must follow.</summary>
+    /// <param name="task">The task; its choices are ignored.</param>
+    /// <param name="starts">Points as a search counts them.</param>
+    /// <param name="negligible">Paths left out.</param>
+    /// <param name="cancellation">Stops the search.</param>
+    internal static (int[] Point, double Harm) Near(ListTask task, IReadOnlyList<int[]> starts, double negligible, CancellationToken cancellation)
+    {
+        WorstCase search = new(task, task.Case!, cancellation);
+        search._coarse = task.Limits with { Negligible = negligible };
+        int[][] from = [.. starts, .. starts.SelectMany(s => s.Select((_, i) => (int[])[.. s.Select((n, k) => k == i ? search._ranges[k].First : n)]))];
+        return AttackSearch.Nearby([.. search._ranges.Select(r => (r.First, r.Last))], p => search.Of(p).Harm, from, NearStep, cancellation);
+    }
+
+    private const int NearStep = 8;
+
     private static AttackOutcome Guarded(ListTask task, CancellationToken cancellation, Func<WorstCase, AttackOutcome> find)
     {
         DishonestCase cheat = task.Case ?? throw new ArgumentException("There is no cheat in this task.", nameof(task));
