@@ -12,7 +12,7 @@ from scipy.sparse import csr_matrix, identity, kron
 from scipy.sparse.linalg import expm_multiply
 
 import dense
-from tables import Table
+from tables import Table, told
 
 LEGEND = """\
 # columns:   name,N,kind,parameters,value
@@ -261,10 +261,7 @@ def main(arguments):
         findings += compared(table)
     else:
         write([table])
-    wrong = [text for passed, text in findings if not passed]
-    print(*(f"FAILED {text}\n" for text in wrong), sep="", end="")
-    print(f"{len(findings) - len(wrong)} passed, {len(wrong)} failed")
-    return 1 if wrong else 0
+    return told(findings)
 
 
 if __name__ == "__main__":

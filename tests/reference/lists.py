@@ -11,7 +11,7 @@ from itertools import permutations, product
 
 import numpy as np
 
-from tables import Table, stored_values
+from tables import Table, stored_values, told
 
 TOLERANCE = 1e-9
 A, B, C, T1, T2 = Fraction(1, 4), Fraction(3, 40), Fraction(42, 100), Fraction(6, 100), Fraction(1, 4)
@@ -196,10 +196,7 @@ def main(arguments):
         findings += list(compared(table))
     else:
         table.path.write_text(table.text().replace("tests/reference/recompute.py", "tests/reference/lists.py"), encoding="utf-8")
-    wrong = [text for passed, text in findings if not passed]
-    print(*(f"FAILED {text}\n" for text in wrong), sep="", end="")
-    print(f"{len(findings) - len(wrong)} passed, {len(wrong)} failed")
-    return 1 if wrong else 0
+    return told(findings)
 
 
 if __name__ == "__main__":

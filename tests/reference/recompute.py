@@ -12,7 +12,7 @@ import preparation
 import runs
 import removal
 import tolerance
-from tables import near, stored_values
+from tables import near, stored_values, told
 
 BUILDERS = [local_noise.build, removal.build, outcomes.build, pairs.build, preparation.build, runs.build, tolerance.build]
 
@@ -27,10 +27,7 @@ def main(arguments):
         findings += [finding for table in tables for finding in compared(table)]
     else:
         write(tables)
-    wrong = [text for passed, text in findings if not passed]
-    print(*(f"FAILED {text}\n" for text in wrong), sep="", end="")
-    print(f"{len(findings) - len(wrong)} passed, {len(wrong)} failed")
-    return 1 if wrong else 0
+    return told(findings)
 
 
 def asserted(table):

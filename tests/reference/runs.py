@@ -17,7 +17,7 @@ RUN_LEGEND = """\
 # columns:   name,N,kind,parameters,value
 #   name: the script, NAME.protocol beside NAME.conditions.json, from the root of the project
 #   kind: success, yield, checkpoint (a fidelity), kept (fraction kept up to that checkpoint) or report
-#   parameters: label=LABEL of the checkpoint or report"""
+#   parameters: label=LABEL of the checkpoint or report; script=NAME where the conditions have no script of their own"""
 
 
 def build():
@@ -27,6 +27,7 @@ def build():
     interface(table)
     turned(table)
     library.removal(table)
+    library.removal_stored(table)
     library.sharing(table)
     library.intercepted(table)
     library.pair(table)

@@ -89,3 +89,11 @@ def stored_values(path):
 
 def near(value, expected, tolerance=TOLERANCE):
     return math.isfinite(value) and abs(value - expected) <= tolerance
+
+
+def told(findings):
+    """Prints what failed and how many passed; gives the exit code."""
+    wrong = [text for passed, text in findings if not passed]
+    print(*(f"FAILED {text}\n" for text in wrong), sep="", end="")
+    print(f"{len(findings) - len(wrong)} passed, {len(wrong)} failed")
+    return 1 if wrong else 0

@@ -43,9 +43,6 @@ internal static class NewCommand
         if (OutputFile.Write([(script, Starter.Script), (conditions, Starter.Conditions)]) is { } finding)
             return use.Session.Terminal.Fail([finding], ExitCodes.WrongInput, "nothing was written");
         return use.Session.Terminal.Write(
-            $"Wrote {script} and {conditions}.\nNext: resourcecheck run {Quoted(script)} --under {Quoted(conditions)}\n", ExitCodes.Done);
+            $"Wrote {script} and {conditions}.\nNext: resourcecheck run {Words.Quoted(script)} --under {Words.Quoted(conditions)}\n", ExitCodes.Done);
     }
-
-    /// <summary>As a command line takes it.</summary>
-    private static string Quoted(string file) => file.Any(char.IsWhiteSpace) ? $"\"{file}\"" : file;
 }

@@ -9,7 +9,7 @@ internal static class SchemaCommand
     /// <summary>Executes it.</summary>
     public static Task<int> Execute(Invocation use, Options o, CancellationToken token)
     {
-        string? name = use.Only($"a name: {Findings.OneOf(Schemas.Names)}");
+        string? name = use.Only($"a name: {ResourceCheck.Diagnostics.Words.Or(Schemas.Names)}");
         string? schema = name is null ? null : Schemas.Find(name);
         if (name is not null && schema is null)
             use.Findings.Add(Findings.UnknownSchema(name, Schemas.Names));

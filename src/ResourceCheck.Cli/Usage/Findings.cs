@@ -9,16 +9,16 @@ internal static class Findings
     public const string Program = "resourcecheck";
 
     public static Diagnostic NoCommand(IEnumerable<string> commands) =>
-        new("U001", Severity.Error, $"A command is missing: {OneOf(commands)} fit here.", "resourcecheck --help explains them.", Place.Of("the command line"));
+        new("U001", Severity.Error, $"A command is missing: {Diagnostics.Words.Or(commands)} fit here.", "resourcecheck --help explains them.", Place.Of("the command line"));
 
     public static Diagnostic UnknownCommand(Words words, string word, IReadOnlyList<string> commands) => new(
-        "U001", Severity.Error, $"`{word}` is no command: {OneOf(commands)} fit here.", Suggest(NearWords.Find(word, commands), "resourcecheck --help explains them."), words.PlaceOf(word));
+        "U001", Severity.Error, $"`{word}` is no command: {Diagnostics.Words.Or(commands)} fit here.", Suggest(NearWords.Find(word, commands), "resourcecheck --help explains them."), words.PlaceOf(word));
 
     public static Diagnostic UnknownOption(Words words, string word, string command, IReadOnlyList<string> options)
     {
         string name = word.Split('=')[0];
         string help = command == Program ? $"{Program} --help" : $"{Program} {command} --help";
-        return new("U002", Severity.Error, $"`{name}` is no option of {command}: {OneOf(options)} fit here.", Suggest(NearWords.Find(name, options), $"{help} explains them."), words.PlaceOf(word));
+        return new("U002", Severity.Error, $"`{name}` is no option of {command}: {Diagnostics.Words.Or(options)} fit here.", Suggest(NearWords.Find(name, options), $"{help} explains them."), words.PlaceOf(word));
     }
 
     public static Diagnostic OneWordTooMany(Words words, string word, string command, string takes) => new(
@@ -34,7 +34,7 @@ internal static class Findings
         new("U006", Severity.Error, $"{command} needs {needs}.", $"add it behind {command}; resourcecheck {command} --help shows how.", Place.Of("the command line"));
 
     public static Diagnostic UnknownChoice(Words words, string option, string value, IReadOnlyList<string> choices) => new(
-        "U007", Severity.Error, $"`{value}` is no choice of {option}: {OneOf(choices)} {(choices.Count == 1 ? "fits" : "fit")} here.", Suggest(NearWords.Find(value, choices), $"choose {OneOf(choices)}."), words.PlaceOf(value, option));
+        "U007", Severity.Error, $"`{value}` is no choice of {option}: {Diagnostics.Words.Or(choices)} {(choices.Count == 1 ? "fits" : "fit")} here.", Suggest(NearWords.Find(value, choices), $"choose {Diagnostics.Words.Or(choices)}."), words.PlaceOf(value, option));
 
     public static Diagnostic NoPair(Words words, string option, string value, string example) => new(
         "U008", Severity.Error, $"`{value}` behind {option} is not of the form name=value.", $"write {option} {example}.", words.PlaceOf(value, option));
@@ -103,20 +103,13 @@ internal static class Findings
     }
 
     public static Diagnostic UnknownSchema(string name, IReadOnlyList<string> known) => new(
-        "U041", Severity.Error, $"There is no schema `{name}`: {OneOf(known)} fit here.", Suggest(NearWords.Find(name, known), $"choose {OneOf(known)}."), Place.Of("the command line"));
+        "U041", Severity.Error, $"There is no schema `{name}`: {Diagnostics.Words.Or(known)} fit here.", Suggest(NearWords.Find(name, known), $"choose {Diagnostics.Words.Or(known)}."), Place.Of("the command line"));
 
     public static Diagnostic OutOfMemory() =>
         new("U090", Severity.Error, "The work needs more memory than there is, so no result could be had.", "use a smaller case, or set --memory so that a leaner engine is chosen.", Place.Of("the machine"));
 
     public static Diagnostic OwnMistake(Exception mistake, string version) => new(
         "U099", Severity.Error, $"ResourceCheck {version} made a mistake of its own ({mistake.GetType().Name}); no result could be had, and your input need not be wrong.", "report this message with the command line and the input files; RESOURCECHECK_TRACE=1 shows details.", Place.Of("the program"));
-
-    /// <summary>The words with commas and a final "or".</summary>
-    public static string OneOf(IEnumerable<string> words)
-    {
-        string[] all = [.. words];
-        return all.Length < 2 ? string.Concat(all) : $"{string.Join(", ", all[..^1])} or {all[^1]}";
-    }
 
     private static string Suggest(string? near, string otherwise) => near is null ? otherwise : $"did you mean {near}?";
 

@@ -6,7 +6,7 @@ namespace ResourceCheck.Cli.Usage;
 internal sealed class Words(IReadOnlyList<string> args)
 {
     private const string Name = "the command line";
-    private readonly string[] _shown = [.. args.Select(Show)];
+    private readonly string[] _shown = [.. args.Select(Quoted)];
 
     /// <summary>The place of a word; where it stands behind an option, the one behind it.</summary>
     public Place PlaceOf(string word, string? behind = null)
@@ -47,5 +47,13 @@ internal sealed class Words(IReadOnlyList<string> args)
     private static bool Matches(string arg, string word) =>
         arg == word || arg.StartsWith($"{word}=", StringComparison.Ordinal) || arg.EndsWith($"={word}", StringComparison.Ordinal);
 
-    private static string Show(string arg) => arg.Length == 0 || arg.Any(char.IsWhiteSpace) ? $"\"{arg}\"" : arg;
+    /// <summary>A word as a shell takes it: in quotes where blanks or signs of the shell stand in it.</summary>
+    public static string Quoted(string arg) => (arg.Length > 0 && !arg.Any(IsSpecial), arg.AsSpan().IndexOfAny("\"$`\\!") < 0) switch
+    {
+        (true, _) => arg,
+        (_, true) => $"\"{arg}\"",
+        _ => $"'{arg.Replace("'", "'\\''", StringComparison.Ordinal)}'",
+    };
+
+    private static bool IsSpecial(char c) => char.IsWhiteSpace(c) || "\"'$`\\!*?()<>;&|".Contains(c, StringComparison.Ordinal);
 }

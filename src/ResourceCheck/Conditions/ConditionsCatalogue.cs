@@ -223,8 +223,8 @@ internal static class ConditionsCatalogue
         new(
             "C040",
             "File not readable",
-            "A file that the conditions name is absent, too large or not readable.",
-            "Check the name; it counts from the folder of the conditions file."),
+            "A file that the conditions or the script name is absent, too large or not readable.",
+            "Check the name; it counts from the folder of the file that names it."),
         new(
             "C041",
             "No matrix",
@@ -263,8 +263,8 @@ internal static class ConditionsCatalogue
         new(
             "C052",
             "Family member above the last",
-            "The family has fewer members at today's parameters. This is a note: the entry has no effect.",
-            "Nothing need be done."),
+            "The family has fewer members, at today's parameters and at the largest that the script allows. This is a note: the entry has no effect.",
+            "Take the entry out, unless the script is to grow."),
         new(
             "C053",
             "No such level",

@@ -12,13 +12,13 @@ internal static class ConditionsMessages
     // form of the file
     public static Diagnostic NotJson(Spot at, string found) =>
         Error("C001", at,
-            $"`{found}` does not fit here: a conditions file is JSON, made of objects, lists, texts in double quotes, numbers, true and false.",
+            $"`{found}` does not fit here: JSON is made of objects, lists, texts in double quotes, numbers, true and false.",
             "check the quotes, commas and colons around it");
 
     public static Diagnostic EndsTooEarly(Spot at) =>
         Error("C001", at,
-            "The text ends before the conditions are complete.",
-            "close every quote and bracket; the smallest conditions file is {}");
+            "The text ends before its JSON is complete.",
+            "close every quote and bracket; the smallest conditions file is {}, the smallest matrix [[1]]");
 
     public static Diagnostic MissingComma(Spot at) =>
         Error("C001", at,
@@ -269,7 +269,7 @@ internal static class ConditionsMessages
     public static Diagnostic FileNotRead(Spot at, string path, string file, string why) =>
         Error("C040", at,
             $"The file {file} of `{path}` cannot be read: {why}.",
-            "check the name; it counts from the folder of the conditions file");
+            $"check the name; it counts from the folder of {(at.IsOption ? "the conditions file, or from the one you are in" : at.Source.Name)}");
 
     public static Diagnostic BadMatrix(Spot at, string file, string found, string wanted) =>
         Error("C041", at,
@@ -310,8 +310,11 @@ internal static class ConditionsMessages
             $"`{section}` speaks of {name}, who is an outsider: nothing that conditions describe happens to outsiders.",
             "take the entry out");
 
+    /// <summary>Code of the note on family members above today's last one.</summary>
+    public const string MemberAboveCode = "C052";
+
     public static Diagnostic MemberAbove(Spot at, string name, string section, string last) =>
-        new("C052", Severity.Note, $"`{section}` speaks of {name}; at today's parameters the family ends with {last}, and what lies above it has no effect.", null, at.ToPlace());
+        new(MemberAboveCode, Severity.Note, $"`{section}` speaks of {name}; at today's parameters the family ends with {last}, and what lies above it has no effect.", null, at.ToPlace());
 
     public static Diagnostic NoSuchLevel(Spot at, string path, int level, int levels) =>
         Error("C053", at,

@@ -10,12 +10,17 @@ namespace ResourceCheck.Diagnostics;
 /// <param name="Place">Where; null when no place can be given.</param>
 public sealed record Diagnostic(string Code, Severity Severity, string Message, string? Cure, Place? Place)
 {
+    /// <summary>No word that people read is as long; file names, which may be, stand in the place and stay whole.</summary>
+    private const int LongestWord = 120;
+
+    private const int ShownOfWord = 60;
+
     /// <summary>The finding as users read it, over several lines, without a trailing newline.</summary>
     public override string ToString()
     {
-        StringBuilder text = new(Severity == Severity.Error ? Message : $"{Severity}: {Message}");
+        StringBuilder text = new(Severity == Severity.Error ? Cut(Message) : $"{Severity}: {Cut(Message)}");
         if (Place?.LineText is { } line)
-            text.Append("\n    ").Append(Quote(line, Place));
+            text.Append("\n    ").Append(Cut(Quote(line, Place)));
         if (Cure is not null)
             text.Append("\n  Cure: ").Append(Cure);
         text.Append("\n  at ").Append(Location()).Append(" (").Append(Code).Append(')');
@@ -28,6 +33,15 @@ public sealed record Diagnostic(string Code, Severity Severity, string Message, 
         { Line: 0 } => Place.File,
         _ => $"{Place.File}:{Place.Line}:{Place.Column}",
     };
+
+    // Hundreds of digits would bury the sentence around them; the signs behind a cut word, such as closing quotes, stay.
+    private static string Cut(string text) => string.Join(' ', text.Split(' ').Select(word =>
+    {
+        int end = word.Length;
+        while (end > 0 && !char.IsLetterOrDigit(word[end - 1]))
+            end--;
+        return end <= LongestWord ? word : $"{word[..ShownOfWord]}…{word[end..]}";
+    }));
 
     private static string Quote(string line, Place place)
     {

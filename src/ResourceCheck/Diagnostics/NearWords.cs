@@ -9,14 +9,14 @@ public static class NearWords
 
     /// <summary>The nearest candidate if it is near enough to be a slip: one change up to four letters, two up to seven, else three.</summary>
     /// <param name="word">The word as written.</param>
-    /// <param name="candidates">The words that fit; of several as near the first is taken.</param>
+    /// <param name="candidates">The words that fit; of several as near the first is taken. The word itself is no suggestion.</param>
     /// <returns>The candidate, or null when none is near.</returns>
     public static string? Find(string word, IEnumerable<string> candidates)
     {
         ArgumentNullException.ThrowIfNull(word);
         if (word.Length > LongestWord)
             return null;
-        (string? Word, int Distance) best = candidates.Select(c => ((string?)c, Distance(word, c))).DefaultIfEmpty((null, int.MaxValue)).MinBy(c => c.Item2);
+        (string? Word, int Distance) best = candidates.Where(c => c != word).Select(c => ((string?)c, Distance(word, c))).DefaultIfEmpty((null, int.MaxValue)).MinBy(c => c.Item2);
         return best.Word is not null && best.Distance <= Allowed(Math.Min(word.Length, best.Word.Length)) ? best.Word : null;
     }
 

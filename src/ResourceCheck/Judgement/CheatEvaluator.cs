@@ -47,7 +47,7 @@ internal static class CheatEvaluator
             return copies.Yield > 0 ? new ListTask { Protocol = Setting.Protocol, Copies = copies.Copies, Inputs = Inputs, Case = Case } : null;
         }
 
-        public KeyValuePair<string, string>[] Named(IReadOnlyList<Value> choices) => [.. Case.Choices.Zip(choices, (c, v) => KeyValuePair.Create(c.Name, Scripts.Binding.Words.Write(v)))];
+        public KeyValuePair<string, string>[] Named(IReadOnlyList<Value> choices) => [.. Case.Choices.Zip(choices, (c, v) => KeyValuePair.Create(c.Name, Scripts.Binding.Written.Write(v)))];
     }
 
     private static Outcome<CheatEvaluation> OnCopies(Cheating cheating)

@@ -1,7 +1,9 @@
+using ResourceCheck.Conditions;
 using ResourceCheck.Diagnostics;
 using ResourceCheck.Engines;
 using ResourceCheck.Engines.Dense;
 using ResourceCheck.Engines.Lists;
+using ResourceCheck.Numerics.Collective;
 using ResourceCheck.Resources;
 using ResourceCheck.Scripts.Binding;
 using ResourceCheck.Timeline;
@@ -23,7 +25,9 @@ internal static class Evaluator
             return Outcome<EngineChoice>.Failed([JudgementMessages.CollectiveTooLarge(setting.Protocol.Levels, RelaxedPrepared.MostParties)]);
         EngineChoice choice = DenseEngine.Estimate(setting.Plan, Reason(setting, request));
         double limit = Math.Min(request.MemoryLimit ?? (GC.GetGCMemoryInfo().TotalAvailableMemoryBytes * UsableMemory), DenseEngine.LargestMemory);
-        return choice.MemoryBytes > limit ? Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit, request.MemoryLimit is not null)]) : Outcome<EngineChoice>.Of(choice);
+        if (choice.MemoryBytes > limit)
+            return Outcome<EngineChoice>.Failed([JudgementMessages.DoesNotFit(choice, limit, request.MemoryLimit is not null, setting.Plan.NeedsSink)]);
+        return TooLong(setting.World) is { } tooLong ? Outcome<EngineChoice>.Failed([tooLong]) : Outcome<EngineChoice>.Of(choice);
     }
 
     /// <summary>Evaluates a setting for all private inputs.</summary>
@@ -59,6 +63,13 @@ internal static class Evaluator
         Outcome<CheatEvaluation>[] outcomes = [.. setting.Protocol.Dishonest.SelectMany(cheat =>
             (cheat.Asks(setting.Protocol.Inputs) ? honest : honest.Take(1)).Select(h => CheatEvaluator.Evaluate(setting, cheat, state, h, request)))];
         return Outcome<IReadOnlyList<CheatEvaluation>>.From([.. outcomes.Select(o => o.Value).OfType<CheatEvaluation>()], [.. outcomes.SelectMany(o => o.Findings)]);
+    }
+
+    private static Diagnostic? TooLong(World world)
+    {
+        double storage = EvolutionCost.OfStorage(world), relaxed = EvolutionCost.OfPreparation(world);
+        return Math.Max(storage, relaxed) <= EvolutionCost.Most ? null
+            : storage >= relaxed ? JudgementMessages.TooLongToIntegrate("storage", storage) : JudgementMessages.TooLongToIntegrate("resource.relaxed", relaxed);
     }
 
     private static string Reason(Setting setting, RunRequest request)

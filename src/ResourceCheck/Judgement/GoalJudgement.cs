@@ -29,7 +29,7 @@ internal static class GoalJudgement
             (_, 1) => "Goal not met:",
             (int count, int whole) => $"{count} of {whole} goals not met; the furthest:",
         };
-        return $"{head} {Name(goal.Metric)} is {Value(result.Value)}, the goal is {(goal.Comparison == BinaryOperator.GreaterOrEqual ? "at least" : "at most")} {FigureText.Number(goal.Threshold)}.";
+        return $"{head} {Name(goal.Metric)} is {Value(result.Value, goal.Metric)}, the goal is {(goal.Comparison == BinaryOperator.GreaterOrEqual ? "at least" : "at most")} {FigureText.Number(goal.Threshold)}.";
     }
 
     /// <summary>A metric as sentences name it.</summary>
@@ -55,9 +55,9 @@ internal static class GoalJudgement
         return $"No goal set: success is {FigureText.Number(success)}{fidelity}.";
     }
 
-    private static string Value(Estimate value) => value switch
+    private static string Value(Estimate value, MetricName metric) => value switch
     {
-        { Value: double.NaN } => "undefined",
+        { Value: double.NaN } => metric.Kind == MetricKind.Checkpoint ? "undefined (never reached)" : "undefined",
         { Label: TruthLabel.Bound } => $"{(double.IsFinite(value.Low) ? "at least" : "at most")} {FigureText.Number(value.Value)}",
         _ => FigureText.Number(value.Value),
     };

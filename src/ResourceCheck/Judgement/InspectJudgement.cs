@@ -18,6 +18,7 @@ internal static class InspectJudgement
             Protocol = new InputFile(setup.Request.Script.Name, setup.Request.Script.Sha256),
             Title = setting.Protocol.Name,
             Conditions = Provenance.Conditions(setup),
+            Overrides = setup.Request.Overrides,
             Parameters = Provenance.Parameters(setup),
             Parties = setting.Protocol.Parties,
             Levels = setting.Protocol.Levels,

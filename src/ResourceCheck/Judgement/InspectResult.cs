@@ -18,6 +18,9 @@ public sealed record InspectResult
     /// <summary>The conditions; null when ideal.</summary>
     public required InputFile? Conditions { get; init; }
 
+    /// <summary>Overrides in the order given.</summary>
+    public IReadOnlyList<KeyValuePair<string, string>> Overrides { get; init; } = [];
+
     /// <summary>Parameters with the values used.</summary>
     public required IReadOnlyList<ParameterUse> Parameters { get; init; }
 

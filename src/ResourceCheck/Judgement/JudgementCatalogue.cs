@@ -17,6 +17,7 @@ internal static class JudgementCatalogue
         new("E008", "search refused", "The worst choice of a cheat on lists is found by counting, which is too much work here or does not apply.", "Lower M, or fix some of the choices."),
         new("E009", "loss that cannot be shared out", "A budget compares a figure with and without each source of loss; the figure must be exact and defined each time.", "Set a goal on another figure, which the budget is then about."),
         new("E017", "relaxation too large", "Relaxation starts from a state vector of N emitters with N levels each, and beyond eight of them it does not fit in memory.", "Ask for fewer emitters."),
+        new("E018", "integration too long", "Exchange shifts between emitters grow as the inverse cube of their spacing, and the state must be followed through every turn they make; here that would take hours.", "Move the emitters apart, shorten the time, or take the shape `point`, which has no exchange shifts.", "\"spacing\": \"0.0002 wavelengths\""),
         new("P001", "unknown parameter", "--parameter names something that the script does not declare.", "Use a declared name; `inspect` lists them.", "--parameter m=3"),
         new("P002", "unreadable value", "The value of --parameter is no number, fraction, list, range or `all`.", "Write a number, 1/3, 3,4 or 3..8.", "--parameter n=three"),
         new("P003", "outside the domain", "The script limits the values of this parameter.", "Choose a value inside, or widen the domain in the script.", "--parameter n=40"),

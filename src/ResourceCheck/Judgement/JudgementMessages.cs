@@ -47,11 +47,11 @@ internal static class JudgementMessages
     public static Diagnostic NotUnitary(Place at, string file, double defect) => new(
         "P013", Severity.Error, $"The matrix in {file} is not unitary: U†U differs from 1 by {FigureText.Number(defect)}, more than 1e-9.", "give every entry with all its digits", at);
 
-    public static Diagnostic DoesNotFit(EngineChoice choice, double limit, bool asked) => new(
+    public static Diagnostic DoesNotFit(EngineChoice choice, double limit, bool asked, bool hasSink) => new(
         "E001",
         Severity.Error,
-        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {FigureText.Bytes(limit)} may be used{(asked ? " (--memory)" : "")}.",
-        $"{(asked && choice.MemoryBytes < DenseEngine.LargestMemory ? "allow more with --memory if the machine has it, " : "")}lower the number of parties, or herald losses (one that is not adds a level)",
+        $"The dense evaluation would take {FigureText.Bytes(choice.MemoryBytes)} of memory; {Allowed(limit, asked)}.",
+        $"{(asked && choice.MemoryBytes < DenseEngine.LargestMemory ? "allow more with --memory if the machine has it, " : "")}lower the number of parties{(hasSink ? ", or herald losses (one that is not adds a level)" : "")}",
         Place.Of("engine"));
 
     public static Diagnostic UnknownEngine(string name) => new(
@@ -80,6 +80,13 @@ internal static class JudgementMessages
         $"Storage with photons evolves the density operator of all emitters, which takes {FigureText.Bytes(16 * Math.Pow(parties, 2 * parties))} for {parties} of them: up to {most} emitters fit here.",
         $"lower the number of parties, or look at storage alone: `resourcecheck storage FILE --parties {parties}`, exact for up to {PhotonFreeStorage.MostEmitters} emitters, with and without heralding",
         Place.Of("storage"));
+
+    public static Diagnostic TooLongToIntegrate(string section, double work) => new(
+        "E018",
+        Severity.Error,
+        $"Integrating `{section}` would take about {FigureText.Number(work)} multiplications, hours on one core: up to {FigureText.Number(EvolutionCost.Most)} fit here. Exchange shifts grow as the inverse cube of the spacing.",
+        "move the emitters apart, shorten the time, or take the shape `point`, the limit without exchange shifts",
+        Place.Of(section));
 
     public static Diagnostic TooManyToRelax(int emitters, int most) => new(
         "E017",
@@ -163,7 +170,7 @@ internal static class JudgementMessages
     public static Diagnostic NumberOutside(Scripts.Binding.DishonestCase cheat, int index, Scripts.Binding.Value value) => new(
         "P042",
         Severity.Error,
-        $"{cheat.Choices[index].Name} = {Scripts.Binding.Words.Write(value)} lies outside what case \"{cheat.Name}\" leaves open: {(cheat.Choices[index].Whole ? "a whole number" : "a number")} within its `choose` line fits here.",
+        $"{cheat.Choices[index].Name} = {Scripts.Binding.Written.Write(value)} lies outside what case \"{cheat.Name}\" leaves open: {(cheat.Choices[index].Whole ? "a whole number" : "a number")} within its `choose` line fits here.",
         "look at the ranges in the script; they may depend on the numbers before",
         Place.Of("--choose"));
 
@@ -172,6 +179,13 @@ internal static class JudgementMessages
 
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
+
+    private static string Allowed(double limit, bool asked) => FigureText.Bytes(limit) switch
+    {
+        var size when limit >= DenseEngine.LargestMemory => $"the engine can use {size} at most on any machine",
+        var size when asked => $"--memory allows {size}",
+        var size => $"of this machine's, {size} may be used",
+    };
 
     private static string Domain(ParameterInfo parameter) =>
         parameter.Values is { } values ? Words.Or(values.Select(v => v.ToString())) : $"a number from {parameter.From} to {parameter.To}";

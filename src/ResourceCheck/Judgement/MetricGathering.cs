@@ -1,5 +1,6 @@
 using ResourceCheck.Engines;
 using ResourceCheck.Scripts.Binding;
+using ResourceCheck.Timeline;
 
 namespace ResourceCheck.Judgement;
 
@@ -20,7 +21,7 @@ internal static class MetricGathering
     }
 
     public static IReadOnlyList<CheckpointResult> Checkpoints(IReadOnlyList<Evaluated> all) =>
-        [.. all.SelectMany(e => e.Actual.Checkpoints.Select(c => c.Label)).Distinct().Select(label => Checkpoint(label, all))];
+        [.. all.SelectMany(e => PlanLabels.Of(e.Setting.Plan)).Distinct().Select(label => Checkpoint(label, all))];
 
     public static YieldResult Yield(IReadOnlyList<Evaluated> all)
     {
@@ -31,7 +32,8 @@ internal static class MetricGathering
     private static MetricResult Worst(string name, IReadOnlyList<Evaluated> all, Func<Evaluation, Estimate> figure, bool greatest)
     {
         Evaluated worst = all.MinBy(e => (greatest ? -1 : 1) * figure(e.Actual).Value)!;
-        return new MetricResult(name, figure(worst.Actual), Defined(figure(worst.Ideal).Value), Range(all.Select(e => figure(e.Actual).Value)), WorstAt(worst, all));
+        (double Low, double High)? range = Range(all.Select(e => figure(e.Actual).Value));
+        return new MetricResult(name, figure(worst.Actual), Defined(figure(worst.Ideal).Value), range, range is null ? null : worst.At); // where all are alike none is the worst
     }
 
     private static MetricResult Report(string label, IReadOnlyList<Evaluated> all)
@@ -45,11 +47,15 @@ internal static class MetricGathering
     private static CheckpointResult Checkpoint(string label, IReadOnlyList<Evaluated> all)
     {
         (Evaluated Of, CheckpointEvaluation Look)[] looks = [.. all.SelectMany(e => e.Actual.Checkpoints.Where(c => c.Label == label).Select(c => (e, c)))];
+        if (looks.Length == 0)
+            return new CheckpointResult(label, Estimate.Exact(double.NaN), Ideal(label, all[0]), null, 0, double.NaN, [], false);
         (Evaluated worst, CheckpointEvaluation look) = looks.MinBy(pair => pair.Look.Fidelity.Value);
-        double? ideal = Defined(worst.Ideal.Checkpoints.FirstOrDefault(c => c.Label == label)?.Fidelity.Value ?? double.NaN);
+        double? ideal = Ideal(label, worst);
         bool builtIn = worst.Actual.Checkpoints.Take(BuiltIn).Any(c => c.Label == label);
         return new CheckpointResult(label, look.Fidelity, ideal, ideal - look.Fidelity.Value, look.Kept, look.At, look.Branches, builtIn) { Range = Range(looks.Select(l => l.Look.Fidelity.Value)) };
     }
+
+    private static double? Ideal(string label, Evaluated at) => Defined(at.Ideal.Checkpoints.FirstOrDefault(c => c.Label == label)?.Fidelity.Value ?? double.NaN);
 
     /// <summary>Under ideal conditions a figure may be undefined although it is not under these.</summary>
     private static double? Defined(double value) => double.IsNaN(value) ? null : value;
@@ -65,6 +71,4 @@ internal static class MetricGathering
         double[] found = [.. values];
         return found.Length < 2 || found.Max() - found.Min() < RoundOff ? null : (found.Min(), found.Max());
     }
-
-    private static string? WorstAt(Evaluated worst, IReadOnlyList<Evaluated> all) => all.Count < 2 ? null : worst.At;
 }

@@ -19,6 +19,9 @@ internal static class RelaxationJudgement
             return Outcome<RelaxationResult>.Failed(relaxed.Findings);
         if (request.Emitters > AntisymmetricState.MostParties)
             return Outcome<RelaxationResult>.Failed([JudgementMessages.TooManyToRelax(request.Emitters, AntisymmetricState.MostParties)]);
+        double work = EvolutionCost.WithoutPhoton(preparation.Decay, request.Until ?? preparation.Decay.Time.Seconds);
+        if (work > EvolutionCost.Most)
+            return Outcome<RelaxationResult>.Failed([JudgementMessages.TooLongToIntegrate("resource.relaxed", work)]);
         Outcome<PreparedState> start = RelaxedPrepared.Start(preparation.Start, request.Emitters);
         return start.Value is { } state
             ? new Outcome<RelaxationResult>(Follow(request, preparation, state), start.Findings)

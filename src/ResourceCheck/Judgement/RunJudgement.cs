@@ -54,6 +54,7 @@ internal static class RunJudgement
     {
         IReadOnlyList<(Goal Goal, GoalResult Result)> goals = GoalJudgement.Goals(all);
         YieldResult yield = MetricGathering.Yield(all);
+        double[] paces = [.. all.Select(e => SecondsPerKeptCopy(e.Setting, e.Actual.Yield)).OfType<double>()];
         Setting longest = setup.Settings.MaxBy(s => s.Plan.Duration.Seconds)!;
         return new RunResult
         {
@@ -70,10 +71,12 @@ internal static class RunJudgement
             Attacks = CaseGathering.Attacks(all),
             ListMethod = all.Select(e => e.Actual.ListMethod).FirstOrDefault(m => m is not null),
             List = ListOf(longest, yield),
+            DurationRange = MetricGathering.Range(setup.Settings.Select(s => s.Plan.Duration.Seconds)),
             Checkpoints = MetricGathering.Checkpoints(all),
             Yield = yield,
             Duration = longest.Plan.Duration.Seconds,
-            SecondsPerKeptCopy = SecondsPerKeptCopy(longest, yield),
+            SecondsPerKeptCopy = paces.Length == 0 ? null : paces.Max(),
+            SecondsPerKeptCopyRange = MetricGathering.Range(paces),
             Goals = [.. goals.Select(g => g.Result)],
             Verdict = goals.Count == 0 ? Verdict.NoGoals : goals.All(g => g.Result.Met) ? Verdict.Met : Verdict.NotMet,
             VerdictText = GoalJudgement.Sentence(goals, all) + Outside(setup.Settings),
@@ -99,14 +102,14 @@ internal static class RunJudgement
     }
 
     internal static (int Copies, double? Seconds)? ListOf(Setting setting, YieldResult yield) => setting.Protocol.Lists is not { Copies: var copies } ? null
-        : (copies, SecondsPerKeptCopy(setting, yield) is { } each ? (copies * each) + setting.Plan.Duration.Seconds : null);
+        : (copies, SecondsPerKeptCopy(setting, yield.Value.Value) is { } each ? (copies * each) + setting.Plan.Duration.Seconds : null);
 
     /// <summary>Preparation and use of copies overlap, so the slower of the two sets the pace.</summary>
-    private static double? SecondsPerKeptCopy(Setting setting, YieldResult yield)
+    private static double? SecondsPerKeptCopy(Setting setting, double yield)
     {
         if (setting.World.Preparation is not { } preparation)
             return null;
         double period = 1 / (preparation.Attempts.PerSecond * preparation.Success.Value);
-        return Math.Max(period, setting.Plan.Duration.Seconds) / yield.Value.Value;
+        return Math.Max(period, setting.Plan.Duration.Seconds) / yield;
     }
 }

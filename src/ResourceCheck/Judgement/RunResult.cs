@@ -58,11 +58,17 @@ public sealed record RunResult
     /// <summary>Kept fraction of prepared copies, with its factors.</summary>
     public required YieldResult Yield { get; init; }
 
-    /// <summary>Time of one copy, s.</summary>
+    /// <summary>Time of one copy, s; the longest over listed parameter values.</summary>
     public required double Duration { get; init; }
 
-    /// <summary>Seconds per kept copy at the preparation rate; null when no rate is given.</summary>
+    /// <summary>Shortest and longest time of one copy over listed parameter values, s; null when there is but one.</summary>
+    public (double Low, double High)? DurationRange { get; init; }
+
+    /// <summary>Seconds per kept copy at the preparation rate, the most over inputs and listed parameter values; null when no rate is given.</summary>
     public required double? SecondsPerKeptCopy { get; init; }
+
+    /// <summary>Least and most seconds per kept copy over inputs and listed parameter values; null when there is but one.</summary>
+    public (double Low, double High)? SecondsPerKeptCopyRange { get; init; }
 
     /// <summary>Goals in the order written.</summary>
     public required IReadOnlyList<GoalResult> Goals { get; init; }
@@ -105,7 +111,7 @@ public sealed record CaseResult(string Case, IReadOnlyList<string> Dishonest, IR
 /// <param name="Estimate">The number, its label and interval. Over inputs and listed parameters the worst: least success, greatest failure, abort and harm.</param>
 /// <param name="Ideal">The same figure under ideal conditions.</param>
 /// <param name="Range">Least and greatest over inputs and listed parameter values; null when there is but one.</param>
-/// <param name="WorstAt">Input and parameter values at which the shown value is taken; null when there is but one.</param>
+/// <param name="WorstAt">Input and parameter values at which the shown value is taken; null when there is but one, and where all are alike.</param>
 public sealed record MetricResult(string Name, Estimate Estimate, double? Ideal, (double Low, double High)? Range, string? WorstAt);
 
 /// <summary>A cheating strategy at the numbers that do most harm.</summary>
@@ -132,11 +138,11 @@ public sealed record DriftFigure(string Case, string Name, Estimate Whole, Estim
 
 /// <summary>Fidelity at a checkpoint.</summary>
 /// <param name="Name">Its label.</param>
-/// <param name="Fidelity">Fidelity of the copies kept so far; the least over inputs and listed parameter values.</param>
+/// <param name="Fidelity">Fidelity of the copies kept so far; the least over inputs and listed parameter values; not a number where it is never reached.</param>
 /// <param name="Ideal">The same under ideal conditions; null where it is never reached then.</param>
 /// <param name="Loss">Ideal minus fidelity; null where there is no ideal.</param>
 /// <param name="Kept">Fraction of prepared copies kept so far.</param>
-/// <param name="At">Time of the look, s.</param>
+/// <param name="At">Time of the look, s; not a number where it is never reached.</param>
 /// <param name="Branches">Fidelity by outcomes.</param>
 /// <param name="BuiltIn">Whether it is <c>prepared</c>, <c>stored</c> or <c>arrived</c>.</param>
 public sealed record CheckpointResult(string Name, Estimate Fidelity, double? Ideal, double? Loss, double Kept, double At, IReadOnlyList<BranchEvaluation> Branches, bool BuiltIn)

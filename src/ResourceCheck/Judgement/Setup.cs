@@ -37,6 +37,28 @@ internal sealed record Setup(
         return Outcome<Setup>.From(new Setup(request, choices, document?.Value, settings, told), told);
     }
 
+    /// <summary>Beyond this many parties nothing is asked whether a family could grow so far.</summary>
+    private const int MostParties = 64;
+
+    /// <summary>The world of a protocol. Conditions for family members that a larger parameter brings are no slip, so only members beyond those are noted.</summary>
+    private static Outcome<World> WorldOf(ConditionsDocument document, Protocol protocol, ScriptTree tree)
+    {
+        Outcome<World> world = ConditionsFile.Bind(document, protocol);
+        if (!world.Findings.Any(IsMemberAbove) || Grown(tree) is not { } grown)
+            return world;
+        Place?[] beyond = [.. ConditionsFile.Bind(document, grown).Findings.Where(IsMemberAbove).Select(f => f.Place)];
+        return new Outcome<World>(world.Value, [.. world.Findings.Where(f => !IsMemberAbove(f) || beyond.Contains(f.Place))]);
+    }
+
+    private static bool IsMemberAbove(Diagnostic finding) => finding.Code == ConditionsMessages.MemberAboveCode;
+
+    /// <summary>The protocol at the largest values of its whole-number parameters; null where it is wrong there.</summary>
+    private static Protocol? Grown(ScriptTree tree)
+    {
+        IEnumerable<ParameterInfo> growing = Script.ParametersOf(tree).Where(p => p.Values is not null && p.To.IsWhole && p.To <= MostParties);
+        return Script.Bind(tree, growing.ToDictionary(p => p.Name, p => p.To)).Value;
+    }
+
     private static Outcome<ConditionsDocument>? ReadConditions(RunRequest request)
     {
         if (request.Conditions is { } file)
@@ -58,7 +80,7 @@ internal sealed record Setup(
         findings.AddRange(misplaced);
         if (misplaced.Length > 0)
             return;
-        Outcome<World>? world = document?.Value is { } read ? ConditionsFile.Bind(read, checkedProtocol) : null;
+        Outcome<World>? world = document?.Value is { } read ? WorldOf(read, checkedProtocol, tree) : null;
         findings.AddRange(world?.Findings ?? []);
         (IReadOnlyDictionary<string, System.Numerics.Complex[,]> matrices, IReadOnlyList<Diagnostic> matrixFindings) = ScriptMatrices.Read(checkedProtocol);
         findings.AddRange(matrixFindings);

@@ -15,8 +15,11 @@ internal static class StorageJudgement
         Outcome<CollectiveModel> storage = ConditionsFile.Storage(document, request.Emitters);
         if (storage.Value is not { } model)
             return Outcome<StorageResult>.Failed(storage.Findings);
-        return request.Emitters > PhotonFreeStorage.MostEmitters
-            ? Outcome<StorageResult>.Failed([JudgementMessages.TooManyEmitters(request.Emitters, PhotonFreeStorage.MostEmitters)])
+        if (request.Emitters > PhotonFreeStorage.MostEmitters)
+            return Outcome<StorageResult>.Failed([JudgementMessages.TooManyEmitters(request.Emitters, PhotonFreeStorage.MostEmitters)]);
+        double work = EvolutionCost.WithoutPhoton(model, request.Until ?? model.Time.Seconds);
+        return work > EvolutionCost.Most
+            ? Outcome<StorageResult>.Failed([JudgementMessages.TooLongToIntegrate("storage", work)])
             : Outcome<StorageResult>.Of(Follow(request, model));
     }
 

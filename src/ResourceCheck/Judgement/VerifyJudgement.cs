@@ -43,7 +43,7 @@ internal static class VerifyJudgement
         if (outcome.Value is { } evaluations)
         {
             IReadOnlyList<CheatEvaluation> cheats = setting.Protocol.Claims.Any(c => Harmed(c) is not null) ? Evaluator.Cheats(setting.Idealised(), evaluations, request).Value ?? [] : [];
-            return [.. setting.Protocol.Claims.Select((c, i) => Harmed(c) is { } name && cheats.Any(e => e.Case.Name == name) ? OnHarm(c, setting, name, cheats) : Worst(c, i, setting, evaluations))];
+            return [.. setting.Protocol.Claims.Select((c, i) => Harmed(c) is { } name && cheats.Any(e => e.Case.Name == name) ? OnHarm(c, setting, name, cheats) : Worst(c, i, setting, evaluations, request))];
         }
 
         return setting.Protocol.Claims.Select(c => Undone(c, setting, ClaimVerdict.NotVerified, outcome.Findings[0].Message));
@@ -64,21 +64,34 @@ internal static class VerifyJudgement
     private static ClaimResult Undone(Claim claim, Setting setting, ClaimVerdict verdict, string reason) =>
         new(claim.Text, setting.Words, verdict, null, null, [], reason);
 
-    private static ClaimResult Worst(Claim claim, int index, Setting setting, IReadOnlyList<Evaluation> evaluations)
+    private static ClaimResult Worst(Claim claim, int index, Setting setting, IReadOnlyList<Evaluation> evaluations, RunRequest request)
     {
-        ClaimResult[] results = [.. evaluations.Select(e => One(claim, index, setting, e))];
+        ClaimResult[] results = [.. evaluations.Select(e => One(claim, index, setting, e, request))];
         return results.FirstOrDefault(r => r.Verdict == ClaimVerdict.Refuted) ?? results.FirstOrDefault(r => r.Verdict == ClaimVerdict.NotVerified) ?? results[0];
     }
 
-    private static ClaimResult One(Claim claim, int index, Setting setting, Evaluation evaluation)
+    private static ClaimResult One(Claim claim, int index, Setting setting, Evaluation evaluation, RunRequest request)
     {
         (Estimate left, Estimate right) = evaluation.Claims[index];
         string parameters = new Evaluated(setting, evaluation, evaluation).At;
         ClaimVerdict verdict = Decide(claim.Comparison, left, right);
-        IReadOnlyList<BranchEvaluation> breaking = verdict == ClaimVerdict.Refuted ? Breaking.Of(claim, setting.Protocol, evaluation, BreakingTold) : [];
-        string? reason = verdict == ClaimVerdict.NotVerified ? "a side of the claim is undefined or known only as a bound that does not decide it" : null;
+        IReadOnlyList<BranchEvaluation> breaking = verdict == ClaimVerdict.Refuted ? BrokenBy(claim, setting, evaluation, left.Value, right.Value, request) : [];
+        string? reason = verdict == ClaimVerdict.NotVerified ? Reason(left, right) : null;
         return new ClaimResult(claim.Text, parameters, verdict, left.Value, right.Value, breaking, reason) { Label = left.Label == TruthLabel.Exact ? right.Label : left.Label };
     }
+
+    private static IReadOnlyList<BranchEvaluation> BrokenBy(Claim claim, Setting setting, Evaluation evaluation, double left, double right, RunRequest request)
+    {
+        if (Breaking.WouldMend(claim, setting.Protocol, left, right) is not { } success)
+            return Breaking.Of(claim, setting.Protocol, evaluation, BreakingTold);
+        Setting judged = setting with { Protocol = setting.Protocol with { Success = success } };
+        IReadOnlyList<Evaluation> again = Evaluator.Evaluate(judged.Idealised(), request).Value!; // was evaluated once already
+        return [.. again.First(e => e.Inputs.SequenceEqual(evaluation.Inputs)).Failures.Take(BreakingTold)];
+    }
+
+    private static string Reason(Estimate left, Estimate right) => double.IsNaN(left.Value) || double.IsNaN(right.Value)
+        ? "a side is undefined: its checkpoint is never reached, its condition never holds, or it divides by zero"
+        : "a side is known only as a bound that does not decide the claim";
 
     /// <summary>A bound decides a claim only when it lies on the right side.</summary>
     private static ClaimVerdict Decide(BinaryOperator comparison, Estimate left, Estimate right)

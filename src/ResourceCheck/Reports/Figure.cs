@@ -29,14 +29,14 @@ internal sealed record Figure(
         .. run.Checkpoints.Select(c => OfCheckpoint(c, run)),
         .. run.Cases.SelectMany(c => c.Metrics.Select(m => OfMetric(c, m, run))),
         OfYield(run.Yield),
-        OfTime("duration", "time per copy", run.Duration),
-        .. run.SecondsPerKeptCopy is { } seconds ? [OfTime("seconds per kept copy", "time until the next kept copy", seconds)] : Array.Empty<Figure>(),
-        .. run.List is { Seconds: { } whole } list ? [OfTime("seconds per list", $"time until {list.Copies} copies are kept", whole)] : Array.Empty<Figure>(),
+        OfTime("duration", "time per copy", run.Duration, run.DurationRange),
+        .. run.SecondsPerKeptCopy is { } seconds ? [OfTime("seconds per kept copy", "time until the next kept copy", seconds, run.SecondsPerKeptCopyRange)] : Array.Empty<Figure>(),
+        .. run.List is { Seconds: { } whole } list ? [OfTime("seconds per list", $"time until {list.Copies} copies are kept", whole, null)] : Array.Empty<Figure>(),
     ];
 
     private static Figure OfCheckpoint(CheckpointResult checkpoint, RunResult run) => new(
         Honest, checkpoint.Name, checkpoint.Name, "fidelity", FigureText.One, checkpoint.Fidelity, checkpoint.Ideal, checkpoint.Loss,
-        Join(checkpoint.Ideal is null ? "never reached under ideal conditions" : "", RangeNote(checkpoint.Range, checkpoint.Fidelity.Label), KeptNote(checkpoint.Kept, run.Yield.Value.Value), checkpoint.BuiltIn ? "" : SeenNote(run)), !checkpoint.BuiltIn);
+        Join(ReachedNote(checkpoint), RangeNote(checkpoint.Range, checkpoint.Fidelity.Label), KeptNote(checkpoint, run.Yield.Value.Value), checkpoint.BuiltIn ? "" : SeenNote(run)), !checkpoint.BuiltIn);
 
     private static Figure OfMetric(CaseResult of, MetricResult metric, RunResult run) => new(
         of.Case, metric.Name, of.Case == Honest ? metric.Name : $"{metric.Name} \"{of.Case}\"", of.Dishonest.Count == 0 ? "" : $"by {string.Join(", ", of.Dishonest)}",
@@ -46,8 +46,8 @@ internal sealed record Figure(
     private static Figure OfYield(YieldResult yield) =>
         new(Honest, "yield", "copies kept", "", FigureText.One, yield.Value, null, null, FactorNote(yield), true);
 
-    private static Figure OfTime(string quantity, string title, double seconds) =>
-        new(Honest, quantity, title, "", "s", Estimate.Exact(seconds), null, null, "", true);
+    private static Figure OfTime(string quantity, string title, double seconds, (double Low, double High)? range) =>
+        new(Honest, quantity, title, "", "s", Estimate.Exact(seconds), null, null, range is { } ends ? $"from {FigureText.Time(ends.Low)} to {FigureText.Time(ends.High)}" : "", true);
 
     // A protocol in which nobody can give up needs no line that says so.
     private static bool IsIdleAbort(MetricResult metric) => metric is { Name: "abort", Estimate: { Label: TruthLabel.Exact, Value: 0 } };
@@ -65,8 +65,16 @@ internal sealed record Figure(
 
     private static string PresentNote(Estimate estimate) => estimate.Present < 1 ? $"present in {FigureText.Number(estimate.Present)} of copies" : "";
 
-    private static string KeptNote(double kept, double yield) =>
-        kept < 1 && Math.Abs(kept - yield) > 1e-12 ? $"{FigureText.Number(kept)} of copies kept so far" : "";
+    private static string ReachedNote(CheckpointResult checkpoint) => (double.IsNaN(checkpoint.Fidelity.Value), checkpoint.Ideal is null) switch
+    {
+        (true, true) => "never reached, under ideal conditions neither",
+        (true, false) => "never reached",
+        (false, true) => "never reached under ideal conditions",
+        _ => "",
+    };
+
+    private static string KeptNote(CheckpointResult checkpoint, double yield) =>
+        !double.IsNaN(checkpoint.Fidelity.Value) && checkpoint.Kept < 1 && Math.Abs(checkpoint.Kept - yield) > RoundOff ? $"{FigureText.Number(checkpoint.Kept)} of copies kept so far" : "";
 
     private static string FactorNote(YieldResult yield) => Join(
         RangeNote(yield.Range, yield.Value.Label),

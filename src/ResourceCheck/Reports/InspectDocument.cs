@@ -9,7 +9,7 @@ internal static class InspectDocument
     public static void Write(InspectResult inspection, TextWriter writer) => JsonParts.WriteDocument(writer, "inspection", inspection.Version, json =>
     {
         JsonParts.Protocol(json, inspection.Protocol, inspection.Title);
-        JsonParts.Conditions(json, inspection.Conditions, []);
+        JsonParts.Conditions(json, inspection.Conditions, inspection.Overrides);
         JsonParts.Parameters(json, inspection.Parameters);
         JsonParts.Array(json, "parties", inspection.Parties, json.WriteStringValue);
         json.WriteNumber("levels", inspection.Levels);

@@ -13,7 +13,7 @@ internal static class Provenance
     /// <summary>Of a run.</summary>
     public static IReadOnlyList<string> Of(RunResult run) =>
     [
-        Inputs(run.Version, run.Title, run.Protocol, run.Conditions, ideal: run.Overrides.Count == 0 ? "ideal conditions" : "ideal conditions except what is set"),
+        Inputs(run.Version, run.Title, run.Protocol, run.Conditions, Ideal(run.Overrides)),
         .. run.Overrides.Select(o => $"Set: {o.Key} = {o.Value}"),
         .. Parameters(run.Parameters),
         .. run.IntegrationError > 0 ? [$"Collective decay is integrated with an estimated error of {FigureText.Number(run.IntegrationError, Rounding.Up)} in probabilities"] : Array.Empty<string>(),
@@ -27,7 +27,7 @@ internal static class Provenance
     /// <summary>Of a budget.</summary>
     public static IReadOnlyList<string> Of(BudgetResult budget) =>
     [
-        Inputs(budget.Version, budget.Title, budget.Protocol, budget.Conditions, ideal: budget.Overrides.Count == 0 ? "ideal conditions" : "ideal conditions except what is set"),
+        Inputs(budget.Version, budget.Title, budget.Protocol, budget.Conditions, Ideal(budget.Overrides)),
         .. budget.Overrides.Select(o => $"Set: {o.Key} = {o.Value}"),
         .. Parameters(budget.Parameters),
         Engine(budget.Engine),
@@ -48,10 +48,16 @@ internal static class Provenance
 
     /// <summary>Of an inspection.</summary>
     public static IReadOnlyList<string> Of(InspectResult inspection) =>
-        [Inputs(inspection.Version, inspection.Title, inspection.Protocol, inspection.Conditions, ideal: "ideal conditions"), .. Parameters(inspection.Parameters)];
+    [
+        Inputs(inspection.Version, inspection.Title, inspection.Protocol, inspection.Conditions, Ideal(inspection.Overrides)),
+        .. inspection.Overrides.Select(o => $"Set: {o.Key} = {o.Value}"),
+        .. Parameters(inspection.Parameters),
+    ];
 
     /// <summary>A file and the start of its hash.</summary>
     public static string File(string name, string sha256) => $"{name} (SHA-256 {sha256[..Math.Min(ShownHash, sha256.Length)]})";
+
+    private static string Ideal(IReadOnlyList<KeyValuePair<string, string>> overrides) => overrides.Count == 0 ? "ideal conditions" : "ideal conditions except what is set";
 
     private static string Inputs(string version, string title, InputFile protocol, InputFile? conditions, string ideal) =>
         $"ResourceCheck {version}; \"{title}\" from {File(protocol.Name, protocol.Sha256)}; "

@@ -31,10 +31,12 @@ internal static class RunDocument
         JsonParts.Object(json, "copies", () =>
         {
             JsonParts.Number(json, "secondsPerKept", run.SecondsPerKeptCopy);
+            Range(json, run.SecondsPerKeptCopyRange);
             JsonParts.Number(json, "list", run.List?.Copies);
             JsonParts.Number(json, "secondsPerList", run.List?.Seconds);
         });
         JsonParts.Number(json, "duration", run.Duration);
+        Range(json, run.DurationRange, "durationRange");
         JsonParts.Objects(json, "goals", run.Goals, g => Goal(json, g));
         JsonParts.Objects<object>(json, "claims", [], _ => { });
         JsonParts.Objects<object>(json, "sources", [], _ => { });
@@ -116,15 +118,15 @@ internal static class RunDocument
         json.WriteString("worstAt", metric.WorstAt);
     }
 
-    private static void Range(Utf8JsonWriter json, (double Low, double High)? range)
+    private static void Range(Utf8JsonWriter json, (double Low, double High)? range, string name = "range")
     {
         if (range is not { } ends)
         {
-            json.WriteNull("range");
+            json.WriteNull(name);
             return;
         }
 
-        JsonParts.Object(json, "range", () =>
+        JsonParts.Object(json, name, () =>
         {
             JsonParts.Number(json, "low", ends.Low);
             JsonParts.Number(json, "high", ends.High);

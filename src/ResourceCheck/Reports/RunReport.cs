@@ -8,8 +8,13 @@ internal static class RunReport
 {
     private const int ShownBranches = 8;
 
+    private const string HonestCase = "honest";
+
+    /// <summary>Columns of the long table between quantity and note.</summary>
+    private const int EmptyCells = 7;
+
     /// <summary>Branches closer than this are the same for anybody who would choose between them.</summary>
-    private const double SameFidelity = 1e-6;
+    private const double SameFidelity = 1e-4;
 
     /// <summary>Builds the report.</summary>
     public static Report From(RunResult run)
@@ -27,7 +32,7 @@ internal static class RunReport
                 .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
                 .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
             ],
-            Long(figures),
+            Long(figures, run),
             Provenance.Of(run),
             run.Warnings);
     }
@@ -58,7 +63,7 @@ internal static class RunReport
     private static string ShortNote(string note, RunResult run) =>
         run.Yield.OnlySeen ? string.Join("; ", note.Split("; ").Where(n => n != Figure.OnlySeen)) : note;
 
-    private static Table Long(IReadOnlyList<Figure> figures) => new(
+    private static Table Long(IReadOnlyList<Figure> figures, RunResult run) => new(
         [
             new("case", "Case", Legend: "honest or the name of a dishonest block"),
             new("quantity", "Quantity", Legend: "metric or checkpoint"),
@@ -71,7 +76,31 @@ internal static class RunReport
             new("ideal", "Ideal", Legend: "the same under ideal conditions"),
             new("note", "Note"),
         ],
-        [.. figures.Select(LongRow)]);
+        [
+            .. figures.Select(LongRow),
+            .. run.Checkpoints.SelectMany(c => c.Branches.Where(b => b.Outcomes.Count > 0).SelectMany(b => OfBranch(c, b))),
+            .. run.Goals.SelectMany(OfGoal),
+            .. run.Parameters.Select(p => Row($"parameter {p.Name}", p.IsDefault ? $"{string.Join(", ", p.Values)} (default)" : string.Join(", ", p.Values))),
+            Row("verdict", run.VerdictText),
+        ]);
+
+    private static IEnumerable<IReadOnlyList<Cell>> OfBranch(CheckpointResult checkpoint, BranchEvaluation branch)
+    {
+        string at = $"of {checkpoint.Name} at {BranchTable.Outcomes(branch)}";
+        yield return Row($"probability {at}", "", Estimate.Exact(branch.Probability));
+        if (branch.Fidelity is { } fidelity)
+            yield return Row($"fidelity {at}", "", Estimate.Exact(fidelity));
+    }
+
+    private static IEnumerable<IReadOnlyList<Cell>> OfGoal(GoalResult goal)
+    {
+        yield return Row($"goal {goal.Text}", goal.Met ? "met" : "not met", goal.Value);
+        yield return Row($"margin of goal {goal.Text}", "", goal.Value with { Value = goal.Margin, Low = double.NaN, High = double.NaN });
+    }
+
+    private static IReadOnlyList<Cell> Row(string quantity, string note, Estimate? value = null) => value is null
+        ? [Cell.Of(HonestCase), Cell.Of(quantity), .. Enumerable.Repeat(Cell.Empty, EmptyCells), Cell.Of(note)]
+        : LongRow(new Figure(HonestCase, quantity, "", "", Quantities.FigureText.One, value, null, null, note, false));
 
     private static IReadOnlyList<Cell> LongRow(Figure f) =>
     [

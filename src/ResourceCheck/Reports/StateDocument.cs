@@ -25,8 +25,9 @@ internal static class StateDocument
         JsonParts.Objects(json, "figures", state.Figures, f => Figure(json, f));
         JsonParts.Objects(json, "populations", state.Populations, p =>
         {
-            json.WriteString("levels", p.Key);
+            json.WriteString("levels", p.Levels);
             JsonParts.Number(json, "population", p.Value);
+            JsonParts.Number(json, "mended", p.Mended);
         });
     });
 

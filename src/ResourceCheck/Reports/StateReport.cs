@@ -16,9 +16,9 @@ internal static class StateReport
         null,
         [
             new Section(null, Figures(state), []),
-            .. state.MendedBy is { } by ? [Section.Of(Mending(by))] : Array.Empty<Section>(),
+            .. state.MendedBy is { } by ? [Section.Of(Mending(by, state.IsStateAsRead))] : Array.Empty<Section>(),
             Section.Of(Validity(state)),
-            .. state.Populations.Count == 0 ? [] : new[] { new Section(state.MendedBy is null ? "Largest populations" : "Largest populations, as read", Populations(state), []) },
+            .. state.Populations.Count == 0 ? [] : new[] { new Section("Largest populations", Populations(state), []) },
         ],
         Data(state),
         [$"ResourceCheck {version}; {Provenance.File(state.File, state.Sha256)}"],
@@ -33,8 +33,9 @@ internal static class StateReport
         return $"{state.File} holds {kind} of {state.Parties} qudits with {state.Levels} levels each{fidelity}.";
     }
 
-    private static string Mending(double by) => by < NotMended
+    private static string Mending(double by, bool isState) => by < NotMended
         ? "Nothing needed mending: the nearest density matrix is the one read."
+        : isState ? $"The file holds a state within round-off; mending moved it by a trace distance of {FigureText.Number(by)}, which is of no account."
         : $"Mended to the nearest density matrix, a trace distance of {FigureText.Number(by)} away; nothing is certified from a mended state.";
 
     private static string Validity(StateDescription state) => state.IsVector
@@ -58,11 +59,10 @@ internal static class StateReport
         [new("quantity", "Quantity"), new("value", "Value"), new("mended", "Mended"), new("label", "Label")],
         [
             .. state.Figures.Select(f => Row(f, Truth.Name(f.Label))),
-            .. state.Populations.Select(p => (IReadOnlyList<Cell>)[Cell.Of($"population {p.Key}"), Cell.Of(p.Value), Cell.Empty, Cell.Of("exact")]),
+            .. state.Populations.Select(p => (IReadOnlyList<Cell>)[Cell.Of($"population {p.Levels}"), Cell.Of(p.Value), Cell.Of(p.Mended), Cell.Of("exact")]),
         ]);
 
     private static Table Populations(StateDescription state) => new(
-        [new("levels", "Levels"), new("population", "Population"), new("label", "Label")],
-        [.. state.Populations.Select(p => (IReadOnlyList<Cell>)[Cell.Of(p.Key), Cell.Of(p.Value), Cell.Of("exact")])],
-        Headed: false);
+        [new("levels", "Levels"), new("population", state.MendedBy is null ? "Population" : "As read"), new("mended", "Mended"), new("label", "Label")],
+        [.. state.Populations.Select(p => (IReadOnlyList<Cell>)[Cell.Of(p.Levels), Cell.Of(p.Value), Cell.Of(p.Mended), Cell.Of("exact")])]);
 }

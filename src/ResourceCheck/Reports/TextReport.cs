@@ -9,7 +9,7 @@ internal static class TextReport
     private const string Gap = "  ";
 
     /// <summary>A longer text pushes the rest of its own row aside instead of widening the column for all.</summary>
-    private const int WidestColumn = 48;
+    private const int WidestColumn = 60;
 
     /// <summary>Width of paragraphs.</summary>
     private const int LineWidth = 100;

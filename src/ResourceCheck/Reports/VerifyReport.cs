@@ -75,7 +75,7 @@ internal static class VerifyReport
             Cell.Of(Name(c.Verdict)),
             Cell.Of(c.Left),
             Cell.Of(c.Right),
-            Cell.Of(c.Left is null && c.Right is null ? null : Truth.Name(c.Label)),
+            Cell.Of(c.Left is null or double.NaN || c.Right is null or double.NaN ? null : Truth.Name(c.Label)),
             Cell.Of(c.Reason),
         ])]);
 

@@ -10,7 +10,11 @@ namespace ResourceCheck.Resources;
 /// <param name="Mended">The nearest state; null unless asked for.</param>
 /// <param name="MendedBy">Trace distance between the matrix as read and the mended one; null unless asked for.</param>
 internal sealed record CheckedState(
-    (double Hermitian, double Trace, double LowestEigenvalue) Validity, PreparedState Original, PreparedState? Mended, double? MendedBy);
+    (double Hermitian, double Trace, double LowestEigenvalue) Validity, PreparedState Original, PreparedState? Mended, double? MendedBy)
+{
+    /// <summary>Whether the numbers are a state as they are, within the tolerances.</summary>
+    public bool IsStateAsRead { get; init; } = true;
+}
 
 /// <summary>Checks that numbers are a state, and mends small violations when asked to.</summary>
 internal static class StateCheck
@@ -32,7 +36,7 @@ internal static class StateCheck
             return Outcome<CheckedState>.Failed([StateMessages.Norm(file, square, StateTolerances.For(raw).Trace)]);
         PreparedState normalised = State(raw.Shape, Scale(raw.Numbers, 1 / Math.Sqrt(square)));
         PreparedState original = fits ? normalised : State(raw.Shape, raw.Numbers);
-        CheckedState found = new((0, deviation, 0), original, mend ? normalised : null, mend ? deviation / 2 : null);
+        CheckedState found = new((0, deviation, 0), original, mend ? normalised : null, mend ? deviation / 2 : null) { IsStateAsRead = fits };
         return new(found, fits ? [] : [StateMessages.Mended(file, deviation / 2)]);
     }
 
@@ -51,9 +55,9 @@ internal static class StateCheck
         if (wrong.Count > 0 && !(mend && decomposed && deviations.All(x => x <= StateTolerances.Mendable)))
             return Outcome<CheckedState>.Failed(mend && !decomposed ? [.. wrong, StateMessages.MendTooLarge(file, size)] : wrong);
         PreparedState original = State(raw.Shape, wrong.Count == 0 ? Scale(hermitian, 1 / trace.Real) : hermitian);
-        CheckedState found = new((asymmetry.Deviation, Complex.Abs(trace - 1), lowest), original, null, null);
+        CheckedState found = new((asymmetry.Deviation, Complex.Abs(trace - 1), lowest), original, null, null) { IsStateAsRead = wrong.Count == 0 };
         IReadOnlyList<Diagnostic> notes = decomposed ? [] : [StateMessages.NotDecomposed(file, size, tolerances.Negative)];
-        return mend ? Mend(file, raw, found, wrong.Count > 0, notes) : new(found, notes);
+        return mend ? Mend(file, raw, found, notes) : new(found, notes);
     }
 
     private static IEnumerable<Diagnostic> Violations(
@@ -73,7 +77,7 @@ internal static class StateCheck
         Cholesky.IsAbove(hermitian, size, tolerance) ? -tolerance : double.NegativeInfinity;
 
     /// <summary>A large matrix is mended only where nothing needs to be: then it is its own nearest state within the tolerances.</summary>
-    private static Outcome<CheckedState> Mend(string file, RawState raw, CheckedState found, bool needed, IReadOnlyList<Diagnostic> notes)
+    private static Outcome<CheckedState> Mend(string file, RawState raw, CheckedState found, IReadOnlyList<Diagnostic> notes)
     {
         int size = raw.Shape.Dimension;
         if (size > HermitianMatrix.LargestDecomposed)
@@ -82,7 +86,7 @@ internal static class StateCheck
         Complex[] nearest = HermitianMatrix.WithEigenvalues(hermitian, size, SimplexProjection.Of);
         Complex[] change = [.. raw.Numbers.Zip(nearest, (a, b) => a - b)];
         double by = HermitianMatrix.TraceNorm(change, size) / 2;
-        return new(found with { Mended = State(raw.Shape, nearest), MendedBy = by }, needed ? [.. notes, StateMessages.Mended(file, by)] : notes);
+        return new(found with { Mended = State(raw.Shape, nearest), MendedBy = by }, found.IsStateAsRead ? notes : [.. notes, StateMessages.Mended(file, by)]);
     }
 
     private static Complex[] Scale(Complex[] numbers, double factor) => [.. numbers.Select(number => number * factor)];

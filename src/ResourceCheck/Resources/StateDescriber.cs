@@ -25,8 +25,9 @@ internal static class StateDescriber
         IsVector = state.Original.Ket is not null,
         Validity = state.Validity,
         Figures = [.. Definitions(state.Original).Select(d => Evaluate(d, state))],
-        Populations = Largest(state.Original),
+        Populations = Largest(state),
         MendedBy = state.MendedBy,
+        IsStateAsRead = state.IsStateAsRead,
     };
 
     private static StateFigure Evaluate(Definition definition, CheckedState state)
@@ -60,9 +61,10 @@ internal static class StateDescriber
             yield return new($"negativity {cut}", s => StateFigures.Negativity(s, cut));
     }
 
-    private static IReadOnlyList<KeyValuePair<string, double>> Largest(PreparedState state)
+    private static IReadOnlyList<StatePopulation> Largest(CheckedState state)
     {
-        double[] populations = StateFigures.Populations(state);
+        double[] populations = StateFigures.Populations(state.Original);
+        double[]? mended = state.Mended is null ? null : StateFigures.Populations(state.Mended);
         return
         [
             .. Enumerable.Range(0, populations.Length)
@@ -70,7 +72,7 @@ internal static class StateDescriber
                 .OrderByDescending(index => Math.Round(populations[index], 12))
                 .ThenBy(index => index)
                 .Take(MostPopulations)
-                .Select(index => KeyValuePair.Create(Label(index, state), populations[index])),
+                .Select(index => new StatePopulation(Label(index, state.Original), populations[index], mended?[index])),
         ];
     }
 

@@ -24,12 +24,21 @@ public sealed record StateDescription
     /// <summary>Figures in order; the second value is of the mended state when one was asked for.</summary>
     public required IReadOnlyList<StateFigure> Figures { get; init; }
 
-    /// <summary>Populations of the basis states that hold most, as levels such as <c>0-2-1</c>.</summary>
-    public required IReadOnlyList<KeyValuePair<string, double>> Populations { get; init; }
+    /// <summary>Populations of the basis states that hold most.</summary>
+    public required IReadOnlyList<StatePopulation> Populations { get; init; }
 
     /// <summary>Trace distance between the state as read and the mended one; null when none was asked for.</summary>
     public required double? MendedBy { get; init; }
+
+    /// <summary>Whether the numbers are a state as they are, within the tolerances, so that mending only moves round-off.</summary>
+    public bool IsStateAsRead { get; init; } = true;
 }
+
+/// <summary>A population of a basis state.</summary>
+/// <param name="Levels">Its levels, such as <c>0-2-1</c>.</param>
+/// <param name="Value">Its population as read.</param>
+/// <param name="Mended">Its population in the mended state; null when none was asked for.</param>
+public sealed record StatePopulation(string Levels, double Value, double? Mended);
 
 /// <summary>A figure of a state.</summary>
 /// <param name="Name">Its name, such as <c>fidelity</c> or <c>negativity Ada | others</c>.</param>

@@ -16,7 +16,7 @@ internal static class StateMessages
 
     public static Diagnostic Unreadable(string file, Exception slip) => Error(
         "D001",
-        $"The state cannot be read: {Reason(slip)}.",
+        $"`{file}` cannot be read: {Reason(slip)}.",
         "check the name, the folder it is looked for in, and the permissions",
         Place.Of(file));
 
@@ -76,7 +76,7 @@ internal static class StateMessages
 
     public static Diagnostic TooLarge(string file, double dimension, bool isVector) => Error(
         "D011",
-        $"{(isVector ? "A vector of" : "A density matrix with")} {dimension} {(isVector ? "amplitudes" : "rows")} is too large; up to {StateShape.Largest(isVector)} are read.",
+        $"{(isVector ? "A vector of" : "A density matrix with")} {Count(dimension)} {(isVector ? "amplitudes" : "rows")} is too large; up to {StateShape.Largest(isVector)} are read.",
         isVector ? "take fewer parties or levels" : "take fewer parties or levels, or a vector",
         Place.Of(file));
 
@@ -288,6 +288,9 @@ internal static class StateMessages
     private static Diagnostic Error(string code, string message, string cure, Place place) => new(code, Severity.Error, message, cure, place);
 
     private static string CureFor(double deviation) => deviation <= StateTolerances.Mendable ? MendCure : TooFarCure;
+
+    private static string Count(double number) =>
+        double.IsFinite(number) ? number.ToString(number < 1e15 ? "F0" : "g6", CultureInfo.InvariantCulture) : "more than 1e308";
 
     private static string Text(double value) => value.ToString("g6", CultureInfo.InvariantCulture);
 

@@ -52,7 +52,8 @@ internal static class PartyNoise
     private static bool HasFlightNoise(FlightModel f) =>
         f.Rotation is not null || f.PhaseFactors is not null || f.Dephasing > 0 || f.Depolarising > 0 || f.Kraus is not null || f.LeakageProbability.Any(p => p > 0);
 
-    private static SiteNoise FlightNoise(FlightModel flight) => new()
+    /// <summary>Noise on the way, without decay and loss.</summary>
+    internal static SiteNoise FlightNoise(FlightModel flight) => new()
     {
         LeakageProbability = flight.LeakageProbability,
         Rotation = flight.Rotation,

@@ -214,6 +214,18 @@ public sealed class StorageTests
         Assert.InRange(figures.NoPhoton, Math.Exp(-1), 1);
     }
 
+    /// <summary>The figures at time 0 are 1 to the last digits, however many amplitudes share them.</summary>
+    [Fact]
+    public void Sums_over_all_permutations_of_nine_keep_their_digits()
+    {
+        const int Count = 362_880;
+        Complex[] equal = new Complex[Count];
+        Array.Fill(equal, 1 / Math.Sqrt(Count));
+        Assert.Equal(1, AmplitudeLoops.NormSquared(equal), 1e-14);
+        Assert.Equal(1, AmplitudeLoops.Overlap(equal, equal).Real, 1e-14);
+        Assert.Equal(1.0 / 3, AmplitudeLoops.NormSquared(equal.AsSpan(1, Count / 3)), 1e-14); // a length that does not halve evenly
+    }
+
     private static double Figure(TableRow row, bool reduce)
     {
         Couplings c = CollectiveCases.Of(row);

@@ -51,18 +51,7 @@ public sealed class LocalNoiseLaws
         int d = 2 + (Math.Abs(seed % 4));
         OperatorBasis basis = new(d, true);
         var flight = RandomWorld.Of(seed, 1, d, true).Parties[0].Flight;
-        SiteNoise noise = new()
-        {
-            Dynamics = flight.Dynamics,
-            Time = flight.Time,
-            LeakageProbability = flight.LeakageProbability,
-            Rotation = flight.Rotation,
-            PhaseFactors = flight.PhaseFactors,
-            Dephasing = flight.Dephasing,
-            Depolarising = flight.Depolarising,
-            Kraus = flight.Kraus,
-            Transmission = flight.Transmission,
-        };
+        SiteNoise noise = PartyNoise.FlightNoise(flight) with { Dynamics = flight.Dynamics, Time = flight.Time, Transmission = flight.Transmission };
         return (basis, LocalNoise.Map(basis, noise));
     }
 

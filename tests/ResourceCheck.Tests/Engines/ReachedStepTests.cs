@@ -11,6 +11,21 @@ namespace ResourceCheck.Tests.Engines;
 /// <summary>Steps that only some branches reach: they act when and where the script puts them. Expected values are worked by hand in each test.</summary>
 public sealed class ReachedStepTests
 {
+    private const string Rare = """
+        protocol "p"
+        parties A, B, C
+        resource antisymmetric on all
+        round "r"
+          A, B measure level as k
+          A, B announce k
+          when A.k = B.k
+            checkpoint "rare": fidelity with antisymmetric on C
+          end
+        end
+        success when A.k != B.k
+        goal "rare" >= 0.3
+        """;
+
     /// <summary>
     /// In half of the copies Eve measures A's qudit on its way in the Fourier basis. A's level is then uniform and independent of the
     /// others', so it is the missing one with probability 1/3: success 1/2 + 1/2 · 1/3 = 2/3. Her outcome is 0 in 1/2 · 1/3 of all copies.
@@ -37,6 +52,78 @@ public sealed class ReachedStepTests
         Assert.Equal(2.0 / 3, e.Success.Value, 1e-12);
         Assert.Equal(1.0 / 6, e.Reports[0].Value, 1e-12);
         Assert.Equal(1.0 / 3, e.Reports[1].Value, 1e-12);
+    }
+
+    /// <summary>
+    /// Eve measures C's qudit in one of two bases at random. In the level basis she changes nothing and learns C's level; in the Fourier basis
+    /// C's level is uniform afterwards, whatever she found: success 1/2 + 1/2 · 1/3 = 2/3, her guess of C's level as good, each outcome 1/3.
+    /// </summary>
+    [Fact]
+    public void An_interception_in_either_branch_acts_in_flight()
+    {
+        Evaluation e = Evaluate("""
+            protocol "p"
+            parties A, B, C
+            outsider Eve
+            resource antisymmetric on all
+            round "r"
+              Eve picks b from level, fourier
+              when Eve.b = level
+                Eve intercepts C in level as g
+              otherwise
+                Eve intercepts C in fourier as g
+              end
+              A, B, C measure level as v
+            end
+            success when distinct(v of A, B, C)
+            report "finds 0" = probability(Eve.g = 0)
+            report "guess" = guess(C.v from Eve.b, Eve.g)
+            """);
+        Assert.Equal(2.0 / 3, e.Success.Value, 1e-12);
+        Assert.Equal(1.0 / 3, e.Reports[0].Value, 1e-12);
+        Assert.Equal(2.0 / 3, e.Reports[1].Value, 1e-12);
+    }
+
+    /// <summary>
+    /// A Bell value is of the last checkpoint, wherever its report stands. A and B hold a singlet: 2√2. A clock of B's (for two levels σz) that
+    /// acts or not at random takes the coherence away, and what is left, correlated in one basis only, reaches 2.
+    /// </summary>
+    [Fact]
+    public void A_Bell_value_is_of_the_last_look_in_the_order_of_the_script()
+    {
+        const string head = """
+            protocol "p"
+            parties A, B
+            resource antisymmetric on all
+            report "above" = bellvalue(A, B)
+            checkpoint "first": fidelity with antisymmetric on A, B
+
+            """;
+        Evaluation once = Evaluate(head + "success when true");
+        Assert.Equal(2 * Math.Sqrt(2), once.Reports[0].Value, 1e-9);
+        Evaluation twice = Evaluate(head + """
+            round "blur"
+              B picks c from 0, 1
+              B applies clock(c)
+            end
+            checkpoint "second": fidelity with antisymmetric on A, B
+            report "below" = bellvalue(A, B)
+            success when true
+            """);
+        Assert.Equal(2, twice.Reports[0].Value, 1e-9);
+        Assert.Equal(2, twice.Reports[1].Value, 1e-9);
+    }
+
+    /// <summary>Ideally A and B never agree; the row of the look stays, and says that it is never reached.</summary>
+    [Fact]
+    public void A_look_that_is_never_reached_has_a_row_without_a_figure()
+    {
+        RunResult run = Run(Rare);
+        CheckpointResult rare = Assert.Single(run.Checkpoints, c => c.Name == "rare");
+        Assert.Equal(double.NaN, rare.Fidelity.Value);
+        Assert.Null(rare.Ideal);
+        Assert.Equal(Verdict.NotMet, run.Verdict);
+        Assert.Contains("never reached", run.VerdictText, StringComparison.Ordinal);
     }
 
     /// <summary>A gives up on outcome 0, one copy in three, and measures nothing afterwards: its later value is none there.</summary>
@@ -67,20 +154,7 @@ public sealed class ReachedStepTests
     [Fact]
     public void A_look_that_ideal_conditions_never_reach_has_no_ideal_figure()
     {
-        RunResult run = Run("""
-            protocol "p"
-            parties A, B, C
-            resource antisymmetric on all
-            round "r"
-              A, B measure level as k
-              A, B announce k
-              when A.k = B.k
-                checkpoint "rare": fidelity with antisymmetric on C
-              end
-            end
-            success when A.k != B.k
-            goal "rare" >= 0.3
-            """, ("flight.depolarising", "0.1"));
+        RunResult run = Run(Rare, ("flight.depolarising", "0.1"));
         CheckpointResult rare = Assert.Single(run.Checkpoints, c => c.Name == "rare");
         Assert.Equal((1 - (0.9 * 0.9)) / 3, rare.Kept, 1e-12);
         Assert.Null(rare.Ideal);

@@ -65,6 +65,19 @@ public sealed class StoredProtocolTests
         Assert.Equal("P022", Assert.Single(Run(new RunRequest { Script = new InputText("p.protocol", Distinct, ""), Conditions = rough }).Warnings).Code);
     }
 
+    /// <summary>Shifts grow as the inverse cube of the spacing: what would take hours is refused before it begins, wherever it is asked for.</summary>
+    [Fact]
+    public void Emitters_so_near_that_their_shifts_take_hours_are_refused_with_the_figure()
+    {
+        InputText near = new("near.json", Chain.Replace("0.05 wavelengths", "0.00002 wavelengths", StringComparison.Ordinal).Replace("2 ns", "2 us", StringComparison.Ordinal), "");
+        Assert.Equal("E018", Assert.Single(Judge.Storage(new StorageRequest(near, [], 3, null, 3)).Findings).Code);
+        Outcome<RunResult> run = Judge.Run(new RunRequest { Script = new InputText("p.protocol", Distinct, ""), Conditions = near });
+        Diagnostic told = Assert.Single(run.Findings);
+        Assert.Equal("E018", told.Code);
+        Assert.Contains("`storage` would take about", told.Message, StringComparison.Ordinal);
+        Assert.NotEmpty(Storage(near with { Text = near.Text.Replace("2 us", "1e-4 ps", StringComparison.Ordinal) }, emitters: 3).Points);
+    }
+
     private static InputText File(string name)
     {
         string path = Path.Combine(Golden.Root, "protocols", name);

@@ -21,7 +21,7 @@ public sealed class ReferenceRunTests
         string root = Path.GetFullPath(Path.Combine(TableRow.Folder(), "..", ".."));
         Outcome<RunResult> outcome = Judge.Run(new RunRequest
         {
-            Script = Read(Path.Combine(root, name + ".protocol")),
+            Script = Read(Path.Combine(root, ScriptOf(name) + ".protocol")),
             Conditions = Read(Path.Combine(root, name + ".conditions.json")),
         });
         Assert.True(outcome.Succeeded, string.Join("\n\n", outcome.Findings));
@@ -29,6 +29,9 @@ public sealed class ReferenceRunTests
             .Where(p => !(Math.Abs(p.Value - p.Row.Value) <= (Label(p.Row) == "Bell value" ? 1e-8 : Tolerance))).Select(p => $"{p.Row} {Label(p.Row)}: {p.Value:R} for {p.Row.Value:R}")];
         Assert.True(off.Count == 0, string.Join('\n', off));
     }
+
+    /// <summary>Conditions that have no script of their own name it.</summary>
+    private static string ScriptOf(string name) => TableRow.Of("runs").First(r => r.Name == name).Parameters.GetValueOrDefault("script") ?? name;
 
     private static InputText Read(string path) => new(path, File.ReadAllText(path), "");
 

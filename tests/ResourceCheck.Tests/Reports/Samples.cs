@@ -273,7 +273,8 @@ internal static class Samples
             new("fidelity after local unitaries", 0.96789, 0.9671, TruthLabel.Bound),
             new("purity", 0.91, 0.912, TruthLabel.Exact),
         ],
-        Populations = [new("0-1-2", 0.1634), new("2-1-0", 0.16)],
+        IsStateAsRead = false,
+        Populations = [new("0-1-2", 0.1634, 0.164), new("2-1-0", 0.16, 0.1602)],
         MendedBy = 0.0042,
     };
 }

@@ -1,4 +1,5 @@
 using System.Numerics;
+using ResourceCheck.Conditions;
 using ResourceCheck.Engines.Lists;
 using ResourceCheck.Numerics;
 using ResourceCheck.Numerics.Collective;
@@ -29,9 +30,10 @@ public static class DenseEngine
         double numbers = Math.Pow(site, plan.Protocol.Levels);
         int looks = plan.Steps.Count(s => s is CheckpointPlanStep);
         double memory = BytesPerNumber * numbers * StatesHeld;
-        if (plan.World.Storage is not null)
+        if (plan.World.Storage is not null || plan.World.Resource.Preparation is RelaxedPreparation)
             memory += MasterEquation.Bytes(plan.Protocol.Levels, plan.Protocol.Levels);
-        return new EngineChoice("dense", reason, memory, numbers * ((looks * site) + (2 * plan.Protocol.Levels)));
+        double work = (numbers * ((looks * site) + (2 * plan.Protocol.Levels))) + EvolutionCost.OfStorage(plan.World) + EvolutionCost.OfPreparation(plan.World);
+        return new EngineChoice("dense", reason, memory, work);
     }
 
     /// <summary>Evaluates a plan for one assignment of the private inputs.</summary>

@@ -11,16 +11,16 @@ internal sealed class History(Protocol protocol, bool withFidelity)
     /// <summary>Content of slots that no step has filled yet; equal to none, but not told as an outcome.</summary>
     public static Value NotYet { get; } = new NoneValue();
 
-    private readonly Dictionary<string, (double Weight, double Overlap, Value[] Slots)> _sums = [];
+    private readonly Dictionary<string, Sum> _sums = [];
     private readonly int[] _told = [.. Enumerable.Range(0, protocol.Slots.Count).Where(s => protocol.Slots[s].Kind is SlotKind.Outcome or SlotKind.Pick or SlotKind.Input)];
 
     public void Add(Value[] slots, double weight, double overlap)
     {
         string key = string.Join('|', _told.Select(s => slots[s]));
-        if (_sums.TryGetValue(key, out (double Weight, double Overlap, Value[] Slots) sum))
-            _sums[key] = (sum.Weight + weight, sum.Overlap + overlap, sum.Slots);
+        if (_sums.TryGetValue(key, out Sum? sum))
+            sum.Add(weight, overlap);
         else if (_sums.Count < MostHistories)
-            _sums[key] = (weight, overlap, slots);
+            _sums[key] = new Sum(slots, weight, overlap);
     }
 
     public IEnumerable<BranchEvaluation> MostProbable(double whole, int count) =>
@@ -32,4 +32,19 @@ internal sealed class History(Protocol protocol, bool withFidelity)
     private KeyValuePair<string, string>[] Outcomes(Value[] slots) =>
         [.. _told.Where(s => !ReferenceEquals(slots[s], NotYet))
             .Select(s => new KeyValuePair<string, string>($"{protocol.Parties[protocol.Slots[s].Party]}.{protocol.Slots[s].Name}", slots[s].ToString()!))];
+
+    private sealed class Sum(Value[] slots, double weight, double overlap)
+    {
+        public Value[] Slots => slots;
+
+        public double Weight { get; private set; } = weight;
+
+        public double Overlap { get; private set; } = overlap;
+
+        public void Add(double more, double overlapping)
+        {
+            Weight += more;
+            Overlap += overlapping;
+        }
+    }
 }

@@ -1,5 +1,5 @@
+using MathNet.Numerics.LinearAlgebra;
 using MathNet.Numerics.Optimization;
-using MathVector = MathNet.Numerics.LinearAlgebra.Vector<double>;
 
 namespace ResourceCheck.Engines.Figures;
 
@@ -55,32 +55,11 @@ internal static class ChshOptimum
         return Estimate.AtLeast(best);
     }
 
-    /// <summary>Sum of the two larger squared singular values: trace of TᵀT less its smallest eigenvalue, by the trigonometric formula for 3×3.</summary>
+    /// <summary>t1² + t2² of the two larger singular values. Eigenvalues of TᵀT would lose half the digits where two of them coincide.</summary>
     private static double TwoLargestSquares(double[,] t)
     {
-        double[,] g = new double[3, 3];
-        for (int i = 0; i < 3; i++)
-        {
-            for (int j = 0; j < 3; j++)
-                g[i, j] = (t[0, i] * t[0, j]) + (t[1, i] * t[1, j]) + (t[2, i] * t[2, j]);
-        }
-
-        double trace = g[0, 0] + g[1, 1] + g[2, 2];
-        return trace - SmallestEigenvalue(g, trace / 3);
-    }
-
-    /// <summary>Smallest eigenvalue of a symmetric 3×3 matrix with mean diagonal q (O. K. Smith, Commun. ACM 4, 168 (1961)).</summary>
-    private static double SmallestEigenvalue(double[,] g, double q)
-    {
-        double off = (g[0, 1] * g[0, 1]) + (g[0, 2] * g[0, 2]) + (g[1, 2] * g[1, 2]);
-        double[] e = [g[0, 0] - q, g[1, 1] - q, g[2, 2] - q];
-        double p = Math.Sqrt(((e[0] * e[0]) + (e[1] * e[1]) + (e[2] * e[2]) + (2 * off)) / 6);
-        if (p == 0)
-            return q;
-        double det = (e[0] * ((e[1] * e[2]) - (g[1, 2] * g[1, 2]))) - (g[0, 1] * ((g[0, 1] * e[2]) - (g[1, 2] * g[0, 2])))
-            + (g[0, 2] * ((g[0, 1] * g[1, 2]) - (e[1] * g[0, 2])));
-        double phi = Math.Acos(Math.Clamp(det / (2 * p * p * p), -1, 1)) / 3;
-        return q + (2 * p * Math.Cos(phi + (2 * Math.PI / 3)));
+        Vector<double> values = Matrix<double>.Build.DenseOfArray(t).Svd(computeVectors: false).S;
+        return (values[0] * values[0]) + (values[1] * values[1]);
     }
 
     private static double Search(double[,] t, double[] a, double[] b) =>
@@ -107,11 +86,11 @@ internal static class ChshOptimum
     /// <summary>Nelder–Mead over the four angles of one party's settings, the other party's being closed forms.</summary>
     private static double Polish(double[,] t, double[] a, double[] b, double value, double[] m, double[] m2)
     {
-        MathVector angles = MathVector.Build.Dense([.. Angles(m), .. Angles(m2)]);
+        Vector<double> angles = Vector<double>.Build.Dense([.. Angles(m), .. Angles(m2)]);
         IObjectiveFunction less = ObjectiveFunction.Value(x => -Value(t, a, b, Unit(x[0], x[1]), Unit(x[2], x[3])));
         for (int i = 0; i < Polishes; i++)
         {
-            MathVector steps = MathVector.Build.Dense(4, Math.Pow(10, -1 - i));
+            Vector<double> steps = Vector<double>.Build.Dense(4, Math.Pow(10, -1 - i));
             MinimizationResult found = Minimise(less, angles, steps);
             angles = found.MinimizingPoint;
             value = Math.Max(value, -found.FunctionInfoAtMinimum.Value);
@@ -121,7 +100,7 @@ internal static class ChshOptimum
     }
 
     /// <summary>An exhausted search is no failure: what it has found is attained all the same.</summary>
-    private static MinimizationResult Minimise(IObjectiveFunction less, MathVector start, MathVector steps)
+    private static MinimizationResult Minimise(IObjectiveFunction less, Vector<double> start, Vector<double> steps)
     {
         try
         {

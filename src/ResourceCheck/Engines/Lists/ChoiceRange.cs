@@ -45,7 +45,7 @@ internal sealed class ChoiceRange
 
     private Rational? Bound(BoundExpression expression, IReadOnlyList<Value> choices)
     {
-        bool known = Reads.Parts(expression).All(p => p is not (BoundSlot or BoundSize or BoundTally or BoundWhere or BoundSome) && (p is not BoundChoice choice || choice.Choice < choices.Count));
+        bool known = BoundWalk.Within(expression).All(p => p is not (BoundSlot or BoundSize or BoundTally or BoundWhere or BoundSome) && (p is not BoundChoice choice || choice.Choice < choices.Count));
         return known && ValueEvaluator.Evaluate(BoundWalk.Put(expression, choices), [], _levels) is NumberValue number ? number.Number : null;
     }
 

@@ -7,8 +7,13 @@ namespace ResourceCheck.Numerics.Collective;
 /// <summary>Loops over complex amplitudes seen as twice as many reals.</summary>
 internal static class AmplitudeLoops
 {
+    /// <summary>Longer sums are halved first: added one after the other, the equal squares of 9! amplitudes lose four digits.</summary>
+    private const int Block = 128;
+
     public static double NormSquared(ReadOnlySpan<Complex> state)
     {
+        if (state.Length > Block)
+            return NormSquared(state[..(state.Length / 2)]) + NormSquared(state[(state.Length / 2)..]);
         ReadOnlySpan<double> parts = MemoryMarshal.Cast<Complex, double>(state);
         return Vectors.Dot(parts, parts);
     }
@@ -55,6 +60,9 @@ internal static class AmplitudeLoops
     /// <summary>Σ conj(a_i) b_i.</summary>
     public static Complex Overlap(ReadOnlySpan<Complex> a, ReadOnlySpan<Complex> b)
     {
+        int half = a.Length / 2;
+        if (a.Length > Block)
+            return Overlap(a[..half], b[..half]) + Overlap(a[half..], b[half..]);
         Complex sum = Complex.Zero;
         for (int i = 0; i < a.Length; i++)
             sum += Complex.Conjugate(a[i]) * b[i];

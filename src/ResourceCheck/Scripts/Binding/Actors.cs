@@ -33,7 +33,7 @@ internal sealed class Actors(BindContext context, PartyResolver parties, WhenBin
     /// <summary>Whether a party holds its qudit; reports when it does not.</summary>
     public bool HoldsQudit(PartyMention mention, string verb)
     {
-        if (!context.Now.Qudits.TryGetValue(mention.Party, out QuditState qudit))
+        if (context.Now.Qudit(mention.Party) is not { } qudit)
         {
             if (context.Parties.HasResource)
                 context.Findings.Report(mention.Span, BindingMessages.HoldsNoQudit(context.NameOf(mention.Party), verb));

@@ -6,7 +6,7 @@ namespace ResourceCheck.Scripts.Binding;
 /// <param name="Code">Stable code.</param>
 /// <param name="Text">One sentence.</param>
 /// <param name="Cure">What to do; null when the sentence says it.</param>
-internal readonly record struct Message(string Code, string Text, string? Cure = null);
+internal sealed record Message(string Code, string Text, string? Cure = null);
 
 /// <summary>Gathers the findings of a script, each once although loops and actors repeat a line, and keeps names whose making failed.</summary>
 /// <param name="source">The script's text.</param>

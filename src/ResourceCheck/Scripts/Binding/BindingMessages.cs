@@ -1,4 +1,5 @@
-using static ResourceCheck.Scripts.Binding.Words;
+using static ResourceCheck.Diagnostics.Words;
+using static ResourceCheck.Scripts.Binding.Written;
 
 namespace ResourceCheck.Scripts.Binding;
 
@@ -13,20 +14,20 @@ internal static class BindingMessages
 
     public static Message NeverMade(string name, string? near, string? owner, IReadOnlyList<string> held) =>
         new("S030", $"Nothing in this script is called {name}: {(owner is null ? "a parameter, or a value that somebody makes or receives above," : $"a value that {owner} makes or receives")} fits here.",
-            DidYouMean(near is null || owner is null ? near : $"{owner}.{near}") ?? (held.Count == 0 ? null : $"{owner} holds {List(held)} here"));
+            DidYouMean(near is null || owner is null ? near : $"{owner}.{near}") ?? (held.Count == 0 ? null : $"{owner} holds {Who(held)} here"));
 
     public static Message HeldByOthers(string owner, string name, IReadOnlyList<string> others) =>
-        new("S030", $"{owner} holds no {name} here; {List(others)} {Verb(others.Count, "does", "do")}.", $"write {List(others.Select(o => $"{o}.{name}"), "or")}");
+        new("S030", $"{owner} holds no {name} here; {Who(others)} {Verb(others.Count, "does", "do")}.", $"write {Or(others.Select(o => $"{o}.{name}"))}");
 
     public static Message NotKnown(Miss miss, IReadOnlyList<string> actors, string place, BindContext context)
     {
         string[] knowers = [.. miss.Knowers.Select(context.NameOf)];
         string[] makers = [.. miss.Makers.Select(m => context.NameOf(m.Party))];
-        string lines = List(miss.Makers.Select(m => $"{context.NameOf(m.Party)} {Origin(m.Value, context)} {miss.Name} on line {context.LineOf(m.Value.Span)}"));
+        string lines = Who(miss.Makers.Select(m => $"{context.NameOf(m.Party)} {Origin(m.Value, context)} {miss.Name} on line {context.LineOf(m.Value.Span)}"));
         string whom = actors.Count == 1 ? actors[0] : "them";
-        string only = knowers.Length == 0 ? "nobody knows" : $"only {List(knowers)} {Verb(knowers.Length, "knows", "know")}";
-        return new("S031", $"{List(actors)} {Verb(actors.Count, "acts", "act")} {place} {miss.Label}, which {only} here.",
-            $"let {List(makers, "or")} announce {miss.Name}, or send it to {whom}, before this line; {lines}.");
+        string only = knowers.Length == 0 ? "nobody knows" : $"only {Who(knowers)} {Verb(knowers.Length, "knows", "know")}";
+        return new("S031", $"{Who(actors)} {Verb(actors.Count, "acts", "act")} {place} {miss.Label}, which {only} here.",
+            $"let {Or(makers)} announce {miss.Name}, or send it to {whom}, before this line; {lines}.");
     }
 
     public static Message MadeLater(string name, int line) =>
@@ -36,11 +37,11 @@ internal static class BindingMessages
         new("S032", $"{name} has no value here: line {line} makes it in another branch, for another party, or for nobody at these parameter values.", $"check who acts on line {line}, and when");
 
     public static Message SeveralMeanings(string reader, string name, IReadOnlyList<string> parties) =>
-        new("S033", $"{name} alone has several meanings for {reader}: {List(parties)} {Verb(parties.Count, "has sent one more than once", "each have one")}.",
-            $"write {List(parties.Select(p => $"{p}.{name}"), "or")}");
+        new("S033", $"{name} alone has several meanings for {reader}: {Who(parties)} {Verb(parties.Count, "has sent one more than once", "each have one")}.",
+            $"write {Or(parties.Select(p => $"{p}.{name}"))}");
 
     public static Message ReadDifferently(IReadOnlyList<string> actors) =>
-        new("S033", $"{List(actors)} act in this block, but its condition means a different value for each of them.", "name one party's value, as in Dov.k, that all of them know");
+        new("S033", $"{Who(actors)} act in this block, but its condition means a different value for each of them.", "name one party's value, as in Dov.k, that all of them know");
 
     public static Message MadeTwice(string party, string name, int line) =>
         new("S034", $"{party} already has {name} from line {line}: one name has one meaning.", "give the second value a name of its own");
@@ -58,7 +59,7 @@ internal static class BindingMessages
         new("S035", $"{name} is {role} already: one name has one meaning.", "choose another name");
 
     public static Message NotPublic(string label, IReadOnlyList<string> without) =>
-        new("S036", $"A copy is kept by what everybody knows, but {List(without)} {Verb(without.Count, "does", "do")} not know {label} here.", $"let it be announced before this line");
+        new("S036", $"A copy is kept by what everybody knows, but {Who(without)} {Verb(without.Count, "does", "do")} not know {label} here.", $"let it be announced before this line");
 
     public static Message OfAnEndedTurn(string name, int line, int loop) =>
         new("S037", $"{name} belongs to a turn of the loop on line {loop}, made on line {line}: it can be used inside that turn only.", "use it inside the loop, or make the value outside of it");
@@ -130,7 +131,7 @@ internal static class BindingMessages
         new("S052", $"{where} {value} does not exist with {levels} levels: whole numbers from {least} to {most} fit.", null);
 
     public static Message UnknownFunction(string name, string? near, IEnumerable<string> known) =>
-        new("S053", $"{name} is no function here: {List(known, "or")} would fit.", DidYouMean(near));
+        new("S053", $"{name} is no function here: {Or(known)} would fit.", DidYouMean(near));
 
     public static Message NoBasis(string name, string? near) =>
         new("S053", $"{name} is no basis: level, fourier, phased(j), matrix \"file\" or a value that holds a basis fit here.", DidYouMean(near));
@@ -147,9 +148,9 @@ internal static class BindingMessages
     public static Message FigureAmongValues(string name) =>
         new("S056", $"{name}(…) is a figure about all copies, but one copy's value is needed here.", $"use {name}(…) in a report or a claim");
 
-    public static Message NoFigure(string text) =>
+    public static Message NoFigure(string text, string? near = null) =>
         new("S056", $"`{text}` is no figure about all copies: a number, success, failure, abort, yield, a quoted label or a function such as probability(…) fits.",
-            $"write probability(…) around a condition, mean(…) around a number");
+            near is null ? "write probability(…) around a condition, mean(…) around a number" : $"did you mean {near}?");
 
     public static Message NoValueHere(string text) =>
         new("S056", $"`{text}` is no value of a single copy: numbers, names, bases and functions of them fit here.", null);
@@ -188,7 +189,7 @@ internal static class BindingMessages
         new("S061", $"{family}[{from}..{to}] is no family: numbers go upwards from 0 or more, to at most {most} members.", null);
 
     public static Message UnknownParameter(string name, string? near, IReadOnlyList<string> known) =>
-        new("S062", $"This script has no parameter {name}: {(known.Count == 0 ? "it has none" : $"it has {List(known)}")}.", DidYouMean(near));
+        new("S062", $"This script has no parameter {name}: {(known.Count == 0 ? "it has none" : $"it has {Who(known)}")}.", DidYouMean(near));
 
     public static Message NotConstant(string name, string? near, IReadOnlyList<string> known) =>
         new("S063", $"{name} cannot stand here, where only parameters and counters are known{(known.Count == 0 ? "" : $": {Some(known, "or")} would fit")}.", DidYouMean(near));
@@ -224,7 +225,7 @@ internal static class BindingMessages
         new("S067", $"The label \"{label}\" is taken: every run has that checkpoint.", "choose another label");
 
     public static Message UnknownInLabel(string name, IReadOnlyList<string> known) =>
-        new("S068", $"{{{name}}} in this label is no counter or parameter{(known.Count == 0 ? "" : $": {List(known.Select(k => $"{{{k}}}"), "or")} would fit")}.", "write a counter of the loop around, or leave the braces out");
+        new("S068", $"{{{name}}} in this label is no counter or parameter{(known.Count == 0 ? "" : $": {Or(known.Select(k => $"{{{k}}}"))} would fit")}.", "write a counter of the loop around, or leave the braces out");
 
     public static Message ClaimForm() =>
         new("S069", "A claim compares two figures with =, >= or <=.", "write it as in claim success = 1");
@@ -236,7 +237,7 @@ internal static class BindingMessages
         new("S070", $"This line is never reached: {because}.", "take it out, or change the condition");
 
     public static Message NotInCheckpoint(string party, IReadOnlyList<string> parties) =>
-        new("S071", $"{party} is not in the last checkpoint, whose state a Bell value is of: that has {List(parties)}.", "add a checkpoint with both parties");
+        new("S071", $"{party} is not in the last checkpoint, whose state a Bell value is of: that has {Who(parties)}.", "add a checkpoint with both parties");
 
     public static Message EmptyCheckpoint() =>
         new("S072", "This checkpoint has nobody in it at these parameter values.", "name at least one party that holds its qudit");
@@ -328,8 +329,10 @@ internal static class BindingMessages
     };
 
     // Long lists say less than their beginning.
+    private static string Who(IEnumerable<string> parties) => parties.Any() ? And(parties) : "nobody";
+
     private static string Some(IReadOnlyList<string> items, string last) =>
-        items.Count == 0 ? "nothing" : items.Count <= 8 ? List(items, last) : $"{string.Join(", ", items.Take(7))} and so on";
+        items.Count == 0 ? "nothing" : items.Count <= 8 ? last == "or" ? Or(items) : And(items) : $"{string.Join(", ", items.Take(7))} and so on";
 
     private static string Origin(Holding value, BindContext context) => context.Slots[value.Slots[0]].Kind switch
     {

@@ -16,7 +16,7 @@ internal static class BranchMerge
         Received = Union(first.Received, second.Received, (a, b) => Union(a, b)),
         Sent = Union(first.Sent, second.Sent, (a, b) => [.. a.Union(b)]),
         Origins = CommonOrigins(first, second, firstSlot, shared),
-        Qudits = first.Qudits.ToImmutableDictionary(q => q.Key, q => Join(q.Value, second.Qudits[q.Key])),
+        Qudits = [.. first.Qudits.Zip(second.Qudits, (a, b) => a is null || b is null ? null : Join(a, b))],
     };
 
     /// <summary>The state when it is known which branch is taken; names of the other exist and are none.</summary>
@@ -33,10 +33,10 @@ internal static class BranchMerge
         return union.ToImmutable();
     }
 
-    private static ImmutableSortedDictionary<int, Holding> Union(ImmutableSortedDictionary<int, Holding> first, ImmutableSortedDictionary<int, Holding> second)
+    private static ImmutableList<Receipt> Union(ImmutableList<Receipt> first, ImmutableList<Receipt> second)
     {
-        foreach ((int sender, Holding holding) in second)
-            first = first.SetItem(sender, first.TryGetValue(sender, out Holding? present) ? Join(present, holding) : holding);
+        foreach (Receipt receipt in second)
+            first = NameState.With(first, first.Find(r => r.Sender == receipt.Sender) is { } present ? receipt with { Value = Join(present.Value, receipt.Value) } : receipt);
         return first;
     }
 

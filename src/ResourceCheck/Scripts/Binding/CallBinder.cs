@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -30,7 +31,7 @@ internal sealed class CallBinder(ExpressionBinder values)
         if (FigureBinder.Names.Contains(name))
             return values.Refuse(call.Function.Span, BindingMessages.FigureAmongValues(name));
         if (!Functions.TryGetValue(name, out (ValueFunction Function, ValueKind Argument, ValueKind Result, string Shape) shape))
-            return values.Refuse(call.Function.Span, BindingMessages.UnknownFunction(name, Words.Near(name, Names.Concat(FigureBinder.Names)), Names));
+            return values.Refuse(call.Function.Span, BindingMessages.UnknownFunction(name, NearWords.Find(name, Names.Concat(FigureBinder.Names)), Names));
         if (!HasRightCount(call, shape.Function))
             return values.Refuse(call.Span, BindingMessages.WrongArguments(name, shape.Shape));
         Typed[] arguments = call.Over is { } over ? Over(call.Arguments[0], over, shape.Argument) : Expand(call.Arguments, shape.Argument);
@@ -80,7 +81,7 @@ internal sealed class CallBinder(ExpressionBinder values)
     {
         if (function is not (ValueFunction.Distinct or ValueFunction.Same))
             return true;
-        if (arguments.FirstOrDefault(a => a.Kind == ValueKind.Set).Kind == ValueKind.Set)
+        if (arguments.Any(a => a.Kind == ValueKind.Set))
         {
             values.Refuse(call.Span, BindingMessages.SetsCompared(call.Function.Text));
             return false;

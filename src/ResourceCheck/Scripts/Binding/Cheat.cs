@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -17,7 +18,7 @@ internal sealed class Cheat(BindContext context, DishonestStatement statement, I
     public IReadOnlyList<int> By => by;
 
     /// <summary>Names of the parties that cheat.</summary>
-    public string Names => Words.List(by.Select(context.NameOf));
+    public string Names => Words.And(by.Select(context.NameOf));
 
     /// <summary>Whether the lines at hand are the strategy's own, which only the parties that cheat may act in.</summary>
     public bool Speaks { get; set; }

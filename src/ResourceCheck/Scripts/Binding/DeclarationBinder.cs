@@ -22,7 +22,7 @@ internal sealed class DeclarationBinder(BindContext context)
             DeclareOutsider(outsider);
         ClashWithParameters();
         DeclareResource();
-        context.Now = context.Now with { Qudits = context.Now.Qudits.AddRange(context.Parties.Holders.Select(h => KeyValuePair.Create(h, default(QuditState)))) };
+        context.Now = context.Now with { Qudits = [.. Enumerable.Range(0, context.Parties.Names.Count).Select(p => context.Parties.Holders.Contains(p) ? new QuditState(QuditPhase.Fresh, default) : null)] };
         foreach (InputStatement input in Top<InputStatement>())
             DeclareInput(input);
     }
@@ -36,7 +36,7 @@ internal sealed class DeclarationBinder(BindContext context)
         if (_parties.Whole(statement.Count) is not { } copies)
             return 1;
         if (copies < 1)
-            context.Findings.Report(statement.Count.Span, BindingMessages.CopiesCount(Words.Number(copies)));
+            context.Findings.Report(statement.Count.Span, BindingMessages.CopiesCount(Written.Number(copies)));
         return Math.Max(1, copies);
     }
 
@@ -155,7 +155,7 @@ internal sealed class DeclarationBinder(BindContext context)
             context.Findings.Report(input.Name.Span, BindingMessages.NameTaken(input.Name.Text, context.RoleOf(input.Name.Text)));
         foreach (PartyMention owner in _parties.Classical(new PartyList(input.Owner.Span, [input.Owner])))
         {
-            if (context.Now.Own.TryGetValue((owner.Party, input.Name.Text), out Holding? present))
+            if (context.Now.Own.TryGetValue(new(owner.Party, input.Name.Text), out Holding? present))
                 context.Findings.Report(input.Name.Span, BindingMessages.MadeTwice(context.NameOf(owner.Party), input.Name.Text, context.LineOf(present.Span)));
             int slot = context.AddSlot(input.Name.Text, owner.Party, SlotKind.Input, input.Name.Span);
             context.Now = context.Now.WithOwn(owner.Party, input.Name.Text, new Holding([slot], kind, input.Name.Span));
@@ -182,7 +182,7 @@ internal sealed class DeclarationBinder(BindContext context)
     };
 
     private string Figure(Expression expression) =>
-        new ExpressionBinder(context, new ConstantView(context)).Bind(expression).Constant is { } value ? Words.Write(value) : context.TextOf(expression.Span);
+        new ExpressionBinder(context, new ConstantView(context)).Bind(expression).Constant is { } value ? Written.Write(value) : context.TextOf(expression.Span);
 
     private static string Sign(BinaryOperator op) => op switch
     {

@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -71,7 +72,7 @@ internal sealed class DishonestBinder(BindContext context, NameState start)
             string title = lines.Block.Text;
             string[] known = [.. context.Blocks.SelectMany(b => new[] { b.Title, b.Written }).Distinct()];
             if (!known.Contains(title))
-                context.Findings.Report(lines.Block.Span, BindingMessages.UnknownBlock(title, Words.Near(title, known), [.. context.Blocks.Select(b => b.Title).Distinct()]));
+                context.Findings.Report(lines.Block.Span, BindingMessages.UnknownBlock(title, NearWords.Find(title, known), [.. context.Blocks.Select(b => b.Title).Distinct()]));
             else if (!replaced.Add((title, lines.Before)))
                 context.Findings.Report(lines.Block.Span, BindingMessages.ReplacedTwice(title));
         }

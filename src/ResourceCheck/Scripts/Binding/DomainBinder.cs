@@ -63,7 +63,7 @@ internal sealed class DomainBinder(BindContext context)
             if (typed.Constant is not { } value)
                 return null;
             if (values.Contains(value))
-                context.Findings.Report(expression.Span, BindingMessages.ValueTwice(Words.Write(value)));
+                context.Findings.Report(expression.Span, BindingMessages.ValueTwice(Written.Write(value)));
             else if (values.Count > 0 && !ValueKinds.Together(ValueKinds.Of(values[0]), typed.Kind))
                 context.Findings.Report(expression.Span, BindingMessages.NeverEqual(ValueKinds.Of(values[0]), typed.Kind));
             values.Add(value);

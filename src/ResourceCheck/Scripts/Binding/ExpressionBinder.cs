@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Syntax;
 
@@ -37,7 +38,7 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
     public Typed Expect(Expression expression, ValueKind wanted)
     {
         if (wanted == ValueKind.Basis && expression is NameExpression name && IsNameless(name.Text))
-            return Report(expression.Span, name.Text, BindingMessages.NoBasis(name.Text, Words.Near(name.Text, ["level", "fourier", "phased", "matrix"])));
+            return Report(expression.Span, name.Text, BindingMessages.NoBasis(name.Text, NearWords.Find(name.Text, ["level", "fourier", "phased", "matrix"])));
         return Fitting(expression, Bind(expression), wanted);
     }
 
@@ -200,6 +201,6 @@ internal sealed class ExpressionBinder(BindContext context, NameView view)
         if (typed.Constant is not NumberValue number || !context.Parties.HasResource)
             return typed;
         bool inside = number.Number.IsWhole && number.Number >= least && number.Number <= most;
-        return inside ? typed : Refuse(expression.Span, BindingMessages.OutsideLevels(where, Words.Number(number.Number), least, most, context.Levels));
+        return inside ? typed : Refuse(expression.Span, BindingMessages.OutsideLevels(where, Written.Number(number.Number), least, most, context.Levels));
     }
 }

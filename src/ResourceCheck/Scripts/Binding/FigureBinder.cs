@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -73,7 +74,7 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
         if (MetricOf(e) is { } metric)
             return new MetricFigure(e.Span, new MetricName(metric, ""));
         if (!context.Findings.IsSuspect(e.Text))
-            context.Findings.Report(e.Span, BindingMessages.NoFigure(e.Text));
+            context.Findings.Report(e.Span, BindingMessages.NoFigure(e.Text, NearWords.Find(e.Text, MetricWords)));
         return null;
     }
 
@@ -89,7 +90,7 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
         if (CallBinder.Names.Contains(name))
             return Refuse(e.Span, BindingMessages.NoFigure(context.TextOf(e.Span)));
         if (!Shapes.TryGetValue(name, out string? shape))
-            return Refuse(e.Function.Span, BindingMessages.UnknownFunction(name, Words.Near(name, Names.Concat(CallBinder.Names)), Names));
+            return Refuse(e.Function.Span, BindingMessages.UnknownFunction(name, NearWords.Find(name, Names.Concat(CallBinder.Names)), Names));
         return HasShape(e) ? Build(e) : Refuse(e.Span, BindingMessages.WrongArguments(name, shape));
     }
 
@@ -131,7 +132,7 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
     private Figure? Given(CallExpression e, ValueKind wanted, Func<BoundExpression, BoundExpression?, Figure> build)
     {
         Typed value = _values.Expect(e.Arguments[0], wanted);
-        Typed given = e.Second.Count == 0 ? default : _values.Expect(e.Second[0], ValueKind.Truth);
+        Typed given = e.Second.Count == 0 ? Typed.Broken : _values.Expect(e.Second[0], ValueKind.Truth);
         return value.Bound is null || (e.Second.Count > 0 && given.Bound is null) ? null : build(value.Bound, given.Bound);
     }
 
@@ -171,7 +172,7 @@ internal sealed class FigureBinder(BindContext context, LabelBinder labels, Refe
         string[] cases = [.. context.Tree.Statements.OfType<DishonestStatement>().Select(d => d.Title.Text)];
         if (cases.Contains(label))
             return new MetricName(MetricKind.Harm, label);
-        context.Findings.Report(e.Span, BindingMessages.UnknownCase(label, Words.Near(label, cases), cases));
+        context.Findings.Report(e.Span, BindingMessages.UnknownCase(label, NearWords.Find(label, cases), cases));
         return null;
     }
 

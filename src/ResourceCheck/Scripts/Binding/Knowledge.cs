@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Judgement;
 using ResourceCheck.Scripts.Syntax;
 
@@ -18,9 +20,9 @@ internal static class Knowledge
                 groups.Add((step.Span, [step]));
         }
 
-        IEnumerable<KnowledgeLine> inputs = protocol.Inputs.Select(i => Line(protocol, protocol.Slots[i.Slot].Span, $"{protocol.Parties[i.Party]} knows {i.Name}"));
-        IEnumerable<KnowledgeLine> steps = groups.Select(g => (g.Span, Text: Learned(protocol, g.Steps))).Where(g => g.Text.Length > 0)
-            .Select(g => Line(protocol, g.Span, g.Text));
+        IEnumerable<KnowledgeLine> inputs = protocol.Inputs.Select(i => Line(protocol, protocol.Slots[i.Slot].Span, ImmutableDictionary<string, int>.Empty, $"{protocol.Parties[i.Party]} knows {i.Name}"));
+        IEnumerable<KnowledgeLine> steps = groups.Select(g => (g.Span, g.Steps[0].Counters, Text: Learned(protocol, g.Steps))).Where(g => g.Text.Length > 0)
+            .Select(g => Line(protocol, g.Span, g.Counters, g.Text));
         return [.. inputs, .. steps];
     }
 
@@ -54,7 +56,7 @@ internal static class Knowledge
     private static string Sent(Protocol protocol, SendStep[] sent)
     {
         IReadOnlyList<int> recipients = sent[0].Recipients;
-        string values = Words.List(sent.Select(s => $"{protocol.Parties[s.Party]}.{protocol.Slots[s.Slot].Name}"));
+        string values = Words.And(sent.Select(s => $"{protocol.Parties[s.Party]}.{protocol.Slots[s.Slot].Name}"));
         return $"{string.Join(", ", recipients.Select(r => protocol.Parties[r]))} {Words.Verb(recipients.Count, "learns", "learn")} {values}";
     }
 
@@ -67,13 +69,13 @@ internal static class Knowledge
         _ => -1,
     };
 
-    private static KnowledgeLine Line(Protocol protocol, Span span, string learned)
+    private static KnowledgeLine Line(Protocol protocol, Span span, IReadOnlyDictionary<string, int> counters, string learned)
     {
         string line = protocol.Source.PlaceOf(span).LineText ?? "";
         bool quoted = false;
         int end = 0;
         while (end < line.Length && (quoted || line[end] != '#'))
             quoted ^= line[end++] == '"';
-        return new KnowledgeLine(protocol.Source.LineOf(span.Start), line[..end].Trim(), learned);
+        return new KnowledgeLine(protocol.Source.LineOf(span.Start), TurnText.Of(line[..end].Trim(), counters), learned);
     }
 }

@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text;
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Syntax;
 
@@ -58,7 +59,7 @@ internal sealed class LabelBinder(BindContext context)
         if (!_labels.TryGetValue(label, out (MetricKind Kind, Span Span, int Order) found))
         {
             if (!context.Findings.IsSuspect(label))
-                context.Findings.Report(quoted.Span, BindingMessages.UnknownLabel(label, Words.Near(label, _labels.Keys.Concat(BuiltIn)), _labels.Keys));
+                context.Findings.Report(quoted.Span, BindingMessages.UnknownLabel(label, NearWords.Find(label, _labels.Keys.Concat(BuiltIn)), _labels.Keys));
             return null;
         }
 
@@ -73,7 +74,7 @@ internal sealed class LabelBinder(BindContext context)
         if (context.Counters.TryGetValue(name, out int counter))
             return counter.ToString(CultureInfo.InvariantCulture);
         if (context.Parameters.TryGetValue(name, out Rational parameter))
-            return Words.Number(parameter);
+            return Written.Number(parameter);
         context.Findings.Report(span, BindingMessages.UnknownInLabel(name, [.. context.Counters.Keys.Concat(context.Parameters.Keys).Order()]));
         return $"{{{name}}}";
     }

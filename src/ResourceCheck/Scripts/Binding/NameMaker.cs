@@ -32,9 +32,9 @@ internal sealed class NameMaker(BindContext context)
     public int Make(int party, Name name, SlotKind kind, ValueKind value)
     {
         CheckFree(name);
-        if (context.Now.Own.TryGetValue((party, name.Text), out Holding? present))
+        if (context.Now.Own.TryGetValue(new(party, name.Text), out Holding? present))
             context.Findings.Report(name.Span, BindingMessages.MadeTwice(context.NameOf(party), name.Text, context.LineOf(present.Span)));
-        else if (context.Now.Sent.TryGetValue((party, name.Text), out var sent))
+        else if (context.Now.Sent.TryGetValue(new(party, name.Text), out var sent))
             context.Findings.Report(name.Span, BindingMessages.MadeTwice(context.NameOf(party), name.Text, context.LineOf(sent[0].Span)));
         int slot = SiblingSlot(party, name, value) ?? context.AddSlot(name.Text, party, kind, name.Span);
         context.Now = context.Now.WithOwn(party, name.Text, new Holding([slot], value, name.Span));
@@ -71,17 +71,16 @@ internal sealed class NameMaker(BindContext context)
 
     private void Receive(int recipient, int sender, Name name, Holding holding)
     {
-        bool known = context.Now.Received.TryGetValue((recipient, name.Text), out var from) && from.ContainsKey(sender);
-        if (!known)
+        if (context.Now.ReceivedFrom(recipient, sender, name.Text) is not { } known)
             context.Now = context.Now.WithReceived(recipient, sender, name.Text, holding);
-        else if (context.Now.Identity(from![sender]) != context.Now.Identity(holding))
-            context.Findings.Report(name.Span, BindingMessages.ReceivedTwice(context.NameOf(recipient), context.NameOf(sender), name.Text, context.LineOf(from[sender].Span)));
+        else if (context.Now.Identity(known) != context.Now.Identity(holding))
+            context.Findings.Report(name.Span, BindingMessages.ReceivedTwice(context.NameOf(recipient), context.NameOf(sender), name.Text, context.LineOf(known.Span)));
     }
 
     // Ada's own v and another value that she sends as v would both be Ada.v.
     private void CheckUnsent(int sender, Name name, Holding holding)
     {
-        if (context.Now.Own.TryGetValue((sender, name.Text), out Holding? own) && context.Now.Identity(own) != context.Now.Identity(holding))
+        if (context.Now.Own.TryGetValue(new(sender, name.Text), out Holding? own) && context.Now.Identity(own) != context.Now.Identity(holding))
             context.Findings.Report(name.Span, BindingMessages.MadeTwice(context.NameOf(sender), name.Text, context.LineOf(own.Span)));
     }
 
@@ -89,7 +88,7 @@ internal sealed class NameMaker(BindContext context)
     {
         foreach (NameState sibling in _siblings)
         {
-            if (!sibling.Own.TryGetValue((party, name.Text), out Holding? other) || context.Now.Own.ContainsKey((party, name.Text)))
+            if (!sibling.Own.TryGetValue(new(party, name.Text), out Holding? other) || context.Now.Own.ContainsKey(new(party, name.Text)))
                 continue;
             if (!ValueKinds.Together(other.Kind, kind))
                 context.Findings.Report(name.Span, BindingMessages.BranchKinds(name.Text, other.Kind, kind, context.LineOf(other.Span)));
@@ -104,9 +103,9 @@ internal sealed class NameMaker(BindContext context)
     {
         foreach (NameState sibling in _siblings)
         {
-            if (!sibling.Sent.TryGetValue((sender, name.Text), out var sent))
+            if (!sibling.Sent.TryGetValue(new(sender, name.Text), out var sent))
                 continue;
-            Holding? alike = sent.Except(context.Now.Sent.GetValueOrDefault((sender, name.Text), []))
+            Holding? alike = sent.Except(context.Now.Sent.GetValueOrDefault(new HeldName(sender, name.Text), []))
                 .FirstOrDefault(h => ValueKinds.Together(h.Kind, kind) && _recipients[h.Slots[0]].SequenceEqual(recipients));
             if (alike is null)
                 continue;

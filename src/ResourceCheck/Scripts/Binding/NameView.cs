@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -74,7 +75,7 @@ internal sealed class ActorView(BindContext context, NameState state, int actor)
         if (meanings.Count == 1)
             return Read(meanings[0], span);
         if (meanings.Count > 1)
-            return Ambiguous(name, span, Context.NameOf(actor), State.Received.GetValueOrDefault((actor, name))?.Keys ?? [actor, .. Fellows]);
+            return Ambiguous(name, span, Context.NameOf(actor), State.Senders(actor, name) ?? [actor, .. Fellows]);
         IReadOnlyList<(int Party, Holding Value)> makers = State.Makers(name);
         return makers.Count == 0 ? Absent(null, name, span) : Missed(name, name, makers, span);
     }
@@ -87,7 +88,7 @@ internal sealed class ActorView(BindContext context, NameState state, int actor)
         if (meanings.Count == 1)
             return Read(meanings[0], span);
         if (meanings.Count > 1)
-            return Ambiguous(name, span, Context.NameOf(actor), State.Received.GetValueOrDefault((actor, name))?.Keys ?? [actor, .. Fellows]);
+            return Ambiguous(name, span, Context.NameOf(actor), State.Senders(actor, name) ?? [actor, .. Fellows]);
         IReadOnlyList<Holding> held = State.Meanings(party, name);
         return held.Count == 0 ? Absent(party, name, span) : Missed($"{Context.NameOf(party)}.{name}", name, [(party, held[0])], span);
     }
@@ -147,7 +148,7 @@ internal sealed class RefereeView(BindContext context, NameState state) : NameVi
         {
             0 => Absent(party, name, span),
             1 => Read(meanings[0], span),
-            _ => Ambiguous(name, span, Context.NameOf(party), State.Received.GetValueOrDefault((party, name))?.Keys ?? [party]),
+            _ => Ambiguous(name, span, Context.NameOf(party), State.Senders(party, name) ?? [party]),
         };
     }
 
@@ -180,7 +181,7 @@ internal sealed class PublicView(BindContext context, NameState state) : NameVie
         {
             0 => Absent(party, name, span),
             1 => Shared(name, $"{Context.NameOf(party)}.{name}", meanings[0], span),
-            _ => Ambiguous(name, span, Context.NameOf(party), State.Received.GetValueOrDefault((party, name))?.Keys ?? [party]),
+            _ => Ambiguous(name, span, Context.NameOf(party), State.Senders(party, name) ?? [party]),
         };
     }
 
@@ -222,7 +223,7 @@ internal sealed class SubjectView(BindContext context, NameView outer, int subje
     {
         0 => Absent(sender ?? subject, name, span),
         1 => outer.Seen(subject, name, meanings[0], $"{Context.NameOf(sender ?? subject)}.{name}", span),
-        _ => Ambiguous(name, span, Context.NameOf(subject), State.Received.GetValueOrDefault((subject, name))?.Keys ?? [subject]),
+        _ => Ambiguous(name, span, Context.NameOf(subject), State.Senders(subject, name) ?? [subject]),
     };
 }
 
@@ -234,7 +235,7 @@ internal sealed class ConstantView(BindContext context) : NameView(context, new 
     public override Typed Bare(string name, Span span)
     {
         IEnumerable<string> known = Context.Parameters.Keys.Concat(Context.Counters.Keys);
-        Context.Findings.ReportName(name, span, BindingMessages.NotConstant(name, Words.Near(name, known), [.. known.Order()]));
+        Context.Findings.ReportName(name, span, BindingMessages.NotConstant(name, NearWords.Find(name, known), [.. known.Order()]));
         return Typed.Broken;
     }
 

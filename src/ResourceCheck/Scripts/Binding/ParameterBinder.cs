@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Syntax;
 
@@ -30,7 +31,7 @@ internal sealed class ParameterBinder(BindContext context)
     {
         string[] known = [.. context.Tree.Statements.OfType<ParameterStatement>().Select(p => p.Name.Text)];
         foreach (string name in given.Keys.Where(n => !known.Contains(n) && !context.Findings.IsSuspect(n)).Order(StringComparer.Ordinal))
-            context.Findings.Report(Option(name, given[name]), BindingMessages.UnknownParameter(name, Words.Near(name, known), known));
+            context.Findings.Report(Option(name, given[name]), BindingMessages.UnknownParameter(name, NearWords.Find(name, known), known));
     }
 
     private ParameterInfo? Declare(ParameterStatement statement, IReadOnlyDictionary<string, Rational> given)
@@ -57,9 +58,9 @@ internal sealed class ParameterBinder(BindContext context)
         string allowed = context.TextOf(statement.Domain.Span);
         bool usable = info.Allows(info.Default);
         if (!usable)
-            context.Findings.Report(statement.Default.Span, BindingMessages.OutsideDomain(info.Name, Words.Number(info.Default), allowed));
+            context.Findings.Report(statement.Default.Span, BindingMessages.OutsideDomain(info.Name, Written.Number(info.Default), allowed));
         if (given is { } value && !info.Allows(value))
-            context.Findings.Report(Option(info.Name, value), BindingMessages.OutsideDomain(info.Name, Words.Number(value), allowed));
+            context.Findings.Report(Option(info.Name, value), BindingMessages.OutsideDomain(info.Name, Written.Number(value), allowed));
         if (!info.Allows(context.Parameters[info.Name]))
             context.Parameters[info.Name] = usable ? info.Default : info.From;
     }
@@ -73,5 +74,5 @@ internal sealed class ParameterBinder(BindContext context)
 
     private int FirstLine(string name) => context.LineOf(context.Tree.Statements.OfType<ParameterStatement>().First(p => p.Name.Text == name).Span);
 
-    private static string Option(string name, Rational value) => $"--parameter {name}={Words.Number(value)}";
+    private static string Option(string name, Rational value) => $"--parameter {name}={Written.Number(value)}";
 }

@@ -1,4 +1,5 @@
 using System.Numerics;
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Syntax;
 
@@ -8,7 +9,7 @@ namespace ResourceCheck.Scripts.Binding;
 /// <param name="Party">Its index.</param>
 /// <param name="Span">The words that name it.</param>
 /// <param name="Collective">Whether they are <c>all</c> or <c>others</c>.</param>
-internal readonly record struct PartyMention(int Party, Span Span, bool Collective);
+internal sealed record PartyMention(int Party, Span Span, bool Collective);
 
 /// <summary>Turns written lists of parties into indices.</summary>
 /// <param name="context">The binding.</param>
@@ -20,7 +21,7 @@ internal sealed class PartyResolver(BindContext context)
     /// <summary>A list in a quantum statement: <c>all</c> means those who still hold a qudit.</summary>
     public IReadOnlyList<PartyMention> Quantum(PartyList list)
     {
-        int[] holders = [.. context.Parties.Holders.Where(p => context.Now.Qudits[p].IsHeld)];
+        int[] holders = [.. context.Parties.Holders.Where(p => context.Now.Qudit(p)!.IsHeld)];
         if (holders.Length == 0 && context.Parties.HasResource && list.Items.FirstOrDefault(i => i is CollectiveParty) is { } collective)
             context.Findings.Report(collective.Span, BindingMessages.NobodyHolds(context.TextOf(collective.Span), LastUse()));
         return Resolve(list, holders);
@@ -45,11 +46,11 @@ internal sealed class PartyResolver(BindContext context)
             return null;
         if (value is NumberValue { Number.IsWhole: true } number && BigInteger.Abs(number.Number.Numerator) <= int.MaxValue)
             return (int)number.Number.Numerator;
-        context.Findings.Report(expression.Span, BindingMessages.WholeNumberNeeded(Words.Write(value)));
+        context.Findings.Report(expression.Span, BindingMessages.WholeNumberNeeded(Written.Write(value)));
         return null;
     }
 
-    private int LastUse() => context.Now.Qudits.Values.Select(q => context.LineOf(q.By)).DefaultIfEmpty(0).Max();
+    private int LastUse() => context.Now.Qudits.OfType<QuditState>().Select(q => context.LineOf(q.By)).DefaultIfEmpty(0).Max();
 
     private List<PartyMention> Resolve(PartyList list, IEnumerable<int> everybody)
     {
@@ -120,7 +121,7 @@ internal sealed class PartyResolver(BindContext context)
         return [];
     }
 
-    private string? NearParty(string name) => Words.Near(name, context.Parties.Names.Concat(context.Parties.Families.Keys));
+    private string? NearParty(string name) => NearWords.Find(name, context.Parties.Names.Concat(context.Parties.Families.Keys));
 
-    private string? NearFamily(string name) => Words.Near(name, context.Parties.Families.Keys);
+    private string? NearFamily(string name) => NearWords.Find(name, context.Parties.Families.Keys);
 }

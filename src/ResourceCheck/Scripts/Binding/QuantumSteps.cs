@@ -54,7 +54,7 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
         Duration? time = Time(statement);
         foreach (PartyMention actor in actors.Idle(statement.Actors))
         {
-            if (context.Now.Qudits.TryGetValue(actor.Party, out QuditState qudit) && qudit.Phase == QuditPhase.Fresh)
+            if (context.Now.Qudit(actor.Party) is { Phase: QuditPhase.Fresh })
                 context.Now = context.Now.WithQudit(actor.Party, QuditPhase.Touched, statement.Span);
             if (time is { } duration)
                 steps.Add(new WaitStep(statement.Span, actor.Party, duration));
@@ -118,7 +118,7 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
 
         if (!actors.HoldsQudit(victim, "intercept"))
             return false;
-        QuditState qudit = context.Now.Qudits[victim.Party];
+        QuditState qudit = context.Now.Qudit(victim.Party)!;
         if (qudit.Phase == QuditPhase.Fresh)
             return true;
         context.Findings.Report(statement.Victim.Span, BindingMessages.InterceptTooLate(context.NameOf(victim.Party), context.LineOf(qudit.By)));
@@ -128,15 +128,15 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
     private BoundUnitary? Unitary(UnitaryExpression u, ExpressionBinder values)
     {
         int top = context.Levels - 1;
-        Typed basis = u.Basis is null ? default : values.Expect(u.Basis, ValueKind.Basis);
-        Typed first = u.First is null ? default : u.Kind switch
+        Typed basis = u.Basis is null ? Typed.Broken : values.Expect(u.Basis, ValueKind.Basis);
+        Typed first = u.First is null ? Typed.Broken : u.Kind switch
         {
             UnitaryKind.Complement => values.Index(u.First, "complement", 0, top),
             UnitaryKind.LevelSwap => values.Index(u.First, "levelswap", 0, top),
             UnitaryKind.Fourier or UnitaryKind.InverseFourier => values.Index(u.First, "fourier on", 1, context.Levels),
             _ => Steps(values, u.First),
         };
-        Typed second = u.Second is null ? default : values.Index(u.Second, "levelswap", 0, top);
+        Typed second = u.Second is null ? Typed.Broken : values.Index(u.Second, "levelswap", 0, top);
         bool broken = (u.Basis is not null && basis.Bound is null) || (u.First is not null && first.Bound is null) || (u.Second is not null && second.Bound is null);
         return broken ? null : new BoundUnitary(u.Span, u.Kind, basis.Bound, first.Bound, second.Bound, u.File?.Text);
     }
@@ -145,7 +145,7 @@ internal sealed class QuantumSteps(BindContext context, Actors actors, NameMaker
     {
         Typed typed = values.Expect(expression, ValueKind.Number);
         return typed.Constant is NumberValue { Number.IsWhole: false } number
-            ? values.Refuse(expression.Span, BindingMessages.WholeNumberNeeded(Words.Number(number.Number)))
+            ? values.Refuse(expression.Span, BindingMessages.WholeNumberNeeded(Written.Number(number.Number)))
             : typed;
     }
 

@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -91,7 +92,7 @@ internal sealed class RefereeBinder(BindContext context, LabelBinder labels, IRe
     }
 
     private static string? NearMetric(GoalStatement statement) =>
-        statement.Comparison is BinaryExpression { Left: NameExpression name } ? Words.Near(name.Text, FigureBinder.MetricWords) : null;
+        statement.Comparison is BinaryExpression { Left: NameExpression name } ? NearWords.Find(name.Text, FigureBinder.MetricWords) : null;
 
     private string Text(Span span) => labels.Write(context.TextOf(span), span);
 

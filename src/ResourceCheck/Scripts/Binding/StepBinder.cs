@@ -67,6 +67,8 @@ internal sealed class StepBinder
             _reach.Visit(statement);
             int before = steps.Count;
             Bind(statement, steps);
+            for (int i = before; i < steps.Count && _context.Counters.Count > 0; i++)
+                steps[i] = steps[i].Counters.IsEmpty ? steps[i] with { Counters = _context.Counters } : steps[i];
             TellMisses();
             Limit(statement, steps.Count - before);
         }

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using ResourceCheck.Quantities;
 using ResourceCheck.Scripts.Syntax;
 
@@ -5,7 +6,11 @@ namespace ResourceCheck.Scripts.Binding;
 
 /// <summary>One action of a protocol whose loops are unrolled; a statement with several actors becomes one step per actor.</summary>
 /// <param name="Span">Statement it came from.</param>
-public abstract record Step(Span Span);
+public abstract record Step(Span Span)
+{
+    /// <summary>Counters of the loops that it was unrolled from, with their values in its turn; empty outside loops.</summary>
+    public ImmutableDictionary<string, int> Counters { get; init; } = ImmutableDictionary<string, int>.Empty;
+}
 
 /// <summary>A party measures its qudit, which is consumed; the outcome goes to a slot.</summary>
 public sealed record MeasureStep(Span Span, int Party, BoundExpression Basis, int Slot) : Step(Span);

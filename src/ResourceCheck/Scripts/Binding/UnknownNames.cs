@@ -1,3 +1,4 @@
+using ResourceCheck.Diagnostics;
 using ResourceCheck.Scripts.Syntax;
 
 namespace ResourceCheck.Scripts.Binding;
@@ -31,7 +32,7 @@ internal static class UnknownNames
         IReadOnlyList<Maker> makers = context.Makers.Of(name);
         string label = owner is null ? name : $"{owner}.{name}";
         if (makers.Count == 0)
-            return BindingMessages.NeverMade(label, Words.Near(name, owner is null ? Candidates(context) : held), owner, held);
+            return BindingMessages.NeverMade(label, NearWords.Find(name, owner is null ? Candidates(context) : held), owner, held);
         if (makers.FirstOrDefault(m => m.Loop is not null && !context.Loops.Contains(m.Loop)) is { } inTurn && makers.All(m => m.Span.Start < span.Start))
             return BindingMessages.OfAnEndedTurn(label, context.LineOf(inTurn.Span), context.LineOf(inTurn.Loop!.Span));
         Maker? later = makers.FirstOrDefault(m => m.Span.Start > span.Start);

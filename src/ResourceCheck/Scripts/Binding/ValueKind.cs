@@ -68,10 +68,10 @@ internal static class ValueKinds
 /// <summary>A resolved expression with its sort; without an expression an error was reported already.</summary>
 /// <param name="Bound">The expression, or null.</param>
 /// <param name="Kind">Its sort.</param>
-internal readonly record struct Typed(BoundExpression? Bound, ValueKind Kind)
+internal sealed record Typed(BoundExpression? Bound, ValueKind Kind)
 {
     /// <summary>An expression that could not be resolved; the finding stands already.</summary>
-    public static Typed Broken => default;
+    public static Typed Broken { get; } = new(null, default);
 
     /// <summary>The fixed value, or null when the expression is broken or varies.</summary>
     public Value? Constant => (Bound as BoundLiteral)?.Value;

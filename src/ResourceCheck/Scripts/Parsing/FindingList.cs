@@ -3,7 +3,7 @@ using ResourceCheck.Diagnostics;
 namespace ResourceCheck.Scripts.Parsing;
 
 /// <summary>A message of the front end, before it has a place.</summary>
-internal readonly record struct SyntaxMessage(string Code, string Text, string? Cure);
+internal sealed record SyntaxMessage(string Code, string Text, string? Cure);
 
 /// <summary>Gathers what lexer and parser find in one script.</summary>
 internal sealed class FindingList(SourceText source)

@@ -11,7 +11,7 @@ internal enum TokenKind
 }
 
 /// <summary>The smallest meaningful piece of a line; the text of a quoted one is its content.</summary>
-internal readonly record struct Token(TokenKind Kind, Span Span, string Text)
+internal sealed record Token(TokenKind Kind, Span Span, string Text)
 {
     /// <summary>Whether this is the given word or sign; a quoted text never is.</summary>
     public bool Is(string text) => Kind is TokenKind.Word or TokenKind.Sign && Text == text;
