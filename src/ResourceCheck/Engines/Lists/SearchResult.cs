@@ -17,6 +17,12 @@ public sealed record SearchOptions(int ExhaustiveUpTo = 1000, int GridPoints = 1
     public SearchOptions Milder() => this with { GridPoints = GridPoints / 4, Climbs = 3, RandomClimbs = 2, Sweeps = 1, Corners = 1 };
 }
 
+/// <summary>How far to climb from points that are thought to be good.</summary>
+/// <param name="Climbs">Climbs from the best of the points.</param>
+/// <param name="Step">First step of a climb; it is halved down to 1.</param>
+/// <param name="Enough">A value that ends the search, because nobody asks how much larger it gets.</param>
+public sealed record NearbyOptions(int Climbs = 3, int Step = 8, double Enough = double.PositiveInfinity);
+
 /// <summary>State of a search.</summary>
 /// <param name="Evaluations">Points evaluated so far.</param>
 /// <param name="Best">Largest value so far.</param>

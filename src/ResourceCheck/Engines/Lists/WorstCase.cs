@@ -58,17 +58,29 @@ public sealed class WorstCase
     /// <summary>Climbs from points that were worst in much the same task, and from these with one number at its least; a quick look that a search of its own must follow.</summary>
     /// <param name="task">The task; its choices are ignored.</param>
     /// <param name="starts">Points as a search counts them.</param>
+    /// <param name="options">How far to climb.</param>
     /// <param name="negligible">Paths left out.</param>
     /// <param name="cancellation">Stops the search.</param>
-    internal static (int[] Point, double Harm) Near(ListTask task, IReadOnlyList<int[]> starts, double negligible, CancellationToken cancellation)
+    internal static (int[] Point, double Harm) Near(ListTask task, IReadOnlyList<int[]> starts, NearbyOptions options, double negligible, CancellationToken cancellation)
     {
         WorstCase search = new(task, task.Case!, cancellation);
         search._coarse = task.Limits with { Negligible = negligible };
         int[][] from = [.. starts, .. starts.SelectMany(s => s.Select((_, i) => (int[])[.. s.Select((n, k) => k == i ? search._ranges[k].First : n)]))];
-        return AttackSearch.Nearby([.. search._ranges.Select(r => (r.First, r.Last))], p => search.Of(p).Harm, from, NearStep, cancellation);
+        return AttackSearch.Nearby([.. search._ranges.Select(r => (r.First, r.Last))], p => search.Of(p).Harm, from, options, cancellation);
     }
 
-    private const int NearStep = 8;
+    /// <summary>The numbers that a search finds and their harm, without anything else.</summary>
+    /// <param name="task">The task; its choices are ignored.</param>
+    /// <param name="options">How much to search.</param>
+    /// <param name="negligible">Paths left out.</param>
+    /// <param name="cancellation">Stops the search.</param>
+    internal static (int[] Point, double Harm) Look(ListTask task, SearchOptions options, double negligible, CancellationToken cancellation)
+    {
+        WorstCase search = new(task, task.Case!, cancellation);
+        search._coarse = task.Limits with { Negligible = negligible };
+        SearchResult found = AttackSearch.Maximise([.. search._ranges.Select(r => (r.First, r.Last))], p => search.Of(p).Harm, options, null, cancellation);
+        return ([.. found.Choices], found.Value);
+    }
 
     private static AttackOutcome Guarded(ListTask task, CancellationToken cancellation, Func<WorstCase, AttackOutcome> find)
     {
