@@ -40,6 +40,13 @@ internal sealed class Terminal(ToolHost host)
         Try(() => Host.Error.Write($"{separator}{Visible.InLines(text)}\n"));
     }
 
+    /// <summary>Says on standard error how far work is; a file or another program is told nothing.</summary>
+    public void Progress(string text)
+    {
+        if (Host.ErrorIsTerminal)
+            Note(text);
+    }
+
     /// <summary>Writes a result to standard output.</summary>
     public int Write(string text, int code)
     {

@@ -40,7 +40,7 @@ internal static class RunCommand
             }
 
             string at = value.At.Length == 0 ? "" : $" at {value.At}";
-            terminal.Note(string.Create(CultureInfo.InvariantCulture, $"Searching \"{value.Case}\"{at}: {value.Evaluations} choices so far, greatest harm {value.Best:G4}"));
+            terminal.Progress(string.Create(CultureInfo.InvariantCulture, $"Searching \"{value.Case}\"{at}: {value.Evaluations} choices so far, greatest harm {value.Best:G4}"));
         }
     }
 

@@ -51,6 +51,10 @@ public sealed class CopiesTests
         Assert.Equal([code], Judge.Copies(new CopiesRequest(Broadcast(), 0.05, 0.1, null) { Optimise = [name] }).Findings.Select(f => f.Code));
 
     [Fact]
+    public void Thresholds_are_chosen_for_one_value_of_all_else() =>
+        Assert.Equal(["J014"], Judge.Copies(new CopiesRequest(Broadcast() with { Parameters = [new("t1", "0.05,0.06")] }, 0.05, 0.1, null) { Optimise = ["a"] }).Findings.Select(f => f.Code));
+
+    [Fact]
     public void What_cannot_be_had_is_told_with_its_figures()
     {
         Outcome<CopiesResult> noisy = Judge.Copies(new CopiesRequest(Broadcast() with { Overrides = [new("flight.depolarising", "0.3")], Parameters = [new("M", "12")] }, 1e-3, 1, null));
