@@ -47,13 +47,13 @@ public sealed class WorstCase
     /// <param name="progress">Told about every evaluation; null for nobody.</param>
     /// <param name="cancellation">Stops the search.</param>
     public static AttackOutcome Find(ListTask task, SearchOptions options, IProgress<SearchProgress>? progress, CancellationToken cancellation) =>
-        Guarded(task, cancellation, w => w.Find(options, progress));
+        Guarded(task, w => w.Find(options, progress), cancellation);
 
     /// <summary>Evaluates numbers that are given: conditional on holding enough positions, and on average over the cheat's own lists.</summary>
     /// <param name="task">The task with its choices.</param>
     /// <param name="cancellation">Stops the evaluation.</param>
     public static AttackOutcome At(ListTask task, CancellationToken cancellation) =>
-        Guarded(task, cancellation, w => new AttackOutcome(task.Choices, w._program.Evaluate(task.Choices, task.Limits, cancellation), null, null) { Average = w.Plain(task.Choices) });
+        Guarded(task, w => new AttackOutcome(task.Choices, w._program.Evaluate(task.Choices, task.Limits, cancellation), null, null) { Average = w.Plain(task.Choices) }, cancellation);
 
     /// <summary>Climbs from points that were worst in much the same task, and from these with one number at its least; a quick look that a search of its own must follow.</summary>
     /// <param name="task">The task; its choices are ignored.</param>
@@ -82,7 +82,7 @@ public sealed class WorstCase
         return ([.. found.Choices], found.Value);
     }
 
-    private static AttackOutcome Guarded(ListTask task, CancellationToken cancellation, Func<WorstCase, AttackOutcome> find)
+    private static AttackOutcome Guarded(ListTask task, Func<WorstCase, AttackOutcome> find, CancellationToken cancellation)
     {
         DishonestCase cheat = task.Case ?? throw new ArgumentException("There is no cheat in this task.", nameof(task));
         try
