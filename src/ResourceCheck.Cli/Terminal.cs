@@ -32,12 +32,23 @@ internal sealed class Terminal(ToolHost host)
             Note(finding.ToString());
     }
 
-    /// <summary>Says something on standard error.</summary>
+    /// <summary>Says something on standard error, at once.</summary>
     public void Note(string text)
     {
         string separator = _spoken ? "\n" : "";
         _spoken = true;
-        Try(() => Host.Error.Write($"{separator}{Visible.InLines(text)}\n"));
+        Try(() =>
+        {
+            Host.Error.Write($"{separator}{Visible.InLines(text)}\n");
+            Host.Error.Flush();
+        });
+    }
+
+    /// <summary>Says on standard error how far work is; a file or another program is told nothing.</summary>
+    public void Progress(string text)
+    {
+        if (Host.ErrorIsTerminal)
+            Note(text);
     }
 
     /// <summary>Writes a result to standard output.</summary>

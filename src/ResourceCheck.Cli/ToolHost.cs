@@ -9,6 +9,9 @@ namespace ResourceCheck.Cli;
 /// <param name="Trace">Whether a mistake of the program shows its details.</param>
 internal sealed record ToolHost(TextWriter Output, TextWriter Error, Func<Stream> OpenInput, bool OutputIsTerminal, bool Colour, bool Trace)
 {
+    /// <summary>Whether a person reads the errors as they come, who wants to know how far long work is.</summary>
+    public bool ErrorIsTerminal { get; init; }
+
     /// <summary>The host of the running process.</summary>
     public static ToolHost OfProcess()
     {
@@ -20,7 +23,10 @@ internal sealed record ToolHost(TextWriter Output, TextWriter Error, Func<Stream
             Console.OpenStandardInput,
             terminal,
             terminal && !plain,
-            Environment.GetEnvironmentVariable("RESOURCECHECK_TRACE") == "1");
+            Environment.GetEnvironmentVariable("RESOURCECHECK_TRACE") == "1")
+        {
+            ErrorIsTerminal = !Console.IsErrorRedirected,
+        };
     }
 
     private static StreamWriter Utf8(Stream stream) => new(stream, new System.Text.UTF8Encoding(encoderShouldEmitUTF8Identifier: false)) { NewLine = "\n" };

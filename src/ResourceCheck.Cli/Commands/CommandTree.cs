@@ -18,13 +18,13 @@ internal static class CommandTree
         Option[] judging = [o.Under, o.Set, o.Parameter, o.Engine, o.Memory];
         Option[] writing = [o.Format, o.Out, o.Quiet];
         Option[] computing = [o.Seed, o.Threads];
-        Add("run", "SCRIPT", "Evaluate a protocol under conditions: success, harm, yield, fidelity, time, verdict.", RunCommand.Execute, [.. judging, o.Drift, o.Uncertainty, o.Draws, .. writing, o.Figure, .. computing]);
+        Add("run", "SCRIPT", "Evaluate a protocol under conditions: success, harm, yield, fidelity, time, verdict.", RunCommand.Execute, [.. judging, o.Choose, o.Drift, o.TryLevels, o.Uncertainty, o.Draws, .. writing, o.Figure, .. computing]);
         Add("verify", "SCRIPT", "Prove or refute what the protocol claims, exactly, under ideal conditions.", VerifyCommand.Execute, [o.Parameter, o.Memory, .. writing, .. computing]);
         Add("inspect", "SCRIPT", "Compute nothing: show who knows what, the timeline, the engine and its cost, and every mistake.", InspectCommand.Execute, [.. judging, .. writing, .. computing]);
         Add("budget", "SCRIPT", "Share a loss out among its sources: each alone, each removed, and its part of the whole.", BudgetCommand.Execute, [.. judging, o.Uncertainty, .. writing, o.Figure, .. computing]);
         Add("tolerance", "SCRIPT", "Find up to which value a goal is met.", ToleranceCommand.Execute, [o.Vary, o.Goal, o.Uncertainty, .. judging, .. writing, o.Figure, .. computing]);
         Add("sweep", "SCRIPT", "Evaluate at every point of one or two ranges; interrupted sweeps go on.", SweepCommand.Execute, [o.Vary, o.Uncertainty, .. judging, .. writing, o.Figure, .. computing]);
-        Add("copies", "SCRIPT", "Find how many copies a failure probability costs, honest and with the cheats listed.", CopiesCommand.Execute, [o.Failure, o.Harm, o.Vary, .. judging, .. writing, o.Figure, .. computing]);
+        Add("copies", "SCRIPT", "Find how many copies a failure probability costs, honest and with the cheats listed.", CopiesCommand.Execute, [o.Failure, o.Harm, o.Optimise, o.Vary, .. judging, .. writing, o.Figure, .. computing]);
         Add("report", "STUDY", "Write a feasibility section from a study file: verdicts, tolerances, budgets, rates, copies, figures, tables.", ReportCommand.Execute, [o.Folder, o.Quiet, .. computing]);
         Add("state", "FILE", "Tell what a prepared state is: validity, fidelity, purity, negativity, populations.", StateCommand.Execute, [o.Mend, .. writing]);
         Add("storage", "CONDITIONS", "Tell how long emitters side by side keep the antisymmetric state, beside its symmetric counterpart and independent decay.", StorageCommand.Execute, [o.Set, o.Parties, o.Until, o.Points, .. writing, o.Figure]);

@@ -23,7 +23,10 @@ internal static class CopiesCommand
         double failure = failures.Count > 0 ? failures[0] : DefaultFailure, harm = harms ?? failure;
         if (Work.Request(use, o) is not { } request)
             return Work.Refuse(use);
-        CopiesRequest copies = new(request with { Cancellation = token }, failure, harm, target.Quiet ? null : new Teller(use.Session.Terminal));
+        CopiesRequest copies = new(request with { Cancellation = token }, failure, harm, target.Quiet ? null : new Teller(use.Session.Terminal))
+        {
+            Optimise = use.Text(o.Optimise)?.Split(',', StringSplitOptions.TrimEntries) ?? [],
+        };
         if (failures.Count > 1 || vary.Count > 0)
             return await Table(use, target, new CopiesTableRequest(copies, failures.Count > 0 ? failures : [DefaultFailure], harms, vary), token);
         Outcome<CopiesResult> outcome = await Work.Compute(() => Judge.Copies(copies), token);

@@ -46,6 +46,9 @@ internal sealed class Invocation
     /// <summary>An option's value, or null when it is not given.</summary>
     public string? Text(Option<string[]> option) => _parsed.GetValue(option)?.FirstOrDefault();
 
+    /// <summary>All values of an option that may be repeated.</summary>
+    public IReadOnlyList<string> Texts(Option<string[]> option) => _parsed.GetValue(option) ?? [];
+
     /// <summary>An option's value out of a list.</summary>
     public string? Choice(Option<string[]> option, IReadOnlyList<string> choices)
     {

@@ -48,6 +48,10 @@ internal sealed class Options
 
     public Option<string[]> Goal { get; } = Value("--until", "GOAL", "Goal to hold, such as \"success >= 0.9\"; without it the script's tightest.");
 
+    public Option<string[]> Choose { get; } = Value("--choose", "CASE: NAME=NUMBER, …", "Numbers for a dishonest case in place of the worst ones that a search finds, such as \"receiver forges: m = 24\". May be repeated.");
+
+    public Option<bool> TryLevels { get; } = new("--try-levels") { Description = "Compare which physical level plays which value of the script." };
+
     public Option<string[]> Drift { get; } = Value("--drift", "FRACTION:FILE", "A fraction of runs under worse conditions, such as 0.01:worse.conditions.json: what failure and harms become, and the floor under them.");
 
     public Option<bool> Uncertainty { get; } = new("--uncertainty") { Description = "Carry the standard uncertainties of the conditions, as in \"80(10) us\", through to the figures." };
@@ -55,6 +59,8 @@ internal sealed class Options
     public Option<string[]> Failure { get; } = Value("--failure", "PROBABILITY", "What honest failure must not exceed, such as 1e-6; several, separated by commas, make a table.");
 
     public Option<string[]> Harm { get; } = Value("--harm", "PROBABILITY", "What every harm must not exceed; the same as --failure unless said, and with 1 harms are not looked at.");
+
+    public Option<string[]> Optimise { get; } = Value("--optimise", "NAMES", "Choose these thresholds (parameters with a real range, separated by commas, or all) so that few copies suffice.");
 
     public Option<string[]> Until { get; } = Value("--until", "TIME", "Last time, such as \"5 ns\"; without it the duration in the conditions.");
 
@@ -75,7 +81,7 @@ internal sealed class Options
     public Option<bool> Force { get; } = new("--force") { Description = "Replace files that exist." };
 
     /// <summary>Whether an option may be given several times.</summary>
-    public static bool MayRepeat(Option option) => option.Name is "--set" or "--parameter" or "--vary";
+    public static bool MayRepeat(Option option) => option.Name is "--set" or "--parameter" or "--vary" or "--choose";
 
     private static Option<string[]> Value(string name, string helpName, string description, string[]? choices = null)
     {

@@ -15,15 +15,6 @@ internal static class CheatEvaluator
     /// <summary>Combinations of a cheat's numbers on single copies that are all tried; each is an evaluation of its own.</summary>
     private const int MostCombinations = 1000;
 
-    /// <summary>Lists left out of an average, all together; they count as harmless, so that the average stays a lower bound.</summary>
-    private const double NeglectedLists = 1e-4;
-
-    /// <summary>Paths left out of an average, each; they too count as harmless.</summary>
-    private const double NeglectedPaths = 1e-9;
-
-    /// <summary>Beyond this many copies the average over the cheat's own list takes minutes.</summary>
-    private const int MostAveraged = 400;
-
     /// <summary>One strategy at one assignment of the private inputs.</summary>
     /// <param name="setting">Protocol and world.</param>
     /// <param name="cheat">The strategy.</param>
@@ -36,6 +27,10 @@ internal static class CheatEvaluator
         return setting.Protocol.Lists is null ? OnCopies(cheating) : OnLists(cheating);
     }
 
+    /// <summary>What one strategy asks of the lists at some inputs; null when no copy is kept or numbers are used before there are lists.</summary>
+    public static ListTask? ListTaskOf(Setting setting, DishonestCase cheat, PreparedState state, IReadOnlyList<Value> inputs, EngineChoice engine, RunRequest request) =>
+        cheat.ChoosesInRounds ? null : new Cheating(setting, cheat, state, inputs, engine, setting.Words, request).Task();
+
     /// <summary>One strategy with all that its evaluation needs.</summary>
     private sealed record Cheating(Setting Setting, DishonestCase Case, PreparedState State, IReadOnlyList<Value> Inputs, EngineChoice Engine, string At, RunRequest Request)
     {
@@ -45,6 +40,13 @@ internal static class CheatEvaluator
             return Evaluator.Copies(Setting, plan, State, Inputs, Engine, Request);
         }
 
+        /// <summary>What is asked of the lists; null when no copy is kept.</summary>
+        public ListTask? Task()
+        {
+            Evaluation copies = Copies([]);
+            return copies.Yield > 0 ? new ListTask { Protocol = Setting.Protocol, Copies = copies.Copies, Inputs = Inputs, Case = Case } : null;
+        }
+
         public KeyValuePair<string, string>[] Named(IReadOnlyList<Value> choices) => [.. Case.Choices.Zip(choices, (c, v) => KeyValuePair.Create(c.Name, Scripts.Binding.Written.Write(v)))];
     }
 
@@ -52,15 +54,16 @@ internal static class CheatEvaluator
     {
         ChoiceRange[] ranges = [.. cheating.Case.Choices.Select(c => new ChoiceRange(c, 0, cheating.Setting.Protocol.Levels))];
         double combinations = ranges.Aggregate(1.0, (product, r) => product * Math.Max(0, (double)r.Last - r.First + 1));
-        if (combinations is < 1 or > MostCombinations)
+        Value[]? given = ChosenNumbers.For(cheating.Request.Choose, cheating.Case);
+        if (given is null && combinations is < 1 or > MostCombinations)
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.ChoicesOutOfReach(cheating.Case.Name, combinations, MostCombinations)]);
-        (Value[] choices, Evaluation worst) = Combinations(ranges).Select(c => (c, cheating.Copies(c)))
+        (Value[] choices, Evaluation worst) = (given is null ? Combinations(ranges) : [given]).Select(c => (c, cheating.Copies(c)))
             .Where(pair => pair.Item2.Yield > 0).DefaultIfEmpty(([], null!)).MaxBy(pair => pair.Item2?.Harm?.Value);
         if (worst is null)
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.NothingKept($"case \"{cheating.Case.Name}\"")]);
-        bool proved = cheating.Case.Choices.All(c => c.Whole);
+        bool proved = given is not null || cheating.Case.Choices.All(c => c.Whole);
         Estimate harm = proved ? worst.Harm! : Estimate.AtLeast(worst.Harm!.Value);
-        string method = ranges.Length == 0 ? "followed exactly" : string.Create(CultureInfo.InvariantCulture, $"{(proved ? "all" : "a grid of")} {combinations} choices tried, each followed exactly");
+        string method = given is not null ? "followed exactly at the numbers given" : ranges.Length == 0 ? "followed exactly" : string.Create(CultureInfo.InvariantCulture, $"{(proved ? "all" : "a grid of")} {combinations} choices tried, each followed exactly");
         return Outcome<CheatEvaluation>.Of(new CheatEvaluation(cheating.Case, cheating.At, harm, null, worst, cheating.Named(choices), method));
     }
 
@@ -76,29 +79,20 @@ internal static class CheatEvaluator
     {
         if (cheating.Case.ChoosesInRounds)
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.SearchRefused(cheating.Case.Name, "a number is used in a round, before there are lists; make a case for each of its values.")]);
-        Evaluation copies = cheating.Copies([]);
-        if (!(copies.Yield > 0))
+        if (cheating.Task() is not { } task)
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.NothingKept($"case \"{cheating.Case.Name}\"")]);
-        ListTask task = new() { Protocol = cheating.Setting.Protocol, Copies = copies.Copies, Inputs = cheating.Inputs, Case = cheating.Case };
         if (cheating.Case.Choices.Count == 0)
         {
             ListEvaluation verdict = ListVerdicts.Of(task, cheating.Request);
             return Outcome<CheatEvaluation>.Of(new CheatEvaluation(cheating.Case, cheating.At, verdict.Harm, null, null, [], verdict.Method));
         }
 
-        AttackOutcome worst = WorstCase.Find(task with { HoldsEnough = true }, new SearchOptions(), null, cheating.Request.Cancellation);
-        if (worst is not { Choices: { } choices, Evaluation: { } evaluation, Search: { } search })
+        AttackOutcome worst = ChosenNumbers.For(cheating.Request.Choose, cheating.Case) is { } given
+            ? WorstCase.At(task with { Choices = given }, cheating.Request.Cancellation)
+            : cheating.Request.Searches.Of(task, () => WorstCase.Find(task, new SearchOptions(), SearchTeller.Of(cheating.Request, cheating.Case, cheating.At), cheating.Request.Cancellation));
+        if (worst is not { Choices: { } choices, Evaluation: { } evaluation, Average: { } average })
             return Outcome<CheatEvaluation>.Failed([JudgementMessages.SearchRefused(cheating.Case.Name, worst.Refusal!)]);
         return Outcome<CheatEvaluation>.Of(new CheatEvaluation(
-            cheating.Case, cheating.At, Estimate.AtMost(evaluation.Harm.Value), Average(task, choices, cheating.Request), null, cheating.Named(choices), search.Check));
-    }
-
-    /// <summary>The worst numbers and milder ones: a cheat whose list does not hold enough for the worst takes a milder one.</summary>
-    private static Estimate? Average(ListTask task, IReadOnlyList<Value> worst, RunRequest request)
-    {
-        if (task.Lists.Copies > MostAveraged)
-            return null;
-        Value[][] listed = [[.. worst]];
-        return AdaptiveCheat.Average(task with { Limits = task.Limits with { Negligible = NeglectedPaths } }, listed, NeglectedLists, request.Cancellation).Harm;
+            cheating.Case, cheating.At, Estimate.AtMost(evaluation.Harm.Value), average.Harm, null, cheating.Named(choices), $"{worst.Search?.Check ?? "evaluated at the numbers given"}; on average {average.Strategy}"));
     }
 }

@@ -39,5 +39,9 @@ internal static class JudgementCatalogue
         new("P045", "uncertain value that cannot be moved", "Uncertainties are carried through by moving each uncertain value a little while the others stay. Here the conditions allow that on no side, most often because numbers must add up to 1.", "Give the uncertainty to a value that others do not depend on.", "\"confusion\": [[\"0.98(1)\", 0.02], [0.02, 0.98]]"),
         new("P046", "figure that bends", "To first order a figure is taken to change in proportion to each uncertain value. Here draws give another uncertainty, or the slope depends on how far one looks.", "Go by the sampled band; a sweep over the value shows the bend."),
         new("P047", "nothing uncertain", "--uncertainty was asked for, but no value of the conditions carries one.", "Write the standard uncertainty behind a value, in units of its last digits.", "\"lifetime\": \"80(10) us\""),
+        new("P040", "unknown case", "--choose names a case that the script does not have, that leaves no number open, or that has its numbers already.", "Name a case of the script whose `choose` lines leave numbers open, once.", "--choose \"sender splits: n = 84, k1 = 0, k2 = 15, o = 7, n1 = 126\""),
+        new("P041", "numbers of a case", "--choose must give every number that the case leaves open, each once.", "Write the case, a colon, and each number as name = value, separated by commas."),
+        new("P042", "number outside its range", "A number given with --choose lies outside the range of its `choose` line, or is not whole where the range is.", "Give a number within the range; ranges may depend on numbers before."),
+        new("P043", "levels cannot be compared", "--try-levels evaluates every order of the physical levels, which are too many for more than four, and must be as many for all parameter values.", "Leave it out, and try single assignments with --set resource.levels=\"[2, 0, 1]\"."),
     ];
 }

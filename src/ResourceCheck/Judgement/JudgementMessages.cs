@@ -153,6 +153,33 @@ internal static class JudgementMessages
         "lower M, or fix some of the choices",
         Place.Of($"dishonest \"{name}\""));
 
+    public static Diagnostic UnknownCheat(string text, string name, IEnumerable<string> known) => new(
+        "P040",
+        Severity.Error,
+        known.Any() ? $"`{name}` is no case whose numbers are left open: {Words.Or(known)} fit here." : $"`{text}` gives numbers to a case, but no case of this script leaves any open.",
+        known.Any() ? Words.DidYouMean(name, known) ?? "name a case, a colon and its numbers" : "leave --choose out",
+        Place.Of("--choose"));
+
+    public static Diagnostic CheatTwice(string name) => new(
+        "P040", Severity.Error, $"The numbers of case \"{name}\" are given twice: one --choose per case fits here.", "keep one of them", Place.Of("--choose"));
+
+    public static Diagnostic UnreadableNumbers(string text, Scripts.Binding.DishonestCase cheat) => new(
+        "P041",
+        Severity.Error,
+        $"`{text}` does not give each number of case \"{cheat.Name}\" once: a value for {Words.And(cheat.Choices.Select(c => c.Name))} fits here.",
+        $"write for example --choose \"{cheat.Name}: {string.Join(", ", cheat.Choices.Select(c => $"{c.Name} = 1"))}\"",
+        Place.Of("--choose"));
+
+    public static Diagnostic NumberOutside(Scripts.Binding.DishonestCase cheat, int index, Scripts.Binding.Value value) => new(
+        "P042",
+        Severity.Error,
+        $"{cheat.Choices[index].Name} = {Scripts.Binding.Written.Write(value)} lies outside what case \"{cheat.Name}\" leaves open: {(cheat.Choices[index].Whole ? "a whole number" : "a number")} within its `choose` line fits here.",
+        "look at the ranges in the script; they may depend on the numbers before",
+        Place.Of("--choose"));
+
+    public static Diagnostic TooManyLevels(int levels, int most) => new(
+        "P043", Severity.Error, $"All assignments of {levels} levels are too many to compare: one number of levels, up to {most}, fits here.", "leave --try-levels out, and set resource.levels to the assignments that matter", Place.Of("--try-levels"));
+
     public static Diagnostic NoClaims(SourceText source) => new(
         "P011", Severity.Warning, "This script makes no claims, so there is nothing to prove.", "state what it promises, such as `claim success = 1`", Place.Of(source.Name));
 

@@ -28,7 +28,12 @@ internal static class RunJudgement
             result = result with { Drift = drifted.Value };
         }
 
-        return new Outcome<RunResult>(result, result.Warnings);
+        if (!setup.Request.TryLevels)
+            return new Outcome<RunResult>(result, result.Warnings);
+        Outcome<IReadOnlyList<LevelsResult>> levels = LevelsJudgement.Of(setup);
+        return levels.Value is { } compared
+            ? new Outcome<RunResult>(result with { Levels = compared }, result.Warnings)
+            : Outcome<RunResult>.Failed(levels.Findings);
     }
 
     /// <summary>Every setting and assignment of the private inputs, evaluated; what went wrong is added to the findings.</summary>

@@ -35,6 +35,18 @@ public sealed record RunRequest
     /// <summary>How the uncertainties of the conditions are carried through to the figures; null leaves them out.</summary>
     public UncertaintyRequest? Uncertainty { get; init; }
 
+    /// <summary>Numbers for cheats in place of the worst ones that a search finds, such as <c>sender splits: n = 84, k1 = 0</c>.</summary>
+    public IReadOnlyList<string> Choose { get; init; } = [];
+
+    /// <summary>Whether every assignment of physical levels to the script's values is compared.</summary>
+    public bool TryLevels { get; init; }
+
+    /// <summary>Searches made for this request; requests made from it share them.</summary>
+    internal AttackMemory Searches { get; } = new();
+
+    /// <summary>Told about the search for the worst numbers; null for nobody.</summary>
+    public IProgress<SearchNote>? Progress { get; init; }
+
     /// <summary>Most memory an engine may take, bytes; null uses what the machine has free.</summary>
     public double? MemoryLimit { get; init; }
 }

@@ -47,6 +47,9 @@ public sealed record RunResult
     /// <summary>Copies kept for one use of a list protocol, with the time until they are; null for a protocol on single copies or without a preparation rate.</summary>
     public (int Copies, double? Seconds)? List { get; init; }
 
+    /// <summary>Every assignment of physical levels to values, best first; empty when they were not compared.</summary>
+    public IReadOnlyList<LevelsResult> Levels { get; init; } = [];
+
     /// <summary>What a drift does to failure and harms; null when none was asked for.</summary>
     public DriftResult? Drift { get; init; }
 

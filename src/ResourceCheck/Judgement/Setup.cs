@@ -28,7 +28,7 @@ internal sealed record Setup(
         Outcome<ConditionsDocument>? document = ReadConditions(request);
         List<Setting> settings = [];
         foreach (IReadOnlyDictionary<string, Rational> assignment in choices.Assignments)
-            AddSetting(tree, assignment, document, settings, findings);
+            AddSetting(request, tree, assignment, document, settings, findings);
         findings.AddRange(document?.Findings ?? []);
         findings.AddRange(choiceFindings);
         if (request.Uncertainty is null && document?.Value is { Uncertainties: { Count: > 0 } uncertain })
@@ -67,13 +67,14 @@ internal sealed record Setup(
     }
 
     private static void AddSetting(
-        ScriptTree tree, IReadOnlyDictionary<string, Rational> assignment, Outcome<ConditionsDocument>? document, List<Setting> settings, List<Diagnostic> findings)
+        RunRequest request, ScriptTree tree, IReadOnlyDictionary<string, Rational> assignment, Outcome<ConditionsDocument>? document, List<Setting> settings, List<Diagnostic> findings)
     {
         Outcome<Protocol> protocol = Script.Bind(tree, assignment);
         findings.AddRange(protocol.Findings);
         if (protocol.Value is not { } checkedProtocol)
             return;
         findings.AddRange(ListFigures.Unanswerable(checkedProtocol));
+        findings.AddRange(ChosenNumbers.Findings(request.Choose, checkedProtocol));
         Protocol[] runs = [checkedProtocol, .. checkedProtocol.Dishonest.Select(d => checkedProtocol with { Steps = d.CopySteps })];
         Diagnostic[] misplaced = [.. runs.SelectMany(Planner.MisplacedInterceptions).Select(s => JudgementMessages.InterceptTooKnowing(checkedProtocol.Source.PlaceOf(s.Span)))];
         findings.AddRange(misplaced);

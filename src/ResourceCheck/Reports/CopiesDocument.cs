@@ -15,6 +15,7 @@ internal static class CopiesDocument
             json.WriteString("name", t.Key);
             json.WriteString("value", t.Value);
         });
+        JsonParts.Array(json, "optimised", copies.Optimised, json.WriteStringValue);
         json.WriteString("parameter", copies.Parameter);
         JsonParts.Number(json, "failureTarget", copies.Targets.Failure);
         JsonParts.Number(json, "harmTarget", copies.Targets.Harm);

@@ -41,6 +41,6 @@ internal static class CopiesReport
     [
         $"Honest failure holds at every number from {copies.Copies} to {copies.CheckedUpTo}; it does not fall evenly, since thresholds are whole numbers of copies.",
         .. copies.Targets.Harm >= 1 ? [] : new[] { "Harms were searched at the numbers shown only; between them a harm may lie a little above." },
-        $"Thresholds as given, not optimised: {string.Join(", ", copies.Thresholds.Select(t => $"{t.Key} = {t.Value}"))}.",
+        $"Thresholds{(copies.Optimised.Count == 0 ? " as given, not optimised" : $", {string.Join(", ", copies.Optimised)} chosen so that few copies suffice (the best found, not proved)")}: {string.Join(", ", copies.Thresholds.Select(t => $"{t.Key} = {t.Value}"))}.",
     ];
 }

@@ -25,6 +25,7 @@ internal static class RunDocument
             JsonParts.Object(json, "drift", () => Drift(json, drift));
         else
             json.WriteNull("drift");
+        JsonParts.Objects(json, "levels", run.Levels, l => Levels(json, l));
         JsonParts.Objects(json, "checkpoints", run.Checkpoints, c => Checkpoint(json, c));
         JsonParts.Object(json, "yield", () => Yield(json, run.Yield));
         JsonParts.Object(json, "copies", () =>
@@ -83,6 +84,18 @@ internal static class RunDocument
         else
             json.WriteNull("average");
         json.WriteString("method", attack.Method);
+    }
+
+    private static void Levels(Utf8JsonWriter json, LevelsResult levels)
+    {
+        JsonParts.Array(json, "levels", levels.Levels, json.WriteNumberValue);
+        json.WriteBoolean("today", levels.Today);
+        JsonParts.Objects(json, "figures", levels.Figures, f =>
+        {
+            json.WriteString("case", f.Case);
+            json.WriteString("name", f.Name);
+            JsonParts.EstimateFields(json, f.Value);
+        });
     }
 
     private static void Drift(Utf8JsonWriter json, DriftResult drift)

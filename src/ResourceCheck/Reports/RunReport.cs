@@ -46,6 +46,7 @@ internal static class RunReport
     [
         .. Attacks(run.Attacks, a => Noticed(run, a), run.List is not null),
         .. Drift(run),
+        .. Levels(run.Levels),
         .. run.Checkpoints.Where(c => !c.BuiltIn && Differ(c.Branches)).Select(Branches),
         .. run.Hint is { } hint ? [Section.Of(hint)] : Array.Empty<Section>(),
     ];
@@ -218,6 +219,17 @@ internal static class RunReport
             [new("case", "Case"), new("figure", "Figure"), new("whole", "Value"), new("floor", "Floor"), new("label", "Label")],
             [.. drift.Figures.Select(f => (IReadOnlyList<Cell>)[Cell.Of(f.Case), Cell.Of(f.Name), Truth.CellOf(f.Whole), Truth.CellOf(f.Floor), Cell.Of(Truth.Describe(f.Whole))])]),
             ["The floor is what the drifting runs alone give: nothing that improves the others brings the value below it."]),
+    ];
+
+    private static Section[] Levels(IReadOnlyList<LevelsResult> levels) => levels.Count == 0 ? [] :
+    [
+        new Section("Which physical level plays which value", new Table(
+            [new("levels", "Levels of values 0, 1, …"), .. levels[0].Figures.SelectMany(f => new Column[] { new(f.Case, $"{f.Name} {f.Case}"), new($"{f.Case} label", "Label") }), new("today", "")],
+            [.. levels.Select(l => (IReadOnlyList<Cell>)
+            [
+                Cell.Of(string.Join(", ", l.Levels)), .. l.Figures.SelectMany(f => new[] { Truth.CellOf(f.Value), Cell.Of(Truth.Describe(f.Value)) }), Cell.Of(l.Today ? "as in the conditions" : null),
+            ])]),
+            ["Ordered by the greatest figure of a row; set resource.levels in the conditions to choose."]),
     ];
 
     /// <summary>The worst of the listed strategies, with what is supposed.</summary>

@@ -80,9 +80,9 @@ public sealed partial class UsageTests : IDisposable
     }
 
     [Theory]
-    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --drift --uncertainty --draws --figure")]
+    [InlineData("run", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --choose --drift --try-levels --uncertainty --draws --figure")]
     [InlineData("budget", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --uncertainty --figure")]
-    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm --vary --figure")]
+    [InlineData("copies", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --failure --harm --optimise --vary --figure")]
     [InlineData("tolerance", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --until --uncertainty --figure")]
     [InlineData("sweep", "--under --set --parameter --engine --memory --format --out --quiet --seed --threads --vary --uncertainty --figure")]
     [InlineData("verify", "--parameter --memory --format --out --quiet --seed --threads")]
@@ -138,6 +138,6 @@ public sealed partial class UsageTests : IDisposable
     [GeneratedRegex(@"\((U\d\d\d)\)")]
     private static partial Regex CodePattern();
 
-    [GeneratedRegex(@"(?m)(?<=^  (-h, )?)--[a-z]+")]
+    [GeneratedRegex(@"(?m)(?<=^  (-h, )?)--[a-z]+(-[a-z]+)*")]
     private static partial Regex OptionPattern();
 }

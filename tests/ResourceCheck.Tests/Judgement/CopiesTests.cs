@@ -30,6 +30,30 @@ public sealed class CopiesTests
         Assert.Contains(found.Steps, s => s.Copies == found.Copies && s.Harm is { Label: TruthLabel.Bound });
     }
 
+    /// <summary>Thresholds that are chosen need fewer copies than the script's, and what they are said to hold a run of its own confirms.</summary>
+    [Fact]
+    public void Chosen_thresholds_need_fewer_copies_and_hold_what_is_said()
+    {
+        CopiesResult given = Value(Judge.Copies(new CopiesRequest(Broadcast(), 0.1, 0.2, null)));
+        CopiesResult chosen = Value(Judge.Copies(new CopiesRequest(Broadcast(), 0.1, 0.2, null) { Optimise = ["a", "b", "c", "t1", "t2"] }));
+        Assert.Equal(["a", "b", "c", "t1", "t2"], chosen.Optimised);
+        Assert.True(chosen.Copies < 0.75 * given.Copies, $"{chosen.Copies} against {given.Copies}");
+        RunResult run = Value(Judge.Run(Broadcast() with { Parameters = [new("M", $"{chosen.Copies}"), .. chosen.Thresholds] }));
+        Assert.DoesNotContain(run.Warnings, w => w.Code == "P010"); // requirements hold
+        Assert.True(run.Cases[0].Metrics.Single(m => m.Name == "failure").Estimate.Value <= 0.1);
+        Assert.All(run.Cases.Skip(1), c => Assert.True(c.Metrics.Single(m => m.Name == "harm").Estimate.Value <= 0.2));
+    }
+
+    [Theory]
+    [InlineData("J013", "d")]
+    [InlineData("J013", "M")]
+    public void What_is_no_threshold_is_told(string code, string name) =>
+        Assert.Equal([code], Judge.Copies(new CopiesRequest(Broadcast(), 0.05, 0.1, null) { Optimise = [name] }).Findings.Select(f => f.Code));
+
+    [Fact]
+    public void Thresholds_are_chosen_for_one_value_of_all_else() =>
+        Assert.Equal(["J014"], Judge.Copies(new CopiesRequest(Broadcast() with { Parameters = [new("t1", "0.05,0.06")] }, 0.05, 0.1, null) { Optimise = ["a"] }).Findings.Select(f => f.Code));
+
     [Fact]
     public void What_cannot_be_had_is_told_with_its_figures()
     {

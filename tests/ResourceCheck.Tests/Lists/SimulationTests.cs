@@ -9,9 +9,11 @@ public sealed class SimulationTests
 {
     public static TheoryData<string, int, double> Settings => new()
     {
-        { "honest", 60, 0 }, { "honest", 60, .02 }, { "honest", 150, .02 },
+        { "honest", 60, 0 }, { "honest", 60, .02 }, { "honest", 150, 0 }, { "honest", 150, .02 },
         { "splitter", 60, .02 }, { "splitter", 150, 0 }, { "splitter", 150, .02 },
         { "forger", 60, .02 }, { "forger", 150, .02 },
+        { "nobody lies", 60, .02 }, { "nobody lies", 150, .02 }, { "sender lies", 60, .02 }, { "sender lies", 150, 0 }, { "sender lies", 150, .02 },
+        { "forwarder lies", 60, .02 }, { "forwarder lies", 150, 0 }, { "forwarder lies", 150, .02 },
     };
 
     [Theory]
@@ -39,6 +41,9 @@ public sealed class SimulationTests
     private static ListTask Task(string kind, int copies, IReadOnlyList<CopyType> law) => kind switch
     {
         "honest" => Broadcast.Honest(copies, law),
+        "nobody lies" => Liar.Honest(copies, law),
+        "sender lies" => Liar.SenderLies(copies, law, (copies / 4) + 1, 0, 5, 3, copies * 2 / 5) with { HoldsEnough = false },
+        "forwarder lies" => Liar.ForwarderLies(copies, law, (copies / 10) + 1, copies / 25) with { HoldsEnough = false },
         "forger" => Broadcast.Forger(copies, law, (copies * 3 / 40) + 1, false),
         _ => Broadcast.Splitter(copies, law, false, (copies / 4) + 1, 0, 5, 3, copies * 2 / 5),
     };

@@ -104,6 +104,57 @@ public sealed class DishonestCaseTests
         Assert.Equal(["E008"], Judge.Run(new RunRequest { Script = new InputText("p.protocol", early, "") }).Findings.Select(f => f.Code));
     }
 
+    /// <summary>The table's attacks at M = 300, p = 0.02 (tests/reference/lists.csv), given instead of searched.</summary>
+    [Fact]
+    public void Numbers_that_are_given_are_evaluated_in_place_of_a_search()
+    {
+        RunResult run = Value(Judge.Run(Chosen("sender splits: n = 84, k1 = 0, k2 = 15, o = 7, n1 = 126", "receiver forges: m = 24")));
+        Assert.Equal(5.8103589605e-2, Metric(run, "sender splits", "harm"), 1e-11);
+        Assert.Equal(1.2032077242e-2, Metric(run, "receiver forges", "harm"), 1e-11);
+        Assert.All(run.Attacks, a => Assert.Contains("at the numbers given", a.Method, StringComparison.Ordinal));
+    }
+
+    [Theory]
+    [InlineData("P040", "sender spilts: n = 84")]
+    [InlineData("P041", "receiver forges: n = 24")]
+    [InlineData("P041", "receiver forges: m = many")]
+    [InlineData("P042", "receiver forges: m = 301")]
+    [InlineData("P042", "receiver forges: m = 24.5")]
+    public void Numbers_that_do_not_fit_are_told(string code, string text) =>
+        Assert.Equal([code], Judge.Run(Chosen(text)).Findings.Where(f => f.Severity == Severity.Error).Select(f => f.Code));
+
+    /// <summary>
+    /// Only level 0 decays, into the two others alike: what matters is which value it plays, and with common thresholds value 2 tolerates
+    /// most, because its positions are never in an honest list of the sender's.
+    /// </summary>
+    [Fact]
+    public void The_decaying_level_does_best_as_value_two()
+    {
+        const string decay = """{ "levels": { "decay": [ { "from": 0, "to": 1, "lifetime": "200 us" }, { "from": 0, "to": 2, "lifetime": "200 us" } ] }, "flight": { "length": "2 km", "speed": "2e8 m/s" } }""";
+        RunRequest request = Chosen("sender splits: n = 38, k1 = 0, k2 = 7, o = 2, n1 = 50", "receiver forges: m = 12") with
+        {
+            Overrides = [], Conditions = new InputText("c.json", decay, ""), Parameters = [new("M", "150")], TryLevels = true,
+        };
+        IReadOnlyList<LevelsResult> levels = Value(Judge.Run(request)).Levels;
+        Assert.Equal(6, levels.Count);
+        Assert.Equal(0, levels[0].Levels[2]);
+        Assert.Equal([0, 1, 2], Assert.Single(levels, l => l.Today).Levels);
+        foreach (int value in (int[])[0, 1, 2])
+        {
+            double[] failures = [.. levels.Where(l => l.Levels[value] == 0).Select(l => l.Figures[0].Value.Value)];
+            Assert.Equal(failures[0], failures[1], 1e-12);
+        }
+    }
+
+    [Fact]
+    public void Levels_are_not_compared_where_their_orders_are_too_many() => Assert.Equal(
+        ["P043"], Judge.Run(ProtocolLibraryTests.Request("stranger-numbering.protocol", conditions: false, parameters: false) with { Parameters = [new("n", "5")], TryLevels = true }).Findings.Select(f => f.Code));
+
+    private static RunRequest Chosen(params string[] numbers) => ProtocolLibraryTests.Request("detectable-broadcast.protocol", conditions: false, parameters: false) with
+    {
+        Overrides = [new("flight.depolarising", "0.02")], Parameters = [new("M", "300")], Choose = numbers,
+    };
+
     private static double Metric(RunResult run, string name, string metric) => run.Cases.Single(c => c.Case == name).Metrics.Single(m => m.Name == metric).Estimate.Value;
 
     private static RunResult Run(string script, params (string Name, string Value)[] parameters) => Value(Judge.Run(

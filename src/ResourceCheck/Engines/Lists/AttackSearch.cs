@@ -44,6 +44,23 @@ public sealed class AttackSearch
         return points <= options.ExhaustiveUpTo ? search.All() : search.Climb();
     }
 
+    /// <summary>The best point that climbs from some points lead to; quick, and good where the starts were best for a question much like this one.</summary>
+    /// <param name="ranges">Least and greatest value of each number.</param>
+    /// <param name="value">The function; called from several threads.</param>
+    /// <param name="starts">Where to begin; numbers outside their range are moved to its end.</param>
+    /// <param name="options">Climbs, their first step, and the value that ends the search.</param>
+    /// <param name="cancellation">Stops the search.</param>
+    public static (int[] Point, double Value) Nearby(
+        IReadOnlyList<(int From, int To)> ranges, Func<IReadOnlyList<int>, double> value, IEnumerable<int[]> starts, NearbyOptions options, CancellationToken cancellation)
+    {
+        SearchMemory memory = new(value, null, cancellation);
+        AttackSearch search = new(ranges, memory, new SearchOptions());
+        memory.EvaluateAll(starts.Select(start => (int[])[.. start.Select((n, i) => Math.Clamp(n, ranges[i].From, ranges[i].To))]));
+        foreach (int[] start in memory.Top(options.Climbs).TakeWhile(_ => memory.Best().Value < options.Enough))
+            search.Descend(start, options.Step, options.Enough);
+        return memory.Best();
+    }
+
     private SearchResult All()
     {
         _memory.EvaluateAll(Grid(_ranges.Select(r => r.To - r.From + 1).ToArray()));
@@ -151,25 +168,27 @@ public sealed class AttackSearch
         return Neighbours(at, 1, held).FirstOrDefault(next => _memory.Value(next) > value);
     }
 
-    private int[] Climb(int[] start, int points)
+    private void Climb(int[] start, int points) => Descend(start, Math.Max(1, _ranges.Max(r => r.To - r.From) / points));
+
+    /// <summary>Climbs with steps that are halved down to 1, until nothing near is better or enough is found.</summary>
+    private void Descend(int[] start, int first, double enough = double.PositiveInfinity)
     {
         int[] at = start;
-        int step = Math.Max(1, _ranges.Max(r => r.To - r.From) / points);
-        for (; ; step /= 2)
+        for (int step = first; step >= 1; step /= 2)
         {
-            while (Better(at, step) is { } next)
+            while (_memory.Value(at) < enough && Better(at, step) is { } next)
                 at = next;
-            if (step <= 1)
-                return at;
         }
     }
 
     /// <summary>The best of the points that differ by a step in one number or two; null when none is better.</summary>
     private int[]? Better(int[] at, int step)
     {
+        int[][] neighbours = [.. Neighbours(at, step)];
+        _memory.EvaluateAll(neighbours);
         double value = _memory.Value(at);
         int[]? best = null;
-        foreach (int[] next in Neighbours(at, step))
+        foreach (int[] next in neighbours)
         {
             double found = _memory.Value(next);
             if (found > value)

@@ -45,7 +45,7 @@ internal sealed class CountedSets
         return this;
     }
 
-    /// <summary>Tables over cells and tags, by the value that the sums give.</summary>
+    /// <summary>Tables over cells, by the value that the sums give.</summary>
     public IEnumerable<(Value Value, CountTable Table)> Sorted(CountTable table, IReadOnlyList<Value> choices)
     {
         int sums = _sets.Count;

@@ -8,7 +8,7 @@ namespace ResourceCheck.Engines.Lists;
 /// independent. An operation that counts splits cells binomially, a draw splits them by the hypergeometric law, and tables of
 /// structures that later operations cannot tell apart are added up.
 /// </summary>
-internal sealed class Counter(ListProgram program, IReadOnlyList<Value> choices, Meter meter, int tags)
+internal sealed class Counter(ListProgram program, IReadOnlyList<Value> choices, Meter meter)
 {
     private readonly SortedDictionary<int, Dictionary<string, (ListStructure Structure, CountTable Table)>> _pending = [];
     private readonly ListContext _context = program.Context;
@@ -21,7 +21,7 @@ internal sealed class Counter(ListProgram program, IReadOnlyList<Value> choices,
     public void Deposit(int at, ListStructure structure, CountTable table)
     {
         ReductionPlan plan = program.Plans.Reduction(at, structure);
-        Add(at, plan, Splitter.Split(plan.Refinement, table, tags, meter));
+        Add(at, plan, Splitter.Split(plan.Refinement, table, meter));
     }
 
     /// <summary>Runs all operations before one.</summary>
@@ -41,14 +41,13 @@ internal sealed class Counter(ListProgram program, IReadOnlyList<Value> choices,
             _pending[at] = groups = [];
         int cells = plan.Order.Length;
         if (!groups.TryGetValue(plan.Structure.Key, out (ListStructure Structure, CountTable Table) group))
-            groups[plan.Structure.Key] = group = (plan.Structure, new CountTable(cells + tags));
+            groups[plan.Structure.Key] = group = (plan.Structure, new CountTable(cells));
         ushort[] key = new ushort[group.Table.Width];
         for (int entry = 0; entry < table.Count; entry++)
         {
             ReadOnlySpan<ushort> from = table.Key(entry);
             for (int cell = 0; cell < cells; cell++)
                 key[cell] = from[plan.Order[cell]];
-            from[cells..].CopyTo(key.AsSpan(cells));
             group.Table.Add(key, table.Weight(entry));
         }
     }
@@ -88,7 +87,7 @@ internal sealed class Counter(ListProgram program, IReadOnlyList<Value> choices,
     private IEnumerable<(Value Value, ListStructure Structure, CountTable Table)> Read(int at, Reading reading, ListStructure structure, CountTable table, Func<int[][]> classes)
     {
         ReadingPlan plan = program.Plans.Reading(at, structure, reading, null, classes);
-        CountTable split = Splitter.Split(plan.Refinement, table, tags, meter);
+        CountTable split = Split(plan, table);
         return plan.Counted.Sorted(split, choices).Select(p => (p.Value, plan.Refinement.After, p.Table));
     }
 
@@ -104,13 +103,26 @@ internal sealed class Counter(ListProgram program, IReadOnlyList<Value> choices,
         bool pooled = draw.AlwaysFull && structure.Cells.Where((c, i) => c.IsPool && !source[i].IsZero).Any();
         ReadingPlan plan = program.Plans.Reading(at, structure, draw.Count, pooled ? null : source, () => Foresight.Classes(_context, structure, at));
         ListStructure next = plan.Refinement.After;
-        foreach ((Value value, CountTable part) in plan.Counted.Sorted(Splitter.Split(plan.Refinement, table, tags, meter), choices))
+        foreach ((Value value, CountTable part) in plan.Counted.Sorted(Split(plan, table), choices))
         {
-            (ListStructure Structure, CountTable Table) drawn = value is not NumberValue number
-                ? (next.With(draw.Slot, (BigInteger[]?)null), part)
-                : Drawing.Draw(next, part, _context.Set(draw.Set, next)!, draw.Slot, Positions(number), pooled, meter);
-            Deposit(at + 1, drawn.Structure, drawn.Table);
+            if (value is not NumberValue number)
+            {
+                Deposit(at + 1, next.With(draw.Slot, (BigInteger[]?)null), part);
+                continue;
+            }
+
+            BigInteger[] set = _context.Set(draw.Set, next)!;
+            if (pooled)
+                meter.Need(at, set.Aggregate(BigInteger.Zero, (all, types) => all | types), Positions(number));
+            (ListStructure drawn, CountTable counts) = Drawing.Draw(next, part, set, draw.Slot, Positions(number), pooled, meter);
+            Deposit(at + 1, drawn, counts);
         }
+    }
+
+    private CountTable Split(ReadingPlan plan, CountTable table)
+    {
+        meter.CountedPool |= plan.Refinement.CountsPool;
+        return Splitter.Split(plan.Refinement, table, meter);
     }
 
     private static int Positions(NumberValue number) => (int)BigInteger.Min(BigInteger.Max(number.Number.Floor(), 0), CountTable.LargestCount);

@@ -18,7 +18,7 @@ public static class CountingEngine
         }
         catch (ListRefusalException refusal)
         {
-            return new ListOutcome(null, refusal.Message);
+            return new ListOutcome(null, refusal.Message, refusal.TooMuchWork);
         }
     }
 }

@@ -16,13 +16,13 @@ internal sealed class Drawing
     private readonly CountTable _target;
     private readonly ushort[] _key;
 
-    private Drawing(ListStructure structure, BigInteger[] set, int tags, Meter meter)
+    private Drawing(ListStructure structure, BigInteger[] set, Meter meter)
     {
         _structure = structure;
         _meter = meter;
         _cells = structure.Cells.Length;
         _sources = [.. Enumerable.Range(0, _cells).Where(c => !set[c].IsZero)];
-        _target = new CountTable(_cells + _sources.Length + tags);
+        _target = new CountTable(_cells + _sources.Length);
         _key = new ushort[_target.Width];
     }
 
@@ -30,7 +30,7 @@ internal sealed class Drawing
     public static (ListStructure Structure, CountTable Table) Draw(
         ListStructure structure, CountTable table, BigInteger[] set, int slot, int positions, bool pooled, Meter meter)
     {
-        Drawing drawing = new(structure, set, table.Width - structure.Cells.Length, meter);
+        Drawing drawing = new(structure, set, meter);
         for (int entry = 0; entry < table.Count; entry++)
             drawing.Draw(table.Key(entry), table.Weight(entry), positions, pooled);
         return (drawing.After(set, slot, pooled), drawing._target);
@@ -38,9 +38,8 @@ internal sealed class Drawing
 
     private void Draw(ReadOnlySpan<ushort> key, double weight, int positions, bool pooled)
     {
-        key[.._cells].CopyTo(_key);
+        key.CopyTo(_key);
         _key.AsSpan(_cells, _sources.Length).Clear();
-        key[_cells..].CopyTo(_key.AsSpan(_cells + _sources.Length));
         if (pooled)
         {
             RequireOnePool();

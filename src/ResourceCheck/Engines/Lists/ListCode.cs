@@ -8,9 +8,8 @@ namespace ResourceCheck.Engines.Lists;
 /// <param name="IsSet">Whether a slot holds a set of positions.</param>
 /// <param name="SuccessSlot">Slot of the success verdict.</param>
 /// <param name="HarmSlot">Slot of the harm verdict.</param>
-/// <param name="LastCheatOperation">Index behind the last draw or choice of a cheating party; 0 without one.</param>
 internal sealed record ListCode(
-    IReadOnlyList<ListOperation> Operations, int Slots, IReadOnlyList<bool> IsSet, int SuccessSlot, int HarmSlot, int LastCheatOperation)
+    IReadOnlyList<ListOperation> Operations, int Slots, IReadOnlyList<bool> IsSet, int SuccessSlot, int HarmSlot)
 {
     /// <summary>Slot of the cheat's first number; the others follow.</summary>
     public required int FirstChoice { get; init; }

@@ -15,7 +15,6 @@ internal sealed class ListCompiler
     private readonly int _choices;
     private int _slots;
     private int _party;
-    private int _lastCheat;
 
     private ListCompiler(ListTask task)
     {
@@ -35,7 +34,7 @@ internal sealed class ListCompiler
         compiler.Assign(success, task.Protocol.Success);
         compiler.Assign(harm, task.Case?.Harm ?? new BoundLiteral(default, Value.False));
         bool[] isSet = [.. Enumerable.Range(0, compiler._slots).Select(compiler._kinds.IsSet)];
-        return new ListCode(compiler._operations, compiler._slots, isSet, success, harm, compiler._lastCheat)
+        return new ListCode(compiler._operations, compiler._slots, isSet, success, harm)
         {
             FirstChoice = compiler._choices,
             ChoicesOnlySizeDraws = compiler.ChoicesOnlySizeDraws(),
@@ -79,10 +78,7 @@ internal sealed class ListCompiler
     private void Make(int party, int slot, BoundExpression value)
     {
         _party = party;
-        bool choice = _task.Cheats(party) && BoundWalk.Within(value).Any(p => p is BoundChoice or BoundSome);
         Assign(slot, value);
-        if (choice)
-            _lastCheat = _operations.Count;
     }
 
     private void Assign(int slot, BoundExpression value)

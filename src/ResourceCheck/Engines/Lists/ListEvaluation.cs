@@ -25,4 +25,5 @@ public sealed record ListEvaluation
 /// <summary>An evaluation, or the reason why there is none.</summary>
 /// <param name="Evaluation">The evaluation; null when refused.</param>
 /// <param name="Refusal">What stood against it, with its figures; null when evaluated.</param>
-public sealed record ListOutcome(ListEvaluation? Evaluation, string? Refusal);
+/// <param name="TooMuchWork">Whether a coarser evaluation might still be possible.</param>
+public sealed record ListOutcome(ListEvaluation? Evaluation, string? Refusal, bool TooMuchWork = false);

@@ -35,11 +35,26 @@ internal sealed class ListProgram
     public ListEvaluation Evaluate(IReadOnlyList<Value> choices, ListLimits limits, CancellationToken cancellation)
     {
         Meter meter = new(limits, cancellation);
-        Counter counter = new(this, choices, meter, 0);
+        return Run(choices, meter).ToEvaluation(_task, meter);
+    }
+
+    /// <summary>What an attack does, and what of its own list it takes.</summary>
+    public Attack Attack(int[] point, IReadOnlyList<Value> choices, ListLimits limits, CancellationToken cancellation)
+    {
+        Meter meter = new(limits, cancellation);
+        double harm = Run(choices, meter).Harm;
+        Dictionary<BigInteger, int>? needs = meter.CountedPool ? null
+            : meter.Needs.GroupBy(n => n.Key.Types).ToDictionary(g => g.Key, g => g.Sum(n => n.Value));
+        return new Attack(point, harm, needs);
+    }
+
+    private Verdicts Run(IReadOnlyList<Value> choices, Meter meter)
+    {
+        Counter counter = new(this, choices, meter);
         CountTable start = new(1);
         start.Add([(ushort)_task.Lists.Copies], 1);
         counter.Deposit(0, Start(choices, new Cell(Context.All, _task.HoldsEnough, BigInteger.Zero)), start);
         counter.RunTo(Context.Code.Operations.Count);
-        return Verdicts.Of(Context, counter).ToEvaluation(_task, meter);
+        return Verdicts.Of(Context, counter);
     }
 }

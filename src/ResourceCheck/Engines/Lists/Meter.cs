@@ -1,4 +1,5 @@
 using System.Globalization;
+using System.Numerics;
 
 namespace ResourceCheck.Engines.Lists;
 
@@ -14,6 +15,15 @@ internal sealed class Meter(ListLimits limits, CancellationToken cancellation)
     /// <summary>Paths less probable than this are left out.</summary>
     public double Negligible => limits.Negligible;
 
+    /// <summary>Whether something counted positions of which the cheat was taken to hold enough: what comes out then depends on how many there are.</summary>
+    public bool CountedPool { get; set; }
+
+    /// <summary>Most positions that each draw from a list taken to hold enough has asked for, by operation and types drawn from.</summary>
+    public Dictionary<(int At, BigInteger Types), int> Needs { get; } = [];
+
+    /// <summary>A draw from a list that is taken to hold enough.</summary>
+    public void Need(int at, BigInteger types, int positions) => Needs[(at, types)] = Math.Max(positions, Needs.GetValueOrDefault((at, types)));
+
     public void Count(int transitions, CountTable table)
     {
         Transitions += transitions;
@@ -22,8 +32,8 @@ internal sealed class Meter(ListLimits limits, CancellationToken cancellation)
         _next = Transitions + TransitionsBetweenLooks;
         cancellation.ThrowIfCancellationRequested();
         if (Transitions > limits.Operations)
-            throw new ListRefusalException(string.Create(CultureInfo.InvariantCulture, $"Too much work: counting needs more than {limits.Operations:0.#e0} transitions between states of counts."));
+            throw new ListRefusalException(string.Create(CultureInfo.InvariantCulture, $"Too much work: counting needs more than {limits.Operations:0.#e0} transitions between states of counts.")) { TooMuchWork = true };
         if (table.Count > limits.States)
-            throw new ListRefusalException(string.Create(CultureInfo.InvariantCulture, $"Too much work: counting needs more than {limits.States:0.#e0} states of counts at once."));
+            throw new ListRefusalException(string.Create(CultureInfo.InvariantCulture, $"Too much work: counting needs more than {limits.States:0.#e0} states of counts at once.")) { TooMuchWork = true };
     }
 }

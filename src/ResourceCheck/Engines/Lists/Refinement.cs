@@ -28,6 +28,9 @@ internal sealed class Refinement
     /// <summary>Structure with the new cells.</summary>
     public ListStructure After { get; }
 
+    /// <summary>Whether positions are counted of which a cheat was taken to hold enough.</summary>
+    public bool CountsPool => _counted.Any(c => c.Where((types, cell) => _before.Cells[cell].IsPool && !types.IsZero).Any());
+
     /// <summary>Number of sums.</summary>
     public int Sums => _counted.Count;
 

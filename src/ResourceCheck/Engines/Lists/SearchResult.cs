@@ -11,7 +11,17 @@ namespace ResourceCheck.Engines.Lists;
 /// <param name="Corners">Corners of the plateau at the best point from which exchanges are tried.</param>
 /// <param name="ExchangeSizes">Most sizes of an exchange tried.</param>
 /// <param name="Seed">Fixes the random points.</param>
-public sealed record SearchOptions(int ExhaustiveUpTo = 1000, int GridPoints = 1100, int Climbs = 6, int RandomClimbs = 4, int Sweeps = 6, double Hopeless = 0.02, int Exchanges = 8, int Corners = 8, int ExchangeSizes = 40, ulong Seed = 1);
+public sealed record SearchOptions(int ExhaustiveUpTo = 1000, int GridPoints = 1100, int Climbs = 6, int RandomClimbs = 4, int Sweeps = 6, double Hopeless = 0.02, int Exchanges = 8, int Corners = 8, int ExchangeSizes = 40, ulong Seed = 1)
+{
+    /// <summary>A shorter search, for a question beside the main one.</summary>
+    public SearchOptions Milder() => this with { GridPoints = GridPoints / 4, Climbs = 3, RandomClimbs = 2, Sweeps = 1, Corners = 1 };
+}
+
+/// <summary>How far to climb from points that are thought to be good.</summary>
+/// <param name="Climbs">Climbs from the best of the points.</param>
+/// <param name="Step">First step of a climb; it is halved down to 1.</param>
+/// <param name="Enough">A value that ends the search, because nobody asks how much larger it gets.</param>
+public sealed record NearbyOptions(int Climbs = 3, int Step = 8, double Enough = double.PositiveInfinity);
 
 /// <summary>State of a search.</summary>
 /// <param name="Evaluations">Points evaluated so far.</param>

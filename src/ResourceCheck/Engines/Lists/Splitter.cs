@@ -10,37 +10,35 @@ internal sealed class Splitter
 {
     private readonly Refinement _refinement;
     private readonly Meter _meter;
-    private readonly int _tags;
     private readonly int[] _waiting;
     private readonly int _sums;
     private readonly int _cells;
     private CountTable _target = new(0);
     private ushort[] _key = [];
 
-    private Splitter(Refinement refinement, Meter meter, int tags)
+    private Splitter(Refinement refinement, Meter meter)
     {
         _refinement = refinement;
         _meter = meter;
-        _tags = tags;
         _sums = refinement.Sums;
         _cells = refinement.After.Cells.Length;
         _waiting = [.. Enumerable.Range(0, refinement.Atoms.Count).Where(c => refinement.Atoms[c].Length > 1)];
     }
 
-    /// <summary>The table over sums, new cells and tags.</summary>
-    public static CountTable Split(Refinement refinement, CountTable table, int tags, Meter meter)
+    /// <summary>The table over sums and new cells.</summary>
+    public static CountTable Split(Refinement refinement, CountTable table, Meter meter)
     {
-        Splitter splitter = new(refinement, meter, tags);
+        Splitter splitter = new(refinement, meter);
         CountTable current = splitter.Load(table);
         for (int stage = 0; stage < splitter._waiting.Length; stage++)
             current = splitter.Stage(current, stage);
         return current;
     }
 
-    /// <summary>Moves whole cells to where they go; cells to be split wait behind the tags.</summary>
+    /// <summary>Moves whole cells to where they go; cells to be split wait behind them.</summary>
     private CountTable Load(CountTable table)
     {
-        CountTable loaded = new(_sums + _cells + _tags + _waiting.Length);
+        CountTable loaded = new(_sums + _cells + _waiting.Length);
         ushort[] key = new ushort[loaded.Width];
         for (int entry = 0; entry < table.Count; entry++)
         {
@@ -51,12 +49,11 @@ internal sealed class Splitter
             {
                 Atom[] atoms = _refinement.Atoms[cell];
                 if (atoms.Length > 1)
-                    key[_sums + _cells + _tags + waiting++] = from[cell];
+                    key[_sums + _cells + waiting++] = from[cell];
                 else
                     Move(key, atoms[0], from[cell]);
             }
 
-            from[^_tags..].CopyTo(key.AsSpan(_sums + _cells));
             loaded.Add(key, table.Weight(entry));
             _meter.Count(1, loaded);
         }

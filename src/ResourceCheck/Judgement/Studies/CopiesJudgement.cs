@@ -12,6 +12,9 @@ namespace ResourceCheck.Judgement.Studies;
 /// </summary>
 internal sealed class CopiesJudgement
 {
+    /// <summary>Stands for all thresholds.</summary>
+    private const string All = "all";
+
     /// <summary>A list this long takes the counting to minutes a number.</summary>
     private const int MostCopies = 20_000;
 
@@ -28,12 +31,16 @@ internal sealed class CopiesJudgement
     private const int HarmSteps = 4;
 
     private readonly CopiesRequest _request;
+    private readonly IReadOnlyList<string> _optimised;
+    private readonly int _from;
     private readonly string _parameter;
     private readonly SortedDictionary<int, CopiesStep> _steps = [];
 
-    private CopiesJudgement(CopiesRequest request, string parameter)
+    private CopiesJudgement(CopiesRequest request, string parameter, IReadOnlyList<string> optimised, int from)
     {
         _request = request;
+        _optimised = optimised;
+        _from = from;
         _parameter = parameter;
     }
 
@@ -48,8 +55,23 @@ internal sealed class CopiesJudgement
             return Outcome<CopiesResult>.Failed([StudyMessages.NoCopiesParameter()]);
         try
         {
-            CopiesJudgement judgement = new(request, parameter.Name);
             int least = (int)Math.Max(1, Math.Ceiling(parameter.From.ToDouble())), most = (int)Math.Min(MostCopies, Math.Floor(parameter.To.ToDouble()));
+            (CopiesRequest at, IReadOnlyList<string> chosen, int from) = (request, [], 0);
+            if (request.Optimise.Count > 0)
+            {
+                ParameterInfo[] reals = [.. parameters.Where(p => p.Values is null)];
+                if (request.Optimise.FirstOrDefault(n => n != All && reals.All(p => p.Name != n)) is { } unknown)
+                    return Outcome<CopiesResult>.Failed([StudyMessages.NoThreshold(unknown, reals.Select(p => p.Name))]);
+                ParameterInfo[] thresholds = [.. reals.Where(p => request.Optimise.Contains(All) || request.Optimise.Contains(p.Name))];
+                if (read.Settings.Count > 1)
+                    return Outcome<CopiesResult>.Failed([StudyMessages.SeveralSettings()]);
+                if (ThresholdSearch.Find(request, parameter.Name, thresholds, read.Settings[0].Protocol, most) is not { } proposal)
+                    return Outcome<CopiesResult>.Failed([StudyMessages.NoThresholdsReach(most, request)]);
+                at = request with { Run = request.Run with { Parameters = [.. request.Run.Parameters.Where(p => thresholds.All(t => t.Name != p.Key)), .. proposal.Thresholds.Select(t => KeyValuePair.Create(t.Key, t.Value.ToString()))] } };
+                (chosen, from) = ([.. thresholds.Select(t => t.Name)], proposal.Copies);
+            }
+
+            CopiesJudgement judgement = new(at, parameter.Name, chosen, from);
             return judgement.Least(least, most) is { } copies
                 ? Outcome<CopiesResult>.Of(judgement.Conclude(copies, read))
                 : Outcome<CopiesResult>.Failed([StudyMessages.NotReached(parameter.Name, judgement._steps.Values.Last(), request)]);
@@ -66,7 +88,7 @@ internal sealed class CopiesJudgement
             return null;
         if (_request.Harm >= 1)
             return honest;
-        int bad = honest - 1, good = honest;
+        int good = Math.Max(honest, Math.Min(_from, most)), bad = good - 1; // thresholds were chosen for the number they come with
         while (!HarmHolds(good))
         {
             bad = good;
@@ -167,6 +189,7 @@ internal sealed class CopiesJudgement
             Conditions = Provenance.Conditions(setup),
             Overrides = _request.Run.Overrides,
             Thresholds = [.. all[0].Setting.Protocol.Parameters.Where(p => p.Name != _parameter).Select(p => KeyValuePair.Create(p.Name, p.Value.ToString()))],
+            Optimised = _optimised,
             Parameter = _parameter,
             Targets = (_request.Failure, _request.Harm),
             Copies = copies,

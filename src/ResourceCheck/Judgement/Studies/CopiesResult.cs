@@ -24,6 +24,9 @@ public sealed record CopiesResult
     /// <summary>Parameters with the values used at the number found: the thresholds.</summary>
     public required IReadOnlyList<KeyValuePair<string, string>> Thresholds { get; init; }
 
+    /// <summary>Names of the thresholds that were chosen here; the others are as given.</summary>
+    public IReadOnlyList<string> Optimised { get; init; } = [];
+
     /// <summary>Parameter behind <c>copies</c>.</summary>
     public required string Parameter { get; init; }
 
@@ -60,4 +63,8 @@ public sealed record CopiesStep(int Copies, Estimate Failure, Estimate? Harm);
 /// <param name="Failure">What honest failure must not exceed.</param>
 /// <param name="Harm">What harms must not exceed; from 1 on none is searched.</param>
 /// <param name="Progress">Told about every number looked at; null for nobody.</param>
-public sealed record CopiesRequest(RunRequest Run, double Failure, double Harm, IProgress<CopiesStep>? Progress);
+public sealed record CopiesRequest(RunRequest Run, double Failure, double Harm, IProgress<CopiesStep>? Progress)
+{
+    /// <summary>Parameters that are chosen so that few copies suffice; <c>all</c> stands for all with a real range.</summary>
+    public IReadOnlyList<string> Optimise { get; init; } = [];
+}

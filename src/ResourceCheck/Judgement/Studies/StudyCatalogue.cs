@@ -19,6 +19,8 @@ internal static class StudyCatalogue
         new("J010", "tolerance of a harm", "Harm is the worst that a search finds at each value, whose steps would be taken for crossings.", "Set a goal on another figure, or sweep."),
         new("J011", "figure not defined", "Somewhere in the range the figure has no value, for example because no copy is kept.", "Narrow the range."),
         new("J012", "no number of copies to vary", "The command varies the parameter that stands behind `copies`.", "Let the script write copies with a parameter."),
+        new("J013", "no threshold", "--optimise names a parameter that does not exist or takes only listed or whole values.", "Name parameters with a real range, or `all`.", "--optimise a,t1"),
+        new("J014", "several values beside thresholds", "Thresholds are chosen for fixed values of all other parameters.", "Give one value for each."),
         new("E010", "target not reached", "With these thresholds and this noise, honest failure or a harm does not fall below the target, however many copies are taken, or only with more than the program counts.", "Choose other thresholds, lower the noise, or ask for less."),
     ];
 }

@@ -44,6 +44,19 @@ internal static class StudyMessages
     public static Diagnostic NoCopiesParameter() => new(
         "J012", Severity.Error, "The number of copies cannot be varied: a `copies` line with a parameter, as in `copies M`, fits here.", "declare `parameter M = 150 in 12..1000000` and write `copies M`", Place.Of("script"));
 
+    public static Diagnostic NoThreshold(string name, IEnumerable<string> known) => new(
+        "J013", Severity.Error, $"`{name}` is no threshold that could be chosen: {Words.Or(known.Append("all"))} fit here.", Words.DidYouMean(name, known) ?? "thresholds are parameters with a real range, such as `in 0 to 1`", Place.Of("--optimise"));
+
+    public static Diagnostic SeveralSettings() => new(
+        "J014", Severity.Error, "Thresholds are chosen for one value of every other parameter, but several are given.", "give one value each with --parameter", Place.Of("--optimise"));
+
+    public static Diagnostic NoThresholdsReach(int most, CopiesRequest request) => new(
+        "E010",
+        Severity.Error,
+        $"No thresholds were found that hold the targets (honest failure {FigureText.Number(request.Failure)}, harms {FigureText.Number(request.Harm)}) with up to {most} copies.",
+        "lower the noise, ask for less, or begin with other thresholds",
+        Place.Of("copies"));
+
     public static Diagnostic NotReached(string parameter, CopiesStep last, CopiesRequest request) => new(
         "E010",
         Severity.Error,
