@@ -60,8 +60,12 @@ public sealed class ScriptedListTests
 
     /// <summary>All allowed (n, k1, k2, o, n1) at the default thresholds.</summary>
     private static IEnumerable<int[]> Attacks(int copies) =>
-        from n in Sizes(copies) from k1 in Enumerable.Range(0, n + 1) from k2 in Enumerable.Range(0, n - k1 + 1)
-        from o in Enumerable.Range(0, n - k1 - k2 + 1) from n1 in Sizes(copies) select new[] { n, k1, k2, o, n1 };
+        from n in Sizes(copies)
+        from k1 in Enumerable.Range(0, n + 1)
+        from k2 in Enumerable.Range(0, n - k1 + 1)
+        from o in Enumerable.Range(0, n - k1 - k2 + 1)
+        from n1 in Sizes(copies)
+        select new[] { n, k1, k2, o, n1 };
 
     private static IEnumerable<int> Sizes(int copies) => Enumerable.Range(0, copies).Where(n => 4 * n >= copies && 100 * n <= 42 * copies);
 

@@ -133,7 +133,10 @@ public sealed class DishonestCaseTests
         const string decay = """{ "levels": { "decay": [ { "from": 0, "to": 1, "lifetime": "200 us" }, { "from": 0, "to": 2, "lifetime": "200 us" } ] }, "flight": { "length": "2 km", "speed": "2e8 m/s" } }""";
         RunRequest request = Chosen("sender splits: n = 38, k1 = 0, k2 = 7, o = 2, n1 = 50", "receiver forges: m = 12") with
         {
-            Overrides = [], Conditions = new InputText("c.json", decay, ""), Parameters = [new("M", "150")], TryLevels = true,
+            Overrides = [],
+            Conditions = new InputText("c.json", decay, ""),
+            Parameters = [new("M", "150")],
+            TryLevels = true,
         };
         IReadOnlyList<LevelsResult> levels = Value(Judge.Run(request)).Levels;
         Assert.Equal(6, levels.Count);
@@ -152,7 +155,9 @@ public sealed class DishonestCaseTests
 
     private static RunRequest Chosen(params string[] numbers) => ProtocolLibraryTests.Request("detectable-broadcast.protocol", conditions: false, parameters: false) with
     {
-        Overrides = [new("flight.depolarising", "0.02")], Parameters = [new("M", "300")], Choose = numbers,
+        Overrides = [new("flight.depolarising", "0.02")],
+        Parameters = [new("M", "300")],
+        Choose = numbers,
     };
 
     private static double Metric(RunResult run, string name, string metric) => run.Cases.Single(c => c.Case == name).Metrics.Single(m => m.Name == metric).Estimate.Value;
